@@ -1,0 +1,224 @@
+"""The words in which the standard is declared: variables, codes and a closed set of layout nodes.
+
+Everything here is frozen data. Conditions and counts are data too, never callables, so that
+decoder, encoder, walk, models, schema and documentation all read the same declaration.
+"""
+
+from __future__ import annotations
+
+from dataclasses import dataclass
+from typing import Final, Literal
+
+Coding = Literal["unsigned", "signed", "bitset", "digits", "latin1", "group-identity", "version"]
+"""How the bits of a variable are read.
+
+``signed`` is two's complement; ``digits`` are decimal digits in nibbles, left adjusted and
+padded with F; ``group-identity`` holds NID_C in its 10 high and NID_BG in its 14 low bits;
+``version`` holds X in its 3 high and Y in its 4 low bits.
+"""
+
+CodeKind = Literal["value", "special", "spare", "bit", "spare_bit", "range"]
+"""``value`` an enumerated meaning, ``special`` a code that is not a number, ``spare`` a code
+without meaning, ``bit`` and ``spare_bit`` the weight of one bit of a bit set, ``range`` a note
+on codes that are plain numbers."""
+
+SCALED: Final = "scale"
+"""The resolution of a distance whose step is set by the governing Q_SCALE (0.1, 1 or 10 m)."""
+
+TO_TRAIN: Final = "to-train"
+TO_TRACK: Final = "to-track"
+Direction = Literal["to-train", "to-track"]
+
+
+@dataclass(frozen=True, slots=True)
+class Codes:
+    """The meaning of the codes `first` to `last` (inclusive) of one variable."""
+
+    first: int
+    last: int
+    kind: CodeKind
+    label: str
+
+
+@dataclass(frozen=True, slots=True)
+class Variable:
+    """One variable of the standard.
+
+    `resolution` is the size of one step in `unit` (a decimal number as text, or `SCALED`);
+    `plain` the codes that are plain numbers. `lineage` names what stays the same when an issue
+    of the standard renames a variable; `formerly` lists the names it had in earlier issues.
+    """
+
+    name: str
+    clause: str
+    bits: int
+    coding: Coding
+    title: str
+    unit: str = ""
+    resolution: str = ""
+    plain: tuple[int, int] | None = None
+    codes: tuple[Codes, ...] = ()
+    formerly: tuple[str, ...] = ()
+    lineage: str = ""
+
+    def __post_init__(self) -> None:
+        """Take the name as the lineage where none is declared."""
+        if not self.lineage:
+            object.__setattr__(self, "lineage", self.name)
+
+
+@dataclass(frozen=True, slots=True)
+class Eq:
+    """True when the variable, read earlier in this or an enclosing scope, equals `code`."""
+
+    variable: str
+    code: int
+
+
+@dataclass(frozen=True, slots=True)
+class Ne:
+    """True when the variable, read earlier in this or an enclosing scope, differs from `code`."""
+
+    variable: str
+    code: int
+
+
+@dataclass(frozen=True, slots=True)
+class In:
+    """True when the variable, read earlier in this or an enclosing scope, is one of `codes`."""
+
+    variable: str
+    codes: tuple[int, ...]
+
+
+Condition = Eq | Ne | In
+
+
+@dataclass(frozen=True, slots=True)
+class Field:
+    """One variable; `key` names it where the variable stands twice in one scope."""
+
+    variable: str
+    key: str = ""
+
+    @property
+    def name(self) -> str:
+        """The key under which the value stands in a tree."""
+        return self.key or self.variable
+
+
+@dataclass(frozen=True, slots=True)
+class Group:
+    """A named scope for variables that stand twice, such as start and end of a text display."""
+
+    name: str
+    nodes: tuple[Node, ...]
+
+
+@dataclass(frozen=True, slots=True)
+class Series:
+    """One mandatory element, then N_ITER, then that many further elements of the same layout."""
+
+    name: str
+    nodes: tuple[Node, ...]
+
+
+@dataclass(frozen=True, slots=True)
+class Repeat:
+    """N_ITER, then that many elements."""
+
+    name: str
+    nodes: tuple[Node, ...]
+
+
+@dataclass(frozen=True, slots=True)
+class When:
+    """Nodes that are there only when the condition holds."""
+
+    condition: Condition
+    nodes: tuple[Node, ...]
+
+
+@dataclass(frozen=True, slots=True)
+class Text:
+    """A text: the number of characters in variable `length`, then each one as `element`."""
+
+    length: str
+    element: str
+
+
+@dataclass(frozen=True, slots=True)
+class Opaque:
+    """The rest of the packet, bits that no layout explains."""
+
+    name: str
+
+
+Node = Field | Group | Series | Repeat | When | Text | Opaque
+
+COUNT: Final = "N_ITER"
+
+
+@dataclass(frozen=True, slots=True)
+class Packet:
+    """One packet of one direction; `senders` says who transmits it (or to whom it goes)."""
+
+    number: int
+    direction: Direction
+    clause: str
+    name: str
+    senders: tuple[str, ...]
+    nodes: tuple[Node, ...]
+
+
+@dataclass(frozen=True, slots=True)
+class Optional:
+    """A packet that a message may carry beyond the required ones, and from whom, if limited."""
+
+    packet: int
+    sender: str = ""
+
+
+@dataclass(frozen=True, slots=True)
+class Required:
+    """Packets that follow the fixed variables in this order; each entry lists alternatives."""
+
+    packets: tuple[tuple[int, ...], ...] = ()
+
+
+@dataclass(frozen=True, slots=True)
+class RadioMessage:
+    """One radio message: fixed variables, then required packets, then optional ones."""
+
+    number: int
+    direction: Direction
+    clause: str
+    name: str
+    senders: tuple[str, ...]
+    nodes: tuple[Node, ...]
+    required: Required = Required()
+    optional: tuple[Optional, ...] = ()
+    version_invariant: bool = False
+
+
+@dataclass(frozen=True, slots=True)
+class Header:
+    """The fixed variables of a balise telegram or a loop message, `bits` wide in all."""
+
+    medium: Literal["balise", "loop"]
+    clause: str
+    bits: int
+    nodes: tuple[Node, ...]
+
+
+@dataclass(frozen=True, slots=True)
+class Declarations:
+    """All that one issue of the standard declares, before it is checked and frozen."""
+
+    version: str
+    issue: str
+    date: str
+    variables: tuple[Variable, ...]
+    packets: tuple[Packet, ...]
+    messages: tuple[RadioMessage, ...]
+    headers: tuple[Header, ...]
