@@ -1,0 +1,1 @@
+"""Readers and writers written by `fishplate.engine.generate`; never edited by hand."""
