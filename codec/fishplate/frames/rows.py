@@ -1,0 +1,205 @@
+"""`walk`: every field of a frame with its place, its code and its meaning."""
+
+from __future__ import annotations
+
+from dataclasses import dataclass
+from functools import lru_cache
+from typing import TYPE_CHECKING
+
+from fishplate.bits import read_bits
+from fishplate.engine.runtime import codec
+from fishplate.engine.walk import Cursor, Row, Walk
+from fishplate.errors import DecodeError, Path, Truncated
+from fishplate.frames.decoding import decode
+from fishplate.frames.reader import DEFAULT_VERSION, HEADS
+from fishplate.meaning import explain
+from fishplate.standard import Registry, registry
+from fishplate.standard.vocabulary import TO_TRAIN, Field
+from fishplate.versions import closest_layouts
+
+if TYPE_CHECKING:
+    from collections.abc import Iterator, Sequence
+
+    from fishplate.bits import Data
+    from fishplate.frames.message import Message
+    from fishplate.standard.vocabulary import Node
+
+
+@dataclass(frozen=True, slots=True)
+class FieldRow:
+    """One field of a frame, in wire order.
+
+    `offset` and `width` are in bits from the start of the frame. `raw` is the code (D_REF
+    signed), a text for X_TEXT, hex for bits that no layout explains (`variable` is None then).
+    `scale` is the code of the governing Q_SCALE, `meaning` what people read.
+    """
+
+    path: Path
+    variable: str | None
+    offset: int
+    width: int
+    raw: int | str
+    meaning: str
+    scale: int | None = None
+
+
+def walk(
+    data: Data,
+    *,
+    medium: str | None = None,
+    direction: str | None = None,
+    version: str | None = None,
+    bits: int | None = None,
+    strict: bool = True,
+) -> Iterator[FieldRow]:
+    """Yield the field rows of one frame; arguments as for `decode`.
+
+    The rows cover every bit once. On broken input strict walking yields what stands before the
+    trouble and then raises it; lenient walking goes on, with rows for bits that no layout
+    explains.
+    """
+    message = decode(
+        data, medium=medium, direction=direction, version=version, bits=bits, strict=False
+    )
+    value, size = read_bits(data, bits)
+    yield from walk_message(message, value, size, strict=strict)
+
+
+def walk_message(message: Message, value: int, size: int, *, strict: bool) -> Iterator[FieldRow]:
+    """Yield the field rows of a frame that has been decoded leniently before."""
+    frame = _Frame(message, value, size)
+    if strict and message.problems:
+        error = message.problems[0].error
+        yield from map(frame.field_row, frame.rows_before(error))
+        raise error
+    yield from map(frame.field_row, frame.rows())
+
+
+@lru_cache(maxsize=4096)
+def _meaning(version: str, name: str, raw: int | str, scale: int | None) -> str:
+    return explain(registry(version).variables[name], raw, scale).text
+
+
+class _Frame:
+    """A decoded message beside its bits: the message says which layouts apply where."""
+
+    def __init__(self, message: Message, value: int, size: int) -> None:
+        self.message = message
+        self.value = value
+        self.size = size
+        self.version = closest_layouts(message.version) or DEFAULT_VERSION
+        self.registry: Registry = registry(self.version)
+        self.unmeasured = codec(self.version).unmeasured[self._direction]
+
+    def field_row(self, row: Row) -> FieldRow:
+        name = row.variable
+        meaning = _meaning(self.version, name, row.raw, row.scale) if name else "not explained"
+        return FieldRow(row.path, name, row.offset, row.width, row.raw, meaning, row.scale)
+
+    def _cursor(self, start: int, size: int) -> Cursor:
+        return Cursor(self.value >> self.size - start - size & (1 << size) - 1, size, start)
+
+    def rows(self) -> list[Row]:
+        """Return rows that cover the whole frame."""
+        cursor = self._cursor(0, self.size)
+        self._header(cursor)
+        for index in range(len(self.message.packets)):
+            self._packet(cursor, index)
+        surplus = self.message.surplus["bits"] if self.message.surplus else 0
+        for name in ("padding", "filler", "content"):
+            if getattr(self.message, name):
+                self._walk(cursor).unexplained(cursor.left - surplus, (name,))
+        if surplus:
+            self._walk(cursor).unexplained(surplus, ("surplus",))
+        return cursor.rows
+
+    def rows_before(self, error: DecodeError) -> list[Row]:
+        """Return the rows of everything that could be read before the trouble."""
+        cursor = self._cursor(0, self.size)
+        match error.path:
+            case ("header", *_) if not self.message.packets and self.message.content:
+                self._until_it_ends(cursor, self._header_nodes(), ("header",))
+            case ("packets", int(index), *_):
+                self._header(cursor)
+                for each in range(min(index, len(self.message.packets))):
+                    self._packet(cursor, each)
+                self._broken_packet(cursor, index)
+            case ("padding",):
+                self._header(cursor)
+                for each in range(len(self.message.packets)):
+                    self._packet(cursor, each)
+            case ("header", *_):
+                self._header(cursor)
+        return cursor.rows
+
+    def _walk(self, cursor: Cursor) -> Walk:
+        return Walk(self.registry.variables, cursor)
+
+    def _header(self, cursor: Cursor) -> None:
+        if not self.message.header:
+            return
+        nodes = self._header_nodes()
+        if set(self.message.header) == {"NID_MESSAGE", "L_MESSAGE"}:
+            nodes = nodes[:2]
+        self._walk(cursor).scope(nodes, ("header",), {})
+
+    def _header_nodes(self) -> Sequence[Node]:
+        if self.message.medium != "radio":
+            return self.registry.headers[self.message.medium or "balise"].nodes
+        number = self.message.header.get("NID_MESSAGE", self.value >> max(0, self.size - 8))
+        known = self.registry.messages.get((self._direction, number))
+        return known.nodes if known else (Field("NID_MESSAGE"), Field("L_MESSAGE"))
+
+    @property
+    def _direction(self) -> str:
+        return self.message.direction or TO_TRAIN
+
+    def _head_nodes(self) -> list[Node]:
+        names = ["NID_PACKET", *(["Q_DIR"] if self._direction == TO_TRAIN else []), "L_PACKET"]
+        return [Field(each) for each in names]
+
+    def _packet(self, cursor: Cursor, index: int) -> None:
+        packet = self.message.packets[index]
+        path = ("packets", index)
+        if "content" in packet:
+            self._walk(cursor).scope(self._head_nodes(), path, {})
+            width = packet["content"]["bits"]
+            self._walk(cursor).unexplained(width, (*path, "content"))
+            return
+        nodes = self.registry.packets[self._direction, packet["NID_PACKET"]].nodes
+        width = packet.get("L_PACKET", cursor.left)
+        inner = self._cursor(cursor.position, width)
+        self._walk(inner).scope(nodes, path, {})
+        if "surplus" in packet:
+            self._walk(inner).unexplained(inner.left, (*path, "surplus"))
+        cursor.rows += inner.rows
+        cursor.position += inner.position
+
+    def _broken_packet(self, cursor: Cursor, index: int) -> None:
+        """Add the rows of a packet up to where its bits run out, or its head where it is whole."""
+        packets = self.message.packets
+        path = ("packets", index)
+        nodes: Sequence[Node] = self._head_nodes()
+        width = cursor.left
+        number = self.value >> max(0, cursor.left - 8) & 255
+        if index == len(packets) and number in self.unmeasured:
+            nodes = self.registry.packets[self._direction, number].nodes
+        if index < len(packets):
+            known = self.registry.packets.get((self._direction, packets[index]["NID_PACKET"]))
+            if known and "surplus" in packets[index]:
+                self._packet(cursor, index)
+                cursor.rows.pop()
+                return
+            if known:
+                nodes = known.nodes
+                width = min(width, max(packets[index]["L_PACKET"], HEADS[self._direction]))
+        inner = self._cursor(cursor.position, width)
+        self._until_it_ends(inner, nodes, path)
+        cursor.rows += inner.rows
+
+    def _until_it_ends(self, cursor: Cursor, nodes: Sequence[Node], path: Path) -> None:
+        try:
+            self._walk(cursor).scope(nodes, path, {})
+        except Truncated:
+            # The trouble itself is raised by the caller, after the rows read so far.
+            return
