@@ -1,0 +1,195 @@
+"""Models of whole frames and of packets, and what turns authored trees into trees of codes."""
+
+from __future__ import annotations
+
+from functools import cache
+from typing import TYPE_CHECKING, Annotated, Any, Literal
+
+from pydantic import BeforeValidator, ConfigDict, ValidationError, create_model
+
+from fishplate.errors import EncodeError, Path
+from fishplate.frames.decoding import FIRST_TO_TRACK
+from fishplate.frames.reader import DEFAULT_VERSION
+from fishplate.models.schema import content_packet_schema, message_schema, telegram_schema
+from fishplate.models.scopes import Bits, Scope, custom_error, scope_model
+from fishplate.standard import registry
+from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN, Field, Node
+from fishplate.versions import closest_layouts
+
+if TYPE_CHECKING:
+    from collections.abc import Callable
+
+    from pydantic import BaseModel
+
+    from fishplate.standard import Registry
+
+
+@cache
+def packet_model(
+    number: int, direction: str = TO_TRAIN, version: str = DEFAULT_VERSION
+) -> type[Scope]:
+    """Return the model of one packet; `KeyError` when the registry holds none."""
+    layouts = registry(version)
+    packet = layouts.packets[direction, number]
+    name = f"Packet{number}{'ToTrain' if direction == TO_TRAIN else 'ToTrack'}"
+    return scope_model(layouts, packet.nodes, name, {"surplus": Bits})
+
+
+@cache
+def message_model(
+    number: int, direction: str | None = None, version: str = DEFAULT_VERSION
+) -> type[BaseModel]:
+    """Return the model of one radio message; `KeyError` when the registry holds none."""
+    layouts = registry(version)
+    if direction is None:
+        direction = TO_TRAIN if (TO_TRAIN, number) in layouts.messages else TO_TRACK
+    nodes = layouts.messages[direction, number].nodes
+    schema = message_schema(layouts, direction, number)
+    return _frame_model(layouts, f"Message{number}", "radio", direction, nodes, schema)
+
+
+@cache
+def telegram_model(version: str = DEFAULT_VERSION) -> type[BaseModel]:
+    """Return the model of a balise telegram."""
+    return _telegram_model("balise", version)
+
+
+@cache
+def loop_model(version: str = DEFAULT_VERSION) -> type[BaseModel]:
+    """Return the model of a loop message."""
+    return _telegram_model("loop", version)
+
+
+def _telegram_model(medium: str, version: str) -> type[BaseModel]:
+    layouts = registry(version)
+    nodes = layouts.headers[medium].nodes
+    schema = telegram_schema(layouts, medium)
+    return _frame_model(layouts, medium.capitalize(), medium, TO_TRAIN, nodes, schema)
+
+
+class _Frame(Scope):
+    """Base of the models of frames."""
+
+    model_config = ConfigDict(extra="forbid")
+
+
+def _frame_model(
+    layouts: Registry,
+    name: str,
+    medium: str,
+    direction: str,
+    nodes: tuple[Node, ...],
+    schema: dict[str, Any],
+) -> type[BaseModel]:
+    header = scope_model(layouts, nodes, f"{name}Header")
+    packet = Annotated[Any, BeforeValidator(_packet_validator(direction, layouts.version))]
+    rests = ("padding", "surplus", "content") if medium == "radio" else ("filler", "content")
+    fields: dict[str, Any] = {
+        "medium": (Literal[medium], medium),
+        "direction": (Literal[direction], direction),
+        "version": (Annotated[str, BeforeValidator(str)], layouts.version),
+        "issue": (Annotated[str, BeforeValidator(str)], layouts.issue),
+        "header": (header, ...),
+        "packets": (list[packet], []),
+        **dict.fromkeys(rests, (Bits, None)),
+        "problems": (list[Any], None),
+    }
+    model = create_model(name, __base__=_Frame, **fields)
+    model.model_config["json_schema_extra"] = _replaced_by(schema)
+    return model
+
+
+def _replaced_by(schema: dict[str, Any]) -> Callable[[dict[str, Any]], None]:
+    def replace(generated: dict[str, Any]) -> None:
+        generated.clear()
+        generated.update(schema)
+
+    return replace
+
+
+def _packet_validator(direction: str, version: str) -> Callable[[Any], dict[str, Any]]:
+    known = registry(version).packets
+
+    def validate(value: Any) -> dict[str, Any]:
+        if isinstance(value, Scope):
+            return value.tree()
+        if not isinstance(value, dict):
+            raise custom_error(f"expected a packet as a mapping, got {value!r}")
+        if "content" in value:
+            return content_packet_model(direction).model_validate(value).tree()
+        number = value.get("NID_PACKET")
+        if not isinstance(number, int) or (direction, number) not in known:
+            reason = f"packet {number!r} is not known {direction}; give its bits as content"
+            raise custom_error(reason)
+        return packet_model(number, direction, version).model_validate(value).tree()
+
+    return validate
+
+
+@cache
+def content_packet_model(direction: str, version: str = DEFAULT_VERSION) -> type[Scope]:
+    """Return the model of a packet that is kept as unexplained bits."""
+    names = ["NID_PACKET", *(["Q_DIR"] if direction == TO_TRAIN else []), "L_PACKET"]
+    nodes = tuple(Field(each) for each in names)
+    model = scope_model(registry(version), nodes, "ContentPacket", {"content": Bits})
+    model.model_config["json_schema_extra"] = _replaced_by(content_packet_schema(direction))
+    return model
+
+
+def codes_of(tree: object) -> dict[str, Any]:
+    """Return an authored tree, of codes or of meanings, as a tree of codes.
+
+    Raises one `EncodeError` for all that is wrong: its `path` is that of the first error, its
+    `others` are the further ones.
+    """
+    if not isinstance(tree, dict):
+        raise EncodeError(f"expected a mapping, got {type(tree).__name__}", got=tree)
+    model = _model_for(tree)
+    try:
+        validated = model.model_validate(tree)
+    except ValidationError as error:
+        raise _encode_error(error) from None
+    return validated.model_dump(exclude_none=True, exclude={"problems"})
+
+
+def _model_for(tree: dict[str, Any]) -> type[BaseModel]:
+    version = closest_layouts(str(tree.get("version", DEFAULT_VERSION))) or DEFAULT_VERSION
+    header = tree.get("header")
+    if not isinstance(header, dict):
+        raise EncodeError("expected the header as a mapping", path=("header",), got=header)
+    medium = tree.get("medium")
+    if medium == "loop" or (medium is None and "NID_LOOP" in header):
+        return loop_model(version)
+    if medium == "balise" or (medium is None and "NID_BG" in header and "Q_UPDOWN" in header):
+        return telegram_model(version)
+    number = header.get("NID_MESSAGE")
+    direction = tree.get("direction")
+    try:
+        return message_model(number, direction, version)
+    except (KeyError, TypeError):
+        raise EncodeError(
+            f"message {number!r} is not known"
+            + (f" {direction}" if direction else "")
+            + _other_way(number, direction),
+            path=("header", "NID_MESSAGE"),
+            expected="the number of a radio message",
+            got=number,
+        ) from None
+
+
+def _other_way(number: object, direction: object) -> str:
+    if not direction or not isinstance(number, int):
+        return ""
+    other = TO_TRACK if number >= FIRST_TO_TRACK else TO_TRAIN
+    known = (other, number) in registry(DEFAULT_VERSION).messages
+    return f"; it is sent {other}" if known and other != direction else ""
+
+
+def _encode_error(error: ValidationError) -> EncodeError:
+    errors = []
+    for each in error.errors(include_url=False):
+        path: Path = each["loc"]
+        errors.append(EncodeError(each["msg"], path=path, expected="", got=each["input"]))
+    first, *others = errors
+    first.others = tuple(others)
+    return first

@@ -1,0 +1,281 @@
+"""One pydantic model a scope of a layout: a packet, a header, an element of a set.
+
+Conditions, missing and superfluous keys are judged together with the values, so that one
+validation names all that is wrong.
+"""
+
+from __future__ import annotations
+
+from contextvars import ContextVar
+from difflib import get_close_matches
+from typing import TYPE_CHECKING, Annotated, Any, ClassVar
+
+from annotated_types import Len
+from pydantic import (
+    BaseModel,
+    BeforeValidator,
+    ConfigDict,
+    ValidationError,
+    ValidatorFunctionWrapHandler,
+    create_model,
+    model_validator,
+)
+from pydantic_core import InitErrorDetails, PydanticCustomError
+
+from fishplate.bits import read_blob
+from fishplate.engine.spell import COMPUTED, all_keys, code_of, conditional_keys
+from fishplate.engine.walk import holds
+from fishplate.errors import EncodeError
+from fishplate.meaning import parse
+from fishplate.models.schema import BITS_SCHEMA, scope_schema
+from fishplate.standard.vocabulary import (
+    COUNT,
+    Field,
+    Group,
+    Node,
+    Opaque,
+    Repeat,
+    Series,
+    Text,
+    When,
+)
+
+if TYPE_CHECKING:
+    from collections.abc import Callable, Iterator, Mapping, Sequence
+
+    from pydantic import GetJsonSchemaHandler
+    from pydantic_core.core_schema import CoreSchema
+
+    from fishplate.standard import Registry
+    from fishplate.standard.vocabulary import Variable
+
+_scale: ContextVar[int | None] = ContextVar("_scale", default=None)
+"""The code of the Q_SCALE that governs the scope being validated."""
+
+_outer: ContextVar[Mapping[str, object] | None] = ContextVar("_outer", default=None)
+"""The codes of the enclosing scopes, which conditions may look at."""
+
+
+def custom_error(reason: str) -> PydanticCustomError:
+    """Return an error that pydantic shows with our sentence."""
+    # Braces would be taken for placeholders of a template.
+    return PydanticCustomError("fishplate", "{reason}", {"reason": reason})
+
+
+class Scope(BaseModel):
+    """Base of all models: holds a scope of a layout to its conditions."""
+
+    model_config = ConfigDict(extra="forbid")
+
+    nodes: ClassVar[tuple[Node, ...]] = ()
+    registry_used: ClassVar[Any] = None
+
+    @model_validator(mode="wrap")
+    @classmethod
+    def _judge(cls, value: Any, handler: ValidatorFunctionWrapHandler) -> Scope:
+        if not isinstance(value, dict):
+            return handler(value)  # type: ignore[no-any-return]  # pydantic's handler is untyped
+        codes = {**(_outer.get() or {}), **cls._codes(value)}
+        errors = [_details(*each) for each in cls._misplaced(value, codes)]
+        scale = codes.get("Q_SCALE")
+        outer_token = _outer.set(codes)
+        scale_token = _scale.set(scale if isinstance(scale, int) else None)
+        result: Any = None
+        try:
+            result = handler(value)
+        except ValidationError as error:
+            keys = all_keys(cls.nodes)
+            errors += [_copied(each, keys) for each in error.errors(include_url=False)]
+        finally:
+            _outer.reset(outer_token)
+            _scale.reset(scale_token)
+        if errors:
+            raise ValidationError.from_exception_data(cls.__name__, errors)
+        return result  # type: ignore[no-any-return]  # pydantic's handler is untyped
+
+    @classmethod
+    def _codes(cls, value: Mapping[str, Any]) -> dict[str, object]:
+        """Return the codes that can be made out, for conditions to look at."""
+        codes: dict[str, object] = {}
+        for node in _fields(cls.nodes):
+            if node.name in value:
+                variable = cls.registry_used.variables[node.variable]
+                try:
+                    codes[node.variable] = parse(variable, value[node.name])
+                except EncodeError:
+                    # The field's own validator reports it; no condition can be judged by it.
+                    codes[node.variable] = None
+        return codes
+
+    @classmethod
+    def _misplaced(
+        cls, value: Mapping[str, Any], codes: Mapping[str, object]
+    ) -> Iterator[tuple[str, str, object]]:
+        """Yield key, reason and value of what is missing, or there against a condition."""
+        for key, conditions, present in _asked(cls.nodes, codes):
+            if present is None:
+                continue
+            if present and key not in value and key not in COMPUTED:
+                because = f", since {conditions}" if conditions else ""
+                yield key, f"missing{because}", None
+            elif not present and key in value:
+                yield key, f"given, but only there when {conditions}", value[key]
+
+    def tree(self) -> dict[str, Any]:
+        """Return the scope as a tree of codes."""
+        return self.model_dump(exclude_none=True)
+
+    @classmethod
+    def __get_pydantic_json_schema__(
+        cls, core_schema: CoreSchema, handler: GetJsonSchemaHandler
+    ) -> dict[str, Any]:
+        """Give the schema that the layout declares, conditions included."""
+        if not cls.nodes:
+            return handler(core_schema)
+        return scope_schema(cls.registry_used, cls.nodes)
+
+
+def _fields(nodes: Sequence[Node]) -> Iterator[Field]:
+    for node in nodes:
+        if isinstance(node, Field):
+            yield node
+        elif isinstance(node, When):
+            yield from _fields(node.nodes)
+
+
+def _asked(
+    nodes: Sequence[Node], codes: Mapping[str, object]
+) -> Iterator[tuple[str, str, bool | None]]:
+    """Yield each key of a scope, its conditions in words, and whether it is to be there.
+
+    None means that it cannot be told, because a variable it depends on is wrong itself.
+    """
+    texts: dict[str, str] = {}
+    for key, text in conditional_keys(nodes):
+        texts[key] = f"{texts[key]} or {text}" if key in texts else text
+    present: dict[str, bool | None] = {}
+    _presence(nodes, codes, present, there=True)
+    for key, there in present.items():
+        yield key, texts.get(key, ""), there
+
+
+def _presence(
+    nodes: Sequence[Node],
+    codes: Mapping[str, object],
+    present: dict[str, bool | None],
+    *,
+    there: bool | None,
+) -> None:
+    for node in nodes:
+        if isinstance(node, When):
+            inside = there
+            if inside:
+                known = codes.get(node.condition.variable) is not None
+                inside = holds(node.condition, codes) if known else None
+            _presence(node.nodes, codes, present, there=inside)
+        else:
+            (key,) = all_keys([node])
+            present[key] = present.get(key) or there
+
+
+def _details(key: str, reason: str, value: object) -> InitErrorDetails:
+    return InitErrorDetails(type=custom_error(reason), loc=(key,), input=value)
+
+
+def _copied(error: Any, keys: Sequence[str]) -> InitErrorDetails:
+    """Carry an error of pydantic over; its own sentences are kept."""
+    reason = error["msg"]
+    if error["type"] == "extra_forbidden":
+        near = get_close_matches(str(error["loc"][-1]), keys, n=1)
+        reason = "not part of this layout" + (f"; did you mean {near[0]}?" if near else "")
+    return InitErrorDetails(type=custom_error(reason), loc=error["loc"], input=error["input"])
+
+
+def _as_pydantic(function: Callable[[Any], Any]) -> BeforeValidator:
+    def validate(value: Any) -> Any:
+        try:
+            return function(value)
+        except EncodeError as error:
+            raise custom_error(error.reason) from None
+
+    return BeforeValidator(validate)
+
+
+def _field_type(variable: Variable) -> Any:
+    def convert(value: object) -> int | str:
+        code = parse(variable, value, _scale.get())
+        code_of(variable, code, ())
+        return code
+
+    kind = str if variable.coding == "digits" else int
+    return Annotated[kind, _as_pydantic(convert)]
+
+
+def _text_type(length: Variable) -> Any:
+    most = (1 << length.bits) - 1
+
+    def convert(value: object) -> str:
+        if not isinstance(value, str):
+            raise EncodeError(f"expected a text, got {value!r}: quote it")
+        wrong = [each for each in value if ord(each) > 0xFF]  # noqa: PLR2004  ISO 8859-1
+        if wrong:
+            raise EncodeError(f"character {wrong[0]!r} is not in ISO 8859-1")
+        if len(value) > most:
+            raise EncodeError(f"expected at most {most} characters, got {len(value)}")
+        return value
+
+    return Annotated[str, _as_pydantic(convert)]
+
+
+def _checked_bits(value: object) -> object:
+    read_blob(value, ())
+    return value
+
+
+class _BitsSchema:
+    """Gives the schema of ``{"bits": n, "hex": "..."}``."""
+
+    @classmethod
+    def __get_pydantic_json_schema__(
+        cls, _core_schema: CoreSchema, _handler: GetJsonSchemaHandler
+    ) -> dict[str, Any]:
+        return dict(BITS_SCHEMA)
+
+
+Bits = Annotated[dict[str, Any], _as_pydantic(_checked_bits), _BitsSchema]
+"""Bits that no layout explains."""
+
+
+def scope_model(
+    registry: Registry, nodes: tuple[Node, ...], name: str, extra: Mapping[str, Any] | None = None
+) -> type[Scope]:
+    """Build the model of one scope; `extra` adds fields that are not the layout's."""
+    fields: dict[str, Any] = {}
+    for key, kind in _types(registry, nodes, name):
+        fields[key] = (kind, None)
+    for key, kind in (extra or {}).items():
+        fields[key] = (kind, None)
+    model = create_model(name, __base__=Scope, **fields)
+    model.nodes = nodes
+    model.registry_used = registry
+    return model
+
+
+def _types(registry: Registry, nodes: Sequence[Node], name: str) -> Iterator[tuple[str, Any]]:
+    for node in nodes:
+        match node:
+            case Field():
+                yield node.name, _field_type(registry.variables[node.variable])
+            case When():
+                yield from _types(registry, node.nodes, name)
+            case Group():
+                yield node.name, scope_model(registry, node.nodes, f"{name}_{node.name}")
+            case Series() | Repeat():
+                first = 1 if isinstance(node, Series) else 0
+                most = first + (1 << registry.variables[COUNT].bits) - 1
+                element = scope_model(registry, node.nodes, f"{name}_{node.name}")
+                yield node.name, Annotated[list[element], Len(first, most)]  # type: ignore[valid-type]
+            case Text():
+                yield node.element, _text_type(registry.variables[node.length])
+            case Opaque():
+                yield node.name, Bits
