@@ -1,0 +1,3 @@
+"""Checks against sources outside the project; each module names its own."""
+
+from __future__ import annotations
