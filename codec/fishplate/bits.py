@@ -24,6 +24,7 @@ if TYPE_CHECKING:
 NIBBLE = 4
 BYTE = 8
 _HEX = frozenset("0123456789abcdefABCDEF")
+_HEX_OF_BYTE = tuple(f"{octet:02X}" for octet in range(256))
 _BLOB_KEYS = frozenset({"bits", "hex"})
 
 
@@ -125,7 +126,7 @@ def to_bitstring(value: int, size: int) -> Bits:
 def blob(value: int, size: int) -> dict[str, Any]:
     """Return bits that no layout explains in the form a tree keeps them."""
     if size <= BYTE:
-        return {"bits": size, "hex": f"{value << BYTE - size:02X}" if size else ""}
+        return {"bits": size, "hex": _HEX_OF_BYTE[value << BYTE - size] if size else ""}
     return {"bits": size, "hex": to_hex(value, size)}
 
 

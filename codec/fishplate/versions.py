@@ -4,10 +4,11 @@ from __future__ import annotations
 
 from functools import cache
 
-from fishplate.engine.runtime import MODULES
+from fishplate.engine.runtime import MODULES, codec
+from fishplate.standard import registry
 
-DEFINED = {16: "1.0", 17: "1.1", 32: "2.0", 33: "2.1"}
-"""M_VERSION codes that SUBSET-026 issue 3.6.0 (7.5.1.79) defines, with the version they name."""
+DEFAULT_VERSION = "2.1"
+"""The version that is assumed where neither the frame nor the caller says one."""
 
 
 def version_text(code: int) -> str:
@@ -15,9 +16,16 @@ def version_text(code: int) -> str:
     return f"{code >> 4}.{code & 15}"
 
 
+@cache
 def defined_codes() -> frozenset[int]:
-    """Return the M_VERSION codes that name a version of the standard."""
-    return frozenset(DEFINED)
+    """Return the M_VERSION codes that name a version of the standard (SUBSET-026 7.5.1.79)."""
+    return frozenset(code for version in MODULES for code in codec(version).versions)
+
+
+def is_declared_invalid(code: int) -> bool:
+    """Tell whether the standard declares an M_VERSION code not valid (SUBSET-026 7.5.1.79)."""
+    codes = registry(DEFAULT_VERSION).variables["M_VERSION"].codes
+    return any(each.kind == "spare" and each.first <= code <= each.last for each in codes)
 
 
 @cache

@@ -6,7 +6,7 @@ Unfolded, each way through is a run of known width, read or written in one piece
 
 from __future__ import annotations
 
-from dataclasses import dataclass
+from dataclasses import dataclass, replace
 from typing import TYPE_CHECKING
 
 from fishplate.engine.source import RUN_BITS
@@ -25,10 +25,16 @@ WIDEST_CONDITION = 8
 
 @dataclass(frozen=True, slots=True)
 class Unfolded:
-    """Fields, and then, unless the end is reached, a condition with both ways on from it."""
+    """Fields, and then, unless the end is reached, a condition with both ways on from it.
+
+    `hits` and `misses` are the codes of its variable, of those still possible here, for which
+    it holds and does not.
+    """
 
     fields: tuple[Field, ...]
     condition: Condition | None = None
+    hits: frozenset[int] = frozenset()
+    misses: frozenset[int] = frozenset()
     true: Unfolded | None = None
     false: Unfolded | None = None
 
@@ -84,12 +90,12 @@ def _unfold(
             inside = [*node.nodes, *rest]
             if hits in (codes, frozenset()):
                 further = _unfold(inside if hits else rest, variables, possible)
-                return Unfolded(
-                    (*fields, *further.fields), further.condition, further.true, further.false
-                )
+                return replace(further, fields=(*fields, *further.fields))
             return Unfolded(
                 tuple(fields),
                 node.condition,
+                hits,
+                codes - hits,
                 _unfold(inside, variables, {**possible, name: hits}),
                 _unfold(rest, variables, {**possible, name: codes - hits}),
             )

@@ -103,7 +103,8 @@ def _table(registry: Registry) -> str:
             lines.append("    },")
         media = ", ".join(f'"{medium}": {verb}_{medium}' for medium in registry.headers)
         lines.append(f"    {verb}_header={{{media}}},")
-    lines += [f"    unmeasured={_unmeasured(registry)},", ")", ""]
+    lines += [f"    unmeasured={_unmeasured(registry)},"]
+    lines += [f"    versions={_versions(registry)},", ")", ""]
     return "\n".join(lines)
 
 
@@ -115,6 +116,12 @@ def _unmeasured(registry: Registry) -> str:
             bits = sum(registry.variables[each.variable].bits for each in fields)
             widths[packet.direction][packet.number] = bits
     return str(widths).replace("'", '"')
+
+
+def _versions(registry: Registry) -> str:
+    codes = registry.variables["M_VERSION"].codes
+    named = {each.first: each.label for each in codes if each.kind == "value"}
+    return str(named).replace("'", '"')
 
 
 def main(arguments: list[str]) -> int:

@@ -7,7 +7,7 @@ returns the tree and what is left. When the bits run out, a shift by a negative 
 
 from __future__ import annotations
 
-from dataclasses import dataclass
+from dataclasses import dataclass, field, replace
 from typing import TYPE_CHECKING
 
 from fishplate.engine.branches import Unfolded, unfold
@@ -21,7 +21,6 @@ from fishplate.engine.source import (
 )
 from fishplate.standard.vocabulary import (
     COUNT,
-    Eq,
     Field,
     Group,
     Node,
@@ -56,6 +55,39 @@ class _Set:
     key: str
     local: str
     first: str
+
+
+@dataclass(frozen=True)
+class _Way:
+    """How far an unfolded element has been followed: fields with their shift in the word.
+
+    `left` bits of the word, `width` in all, are still ahead; `known` holds codes that the
+    conditions passed have pinned down.
+    """
+
+    items: str
+    width: int
+    places: tuple[tuple[Field, int], ...] = ()
+    known: Mapping[str, str] = field(default_factory=dict)
+
+    @property
+    def left(self) -> int:
+        """Return how many bits of the word are still ahead."""
+        return self.places[-1][1] if self.places else self.width
+
+    def past(self, field: Field, bits: int) -> _Way:
+        """Return the way after one more field."""
+        return replace(self, places=(*self.places, (field, self.left - bits)))
+
+    def knowing(self, variable: str, codes: frozenset[int]) -> _Way:
+        """Return the way where the variable can only have these codes."""
+        if len(codes) > 1:
+            return self
+        return replace(self, known={**self.known, variable: str(min(codes))})
+
+    def shift_of(self, variable: str) -> int:
+        """Return where a variable stands in the word."""
+        return next(shift for each, shift in reversed(self.places) if each.variable == variable)
 
 
 class ReaderSource(Source):
@@ -172,47 +204,65 @@ class ReaderSource(Source):
             self.line(f"{items}.append({{{pairs}}})")
             self.depth -= 1
             return
-        self.line(f"for _ in range({count}):")
+        self.line(f"while {count}:")
+        self.line(f"    {count} -= 1")
         unfolded = unfold(node.nodes, self.variables)
         if unfolded:
             self.depth += 1
             width = unfolded.width(self.variables)
             self.line(f"w = n >> p - {width} & {_mask(width)}")
-            self._way(unfolded, [], width, width, items)
+            self._way(unfolded, _Way(items, width))
             self.depth -= 1
             return
         self._block(node.nodes, element)
         self.line(f"    {items}.append({element})")
 
-    def _way(self, way: Unfolded, pairs: list[str], left: int, width: int, items: str) -> None:
-        """Read one way through an unfolded element out of the word ``w``."""
-        pairs = list(pairs)
-        for field in way.fields:
-            variable = self.variables[field.variable]
-            left -= variable.bits
-            part = f"w >> {left}" if left else "w"
-            if pairs:
-                part += f" & {_mask(variable.bits)}"
-            value = _value(variable, part)
-            if field.variable in self.asked:
-                local = self.scope[field.variable] = self.local("q")
-                self.line(f"{local} = {value}")
-                value = local
-            pairs.append(f'"{field.name}": {value}')
-        if way.condition and way.true and way.false:
-            name = way.condition.variable
-            bits = self.variables[name].bits
-            self.line(f"if {condition_text(way.condition, self.scope[name], bits)}:")
-            self.depth += 1
-            self._way(way.true, _known_code(way, pairs), left, width, items)
-            self.depth -= 1
-            self.line("else:")
-            self.depth += 1
-            self._way(way.false, pairs, left, width, items)
-            self.depth -= 1
+    def _way(self, unfolded: Unfolded, way: _Way, keyword: str = "if") -> None:
+        """Read an unfolded element out of the word ``w``, from here on down to every end."""
+        for each in unfolded.fields:
+            way = way.past(each, self.variables[each.variable].bits)
+        true, false = unfolded.true, unfolded.false
+        if true is None or false is None:
+            self.line(f"p -= {way.width - way.left}")
+            self.line(f"{way.items}.append({{{self._pairs(way)}}})")
             return
-        self.line(f"p -= {width - left}")
-        self.line(f"{items}.append({{{', '.join(pairs)}}})")
+        self.line(f"{keyword} {self._test(unfolded, way)}:")
+        name = unfolded.condition.variable if unfolded.condition else ""
+        self.depth += 1
+        self._way(true, way.knowing(name, unfolded.hits))
+        self.depth -= 1
+        way = way.knowing(name, unfolded.misses)
+        if not false.fields and false.condition:
+            self._way(false, way, "elif")
+            return
+        self.line("else:")
+        self.depth += 1
+        self._way(false, way)
+        self.depth -= 1
+
+    def _test(self, unfolded: Unfolded, way: _Way) -> str:
+        """Return the condition as a test of the word itself, where that can be said."""
+        condition, hits, misses = unfolded.condition, unfolded.hits, unfolded.misses
+        if condition is None:
+            raise AssertionError("an end has no condition")
+        shift = way.shift_of(condition.variable)
+        bits = self.variables[condition.variable].bits
+        if shift + bits == way.width and max(hits) < min(misses):
+            return f"w < {max(hits) + 1 << shift}"
+        if bits == 1:
+            return f"w & {1 << shift}" if 1 in hits else f"not w & {1 << shift}"
+        return condition_text(condition, f"(w >> {shift} & {_mask(bits)})", bits)
+
+    def _pairs(self, way: _Way) -> str:
+        pairs = []
+        for each, shift in way.places:
+            variable = self.variables[each.variable]
+            part = f"w >> {shift}" if shift else "w"
+            if shift + variable.bits < way.width:
+                part += f" & {_mask(variable.bits)}"
+            value = way.known.get(each.variable, _value(variable, part))
+            pairs.append(f'"{each.name}": {value}')
+        return ", ".join(pairs)
 
     def _text(self, node: Text, target: str) -> None:
         length = self.local("c")
@@ -241,7 +291,7 @@ class ReaderSource(Source):
                 self._store(name, pairs[name])
         sets, self.sets = self.sets, []
         for each in sets:
-            self.line(f"{each.local} = [{each.first}]")
+            self.line(f"{each.local}: list[Tree] = [{each.first}]")
             pairs.setdefault(each.target, []).append((each.key, each.local))
         if target in pairs:
             self._store(target, pairs[target])
@@ -274,18 +324,6 @@ def _looks_ahead(nodes: Sequence[Node], variables: Mapping[str, Variable]) -> bo
         elif isinstance(node, (Group, When)) and _looks_ahead(node.nodes, variables):
             return True
     return False
-
-
-def _known_code(way: Unfolded, pairs: Sequence[str]) -> list[str]:
-    """Write a code that the condition pins down as the number it is."""
-    condition = way.condition
-    if not isinstance(condition, Eq):
-        return list(pairs)
-    names = [each.name for each in way.fields if each.variable == condition.variable]
-    return [
-        f'"{names[-1]}": {condition.code}' if names and each.startswith(f'"{names[-1]}":') else each
-        for each in pairs
-    ]
 
 
 def _parts(entries: Sequence[_Entry], word: str, width: int) -> list[str]:

@@ -29,7 +29,8 @@ MISFITS = (Misfit, KeyError, TypeError, ValueError, IndexError, AttributeError)
 class Codec:
     """The generated readers and writers of one issue, by direction and number, or medium.
 
-    `unmeasured` gives the width of the packets that carry no L_PACKET.
+    `unmeasured` gives the width of the packets that carry no L_PACKET, `versions` the system
+    versions that the issue defines, by code of M_VERSION.
     """
 
     version: str
@@ -41,6 +42,7 @@ class Codec:
     read_header: Mapping[str, Reader]
     write_header: Mapping[str, Writer]
     unmeasured: Mapping[str, Mapping[int, int]]
+    versions: Mapping[int, str]
 
 
 MODULES: Mapping[str, str] = MappingProxyType({"2.1": "v3_6_0"})

@@ -60,6 +60,8 @@ class WriterSource(Source):
         self.known = known or {}
         self.asked = condition_variables(nodes)
         self.run: list[_Entry] = []
+        self.misfits: list[str] = []
+        """Conditions to be checked together with the ranges of the run under way."""
         self.scope: dict[str, str] = {}
         self.width = 0
         self.counters: dict[str, str] = {}
@@ -73,7 +75,7 @@ class WriterSource(Source):
     def _start(self, value: str, width: str) -> None:
         """Begin an accumulator: the first run is not shifted in, but put there."""
         self.v, self.b = value, width
-        self.line(f"{value} = {width} = 0")
+        self.line(f"{width} = 0")
         self.fresh[value] = self.depth
 
     def _scope(self, nodes: Sequence[Node], source: str) -> None:
@@ -89,7 +91,11 @@ class WriterSource(Source):
         for name in LENGTHS:
             if any(isinstance(each, Field) and each.name == name for each in nodes):
                 expected += f' + ("{name}" in {source})'
-        self._misfit(f"len({source}) != {expected}")
+        misfit = f"len({source}) != {expected}"
+        if self.run and not counter:
+            self.misfits.append(misfit)
+        else:
+            self._misfit(misfit)
         self.scope = outer
 
     def _keys(self, node: Node) -> int:
@@ -242,11 +248,15 @@ class WriterSource(Source):
                 if entry.local and entry.local != entry.expression:
                     self.line(f"{entry.local} = {_looked_up(entry)}")
             checks = [_check(each) for each in chunk if each.local and _checked(each.variable)]
-            if checks:
-                self._misfit(" | ".join(checks))
+            misfits, self.misfits = [" | ".join(checks)] * bool(checks) + self.misfits, []
+            if misfits:
+                self._misfit(" or ".join(misfits))
             width = sum(each.variable.bits for each in chunk)
             word = _word(chunk, width)
-            if self.fresh.pop(self.v, 0) == self.depth:
+            begun = self.fresh.pop(self.v, None)
+            if begun is not None:
+                if begun != self.depth:
+                    raise AssertionError("a scope has to begin with a field that is always there")
                 self.line(f"{self.v} = {word.removeprefix(' | ') or 0}")
             else:
                 self.line(f"{self.v} = {self.v} << {width}{word}")

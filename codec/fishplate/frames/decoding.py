@@ -17,7 +17,6 @@ from fishplate.errors import (
 from fishplate.frames import quick
 from fishplate.frames.message import Message
 from fishplate.frames.reader import (
-    DEFAULT_VERSION,
     END_FLAG,
     HEADS,
     LENGTH_MASK,
@@ -25,7 +24,13 @@ from fishplate.frames.reader import (
     FrameReader,
 )
 from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN
-from fishplate.versions import closest_layouts, defined_codes, version_text
+from fishplate.versions import (
+    DEFAULT_VERSION,
+    closest_layouts,
+    defined_codes,
+    is_declared_invalid,
+    version_text,
+)
 
 if TYPE_CHECKING:
     from fishplate.bits import Data
@@ -153,7 +158,7 @@ def _telegram(n: int, size: int, medium: str, version: str | None, *, strict: bo
         _say_if_newer(reader, code)
     message.version_from = "caller" if version else "frame"
     if layouts is None:
-        reader.trouble(_unknown_version(message.version, bit=1))
+        reader.trouble(_unknown_version(message, bit=1))
         message.content = reader.rest()
         return message
     reader.codec = layouts
@@ -216,7 +221,7 @@ def _radio_misfit(reader: FrameReader, number: int, promised: int) -> Message:
     if read is None:
         reader.trouble(_unknown_message(number, direction))
     elif not closest_layouts(message.version):
-        reader.trouble(_unknown_version(message.version, bit=0))
+        reader.trouble(_unknown_version(message, bit=0))
     else:
         try:
             message.header, reader.left = read(reader.n, reader.size)
@@ -237,7 +242,7 @@ def _end_radio(reader: FrameReader, promised: int) -> Message:
         if not reader.cut:
             ahead = promised - reader.size
             field = SHORTEST_PACKET if ahead + reader.left >= SHORTEST_PACKET else 0
-            reason = f"L_MESSAGE is {promised // 8} bytes, {ahead} bits are missing"
+            reason = f"L_MESSAGE is {promised // 8} bytes, {reader.size / 8:g} are there"
             reader.trouble(_no_more(reader, field or ahead + reader.left, reason))
         message.content = reader.rest()
     elif reader.cut:
@@ -310,9 +315,13 @@ def _say_if_newer(reader: FrameReader, code: int) -> None:
     )
 
 
-def _unknown_version(version: str, bit: int) -> Unknown:
+def _unknown_version(message: Message, bit: int) -> Unknown:
+    code = message.header.get("M_VERSION")
+    reason = f"there are no layouts for system version {message.version}"
+    if code is not None and is_declared_invalid(code):
+        reason = f"M_VERSION {code}, {message.version}, is declared not valid"
     return Unknown(
-        f"there are no layouts for system version {version}",
+        reason,
         kind="unknown-version",
         path=("header", "M_VERSION") if bit else ("header",),
         bit=bit,

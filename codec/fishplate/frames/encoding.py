@@ -16,10 +16,10 @@ from fishplate.errors import EncodeError, Path
 from fishplate.frames import quick
 from fishplate.frames.decoding import FIRST_TO_TRACK
 from fishplate.frames.message import Message, Tree
-from fishplate.frames.reader import DEFAULT_VERSION, END_FLAG, HEADS
+from fishplate.frames.reader import END_FLAG, HEADS
 from fishplate.standard import registry
 from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN
-from fishplate.versions import closest_layouts
+from fishplate.versions import DEFAULT_VERSION, closest_layouts
 
 if TYPE_CHECKING:
     from collections.abc import Sequence

@@ -11,7 +11,8 @@ from typing import TYPE_CHECKING, NamedTuple
 from fishplate.bits import blob
 from fishplate.engine.runtime import MISFITS, codec
 from fishplate.frames.message import Message, Tree
-from fishplate.frames.reader import DEFAULT_VERSION, HEADS
+from fishplate.frames.reader import HEADS
+from fishplate.versions import DEFAULT_VERSION
 
 if TYPE_CHECKING:
     from collections.abc import Mapping

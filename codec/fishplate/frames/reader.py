@@ -29,7 +29,6 @@ if TYPE_CHECKING:
     from fishplate.standard import Registry
     from fishplate.standard.vocabulary import Node
 
-DEFAULT_VERSION = "2.1"
 END_FLAG = 255
 SHORTEST_PACKET = 8
 LENGTH_BITS = 13

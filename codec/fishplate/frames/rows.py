@@ -11,11 +11,11 @@ from fishplate.engine.runtime import codec
 from fishplate.engine.walk import Cursor, Row, Walk
 from fishplate.errors import DecodeError, Path, Truncated
 from fishplate.frames.decoding import decode
-from fishplate.frames.reader import DEFAULT_VERSION, HEADS
+from fishplate.frames.reader import HEADS
 from fishplate.meaning import explain
 from fishplate.standard import Registry, registry
 from fishplate.standard.vocabulary import TO_TRAIN, Field
-from fishplate.versions import closest_layouts
+from fishplate.versions import DEFAULT_VERSION, closest_layouts
 
 if TYPE_CHECKING:
     from collections.abc import Iterator, Sequence

@@ -9,12 +9,11 @@ from pydantic import BeforeValidator, ConfigDict, ValidationError, create_model
 
 from fishplate.errors import EncodeError, Path
 from fishplate.frames.decoding import FIRST_TO_TRACK
-from fishplate.frames.reader import DEFAULT_VERSION
 from fishplate.models.schema import content_packet_schema, message_schema, telegram_schema
 from fishplate.models.scopes import Bits, Scope, custom_error, scope_model
 from fishplate.standard import registry
 from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN, Field, Node
-from fishplate.versions import closest_layouts
+from fishplate.versions import DEFAULT_VERSION, closest_layouts
 
 if TYPE_CHECKING:
     from collections.abc import Callable

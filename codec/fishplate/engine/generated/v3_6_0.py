@@ -17,11 +17,9 @@ def read_to_train_0(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_0(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 2:
-        raise Misfit
+    b = 0
     x0 = t["NID_VBCMK"]
-    if x0 >> 6:
+    if x0 >> 6 or len(t) != 2:
         raise Misfit
     v = x0
     return v, b + 14
@@ -36,12 +34,10 @@ def read_to_train_2(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_2(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 3 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
     x1 = t["M_VERSION"]
-    if x0 >> 2 | x1 >> 7:
+    if x0 >> 2 | x1 >> 7 or len(t) != 3 + ("L_PACKET" in t):
         raise Misfit
     v = 2 << 22 | x0 << 20 | x1
     return v, b + 30
@@ -53,7 +49,7 @@ def read_to_train_3(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 36028797018963967
     c0 = w0 & 31
     e0: Tree = {"NID_C": w0 >> 5 & 1023}
-    s0 = [e0]
+    s0: list[Tree] = [e0]
     t0: Tree = {
         "NID_PACKET": 3,
         "Q_DIR": w0 >> 45 & 3,
@@ -121,9 +117,10 @@ def read_to_train_3(n: int, p: int) -> tuple[Tree, int]:
         p -= 5
         w8 = n >> p & 31
         c2 = w8
-        s2 = [e3]
+        s2: list[Tree] = [e3]
         e2["speed_steps"] = s2
-        for _ in range(c2):
+        while c2:
+            c2 -= 1
             p -= 14
             w9 = n >> p & 16383
             e4: Tree = {"V_NVKVINT": w9 >> 7, "M_NVKVINT": w9 & 127}
@@ -135,9 +132,10 @@ def read_to_train_3(n: int, p: int) -> tuple[Tree, int]:
         p -= 5
         w11 = n >> p & 31
         c1 = w11
-        s1 = [e2]
+        s1: list[Tree] = [e2]
         t0["kv_sets"] = s1
-        for _ in range(c1):
+        while c1:
+            c1 -= 1
             p -= 2
             w12 = n >> p & 3
             q2 = w12
@@ -157,9 +155,10 @@ def read_to_train_3(n: int, p: int) -> tuple[Tree, int]:
             p -= 5
             w16 = n >> p & 31
             c3 = w16
-            s3 = [e6]
+            s3: list[Tree] = [e6]
             e5["speed_steps"] = s3
-            for _ in range(c3):
+            while c3:
+                c3 -= 1
                 p -= 14
                 w17 = n >> p & 16383
                 e7: Tree = {"V_NVKVINT": w17 >> 7, "M_NVKVINT": w17 & 127}
@@ -173,7 +172,7 @@ def read_to_train_3(n: int, p: int) -> tuple[Tree, int]:
         w19 = n >> p & 32767
         c4 = w19 & 31
         e8: Tree = {"L_NVKRINT": w19 >> 10, "M_NVKRINT": w19 >> 5 & 31}
-        s4 = [e8]
+        s4: list[Tree] = [e8]
         t0["length_steps"] = s4
         for p in range(p - 10, p - 10 * c4 - 1, -10):
             w = n >> p & 1023
@@ -185,25 +184,21 @@ def read_to_train_3(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_3(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 34
     s0 = t["countries"]
     c0 = len(s0) - 1
     e0 = s0[0]
-    if len(e0) != 1:
-        raise Misfit
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
     x2 = t["D_VALIDNV"]
     x3 = e0["NID_C"]
-    if x0 >> 2 | x1 >> 2 | x2 >> 15 | x3 >> 10 | c0 >> 5:
+    if x0 >> 2 | x1 >> 2 | x2 >> 15 | x3 >> 10 | c0 >> 5 or len(e0) != 1:
         raise Misfit
     v = 3 << 47 | x0 << 45 | x1 << 30 | x2 << 15 | x3 << 5 | c0
     for e0 in s0[1:]:
-        if len(e0) != 1:
-            raise Misfit
         x4 = e0["NID_C"]
-        if x4 >> 10:
+        if x4 >> 10 or len(e0) != 1:
             raise Misfit
         v = v << 10 | x4
     b += 10 * c0
@@ -342,7 +337,7 @@ def write_to_train_3(t: Tree) -> tuple[int, int]:
             raise Misfit
         v = v << 5 | c2
         for e2 in s2[1:]:
-            v0 = b0 = 0
+            b0 = 0
             k3 = 2
             x40 = e2["V_NVKVINT"]
             x41 = e2["M_NVKVINT"]
@@ -366,7 +361,7 @@ def write_to_train_3(t: Tree) -> tuple[int, int]:
             raise Misfit
         v = v << 5 | c1
         for e1 in s1[1:]:
-            v1 = b1 = 0
+            b1 = 0
             k4 = 2
             x43 = e1["Q_NVKVINTSET"]
             if x43 >> 2:
@@ -402,7 +397,7 @@ def write_to_train_3(t: Tree) -> tuple[int, int]:
                 raise Misfit
             v1 = v1 << 5 | c3
             for e3 in s3[1:]:
-                v2 = b2 = 0
+                b2 = 0
                 k6 = 2
                 x49 = e3["V_NVKVINT"]
                 x50 = e3["M_NVKVINT"]
@@ -427,19 +422,15 @@ def write_to_train_3(t: Tree) -> tuple[int, int]:
         s4 = t["length_steps"]
         c4 = len(s4) - 1
         e4 = s4[0]
-        if len(e4) != 2:
-            raise Misfit
         x52 = e4["L_NVKRINT"]
         x53 = e4["M_NVKRINT"]
-        if x52 >> 5 | x53 >> 5 | c4 >> 5:
+        if x52 >> 5 | x53 >> 5 | c4 >> 5 or len(e4) != 2:
             raise Misfit
         v = v << 15 | x52 << 10 | x53 << 5 | c4
         for e4 in s4[1:]:
-            if len(e4) != 2:
-                raise Misfit
             x54 = e4["L_NVKRINT"]
             x55 = e4["M_NVKRINT"]
-            if x54 >> 5 | x55 >> 5:
+            if x54 >> 5 | x55 >> 5 or len(e4) != 2:
                 raise Misfit
             v = v << 10 | x54 << 5 | x55
         b += 10 * c4
@@ -476,12 +467,12 @@ def read_to_train_5(n: int, p: int) -> tuple[Tree, int]:
     p -= 5
     w3 = n >> p & 31
     c0 = w3
-    s0 = [e0]
+    s0: list[Tree] = [e0]
     t0["links"] = s0
-    for _ in range(c0):
+    while c0:
+        c0 -= 1
         w = n >> p - 49 & 562949953421311
-        q1 = w >> 33 & 1
-        if q1:
+        if w & 8589934592:
             p -= 49
             s0.append(
                 {
@@ -499,7 +490,7 @@ def read_to_train_5(n: int, p: int) -> tuple[Tree, int]:
             s0.append(
                 {
                     "D_LINK": w >> 34,
-                    "Q_NEWCOUNTRY": q1,
+                    "Q_NEWCOUNTRY": 0,
                     "NID_BG": w >> 19 & 16383,
                     "Q_LINKORIENTATION": w >> 18 & 1,
                     "Q_LINKREACTION": w >> 16 & 3,
@@ -512,7 +503,7 @@ def read_to_train_5(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_5(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     s0 = t["links"]
     c0 = len(s0) - 1
     e0 = s0[0]
@@ -588,7 +579,7 @@ def read_to_train_6(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_6(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 5
     x0 = t["Q_DIR"]
     x1 = t["Q_VBCO"]
@@ -616,7 +607,7 @@ def read_to_train_12(n: int, p: int) -> tuple[Tree, int]:
     p -= 54
     w0 = n >> p & 18014398509481983
     c0 = w0 & 31
-    s0 = []
+    s0: list[Tree] = []
     t0: Tree = {
         "NID_PACKET": 12,
         "Q_DIR": w0 >> 44 & 3,
@@ -627,10 +618,10 @@ def read_to_train_12(n: int, p: int) -> tuple[Tree, int]:
         "T_EMA": w0 >> 5 & 1023,
         "sections": s0,
     }
-    for _ in range(c0):
+    while c0:
+        c0 -= 1
         w = n >> p - 41 & 2199023255551
-        q0 = w >> 25 & 1
-        if q0:
+        if w & 33554432:
             p -= 41
             s0.append(
                 {
@@ -642,40 +633,40 @@ def read_to_train_12(n: int, p: int) -> tuple[Tree, int]:
             )
         else:
             p -= 16
-            s0.append({"L_SECTION": w >> 26, "Q_SECTIONTIMER": q0})
+            s0.append({"L_SECTION": w >> 26, "Q_SECTIONTIMER": 0})
     p -= 16
     w1 = n >> p & 65535
-    q1 = w1 & 1
+    q0 = w1 & 1
     t0["L_ENDSECTION"] = w1 >> 1
-    t0["Q_SECTIONTIMER"] = q1
-    if q1:
+    t0["Q_SECTIONTIMER"] = q0
+    if q0:
         p -= 25
         w2 = n >> p & 33554431
         t0["T_SECTIONTIMER"] = w2 >> 15
         t0["D_SECTIONTIMERSTOPLOC"] = w2 & 32767
     p -= 1
     w3 = n >> p & 1
-    q2 = w3
-    t0["Q_ENDTIMER"] = q2
-    if q2:
+    q1 = w3
+    t0["Q_ENDTIMER"] = q1
+    if q1:
         p -= 25
         w4 = n >> p & 33554431
         t0["T_ENDTIMER"] = w4 >> 15
         t0["D_ENDTIMERSTARTLOC"] = w4 & 32767
     p -= 1
     w5 = n >> p & 1
-    q3 = w5
-    t0["Q_DANGERPOINT"] = q3
-    if q3:
+    q2 = w5
+    t0["Q_DANGERPOINT"] = q2
+    if q2:
         p -= 22
         w6 = n >> p & 4194303
         t0["D_DP"] = w6 >> 7
         t0["V_RELEASEDP"] = w6 & 127
     p -= 1
     w7 = n >> p & 1
-    q4 = w7
-    t0["Q_OVERLAP"] = q4
-    if q4:
+    q3 = w7
+    t0["Q_OVERLAP"] = q3
+    if q3:
         p -= 47
         w8 = n >> p & 140737488355327
         t0["D_STARTOL"] = w8 >> 32
@@ -688,7 +679,7 @@ def read_to_train_12(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_12(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 12
     s0 = t["sections"]
     c0 = len(s0)
@@ -805,12 +796,12 @@ def read_to_train_13(n: int, p: int) -> tuple[Tree, int]:
     p -= 5
     w5 = n >> p & 31
     c0 = w5
-    s0 = [e0]
+    s0: list[Tree] = [e0]
     t0["distances"] = s0
-    for _ in range(c0):
+    while c0:
+        c0 -= 1
         w = n >> p - 40 & 1099511627775
-        q2 = w >> 39
-        if q2:
+        if w & 549755813888:
             p -= 40
             s0.append(
                 {
@@ -822,14 +813,14 @@ def read_to_train_13(n: int, p: int) -> tuple[Tree, int]:
             )
         else:
             p -= 30
-            s0.append({"Q_NEWCOUNTRY": q2, "NID_BG": w >> 25 & 16383, "D_SR": w >> 10 & 32767})
+            s0.append({"Q_NEWCOUNTRY": 0, "NID_BG": w >> 25 & 16383, "D_SR": w >> 10 & 32767})
     if p < 60:
         raise Misfit
     return t0, p - 60
 
 
 def write_to_train_13(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 6
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
@@ -896,7 +887,7 @@ def read_to_train_15(n: int, p: int) -> tuple[Tree, int]:
     p -= 47
     w0 = n >> p & 140737488355327
     c0 = w0 & 31
-    s0 = []
+    s0: list[Tree] = []
     t0: Tree = {
         "NID_PACKET": 15,
         "Q_DIR": w0 >> 37 & 3,
@@ -906,10 +897,10 @@ def read_to_train_15(n: int, p: int) -> tuple[Tree, int]:
         "T_EMA": w0 >> 5 & 1023,
         "sections": s0,
     }
-    for _ in range(c0):
+    while c0:
+        c0 -= 1
         w = n >> p - 41 & 2199023255551
-        q0 = w >> 25 & 1
-        if q0:
+        if w & 33554432:
             p -= 41
             s0.append(
                 {
@@ -921,40 +912,40 @@ def read_to_train_15(n: int, p: int) -> tuple[Tree, int]:
             )
         else:
             p -= 16
-            s0.append({"L_SECTION": w >> 26, "Q_SECTIONTIMER": q0})
+            s0.append({"L_SECTION": w >> 26, "Q_SECTIONTIMER": 0})
     p -= 16
     w1 = n >> p & 65535
-    q1 = w1 & 1
+    q0 = w1 & 1
     t0["L_ENDSECTION"] = w1 >> 1
-    t0["Q_SECTIONTIMER"] = q1
-    if q1:
+    t0["Q_SECTIONTIMER"] = q0
+    if q0:
         p -= 25
         w2 = n >> p & 33554431
         t0["T_SECTIONTIMER"] = w2 >> 15
         t0["D_SECTIONTIMERSTOPLOC"] = w2 & 32767
     p -= 1
     w3 = n >> p & 1
-    q2 = w3
-    t0["Q_ENDTIMER"] = q2
-    if q2:
+    q1 = w3
+    t0["Q_ENDTIMER"] = q1
+    if q1:
         p -= 25
         w4 = n >> p & 33554431
         t0["T_ENDTIMER"] = w4 >> 15
         t0["D_ENDTIMERSTARTLOC"] = w4 & 32767
     p -= 1
     w5 = n >> p & 1
-    q3 = w5
-    t0["Q_DANGERPOINT"] = q3
-    if q3:
+    q2 = w5
+    t0["Q_DANGERPOINT"] = q2
+    if q2:
         p -= 22
         w6 = n >> p & 4194303
         t0["D_DP"] = w6 >> 7
         t0["V_RELEASEDP"] = w6 & 127
     p -= 1
     w7 = n >> p & 1
-    q4 = w7
-    t0["Q_OVERLAP"] = q4
-    if q4:
+    q3 = w7
+    t0["Q_OVERLAP"] = q3
+    if q3:
         p -= 47
         w8 = n >> p & 140737488355327
         t0["D_STARTOL"] = w8 >> 32
@@ -967,7 +958,7 @@ def read_to_train_15(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_15(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 11
     s0 = t["sections"]
     c0 = len(s0)
@@ -1064,13 +1055,11 @@ def read_to_train_16(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_16(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 4 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
     x2 = t["L_SECTION"]
-    if x0 >> 2 | x1 >> 2 | x2 >> 15:
+    if x0 >> 2 | x1 >> 2 | x2 >> 15 or len(t) != 4 + ("L_PACKET" in t):
         raise Misfit
     v = 16 << 32 | x0 << 30 | x1 << 15 | x2
     return v, b + 40
@@ -1082,7 +1071,7 @@ def read_to_train_21(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 18014398509481983
     c0 = w0 & 31
     e0: Tree = {"D_GRADIENT": w0 >> 14 & 32767, "Q_GDIR": w0 >> 13 & 1, "G_A": w0 >> 5 & 255}
-    s0 = [e0]
+    s0: list[Tree] = [e0]
     t0: Tree = {
         "NID_PACKET": 21,
         "Q_DIR": w0 >> 44 & 3,
@@ -1097,27 +1086,23 @@ def read_to_train_21(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_21(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     s0 = t["gradients"]
     c0 = len(s0) - 1
     e0 = s0[0]
-    if len(e0) != 3:
-        raise Misfit
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
     x2 = e0["D_GRADIENT"]
     x3 = e0["Q_GDIR"]
     x4 = e0["G_A"]
-    if x0 >> 2 | x1 >> 2 | x2 >> 15 | x3 >> 1 | x4 >> 8 | c0 >> 5:
+    if x0 >> 2 | x1 >> 2 | x2 >> 15 | x3 >> 1 | x4 >> 8 | c0 >> 5 or len(e0) != 3:
         raise Misfit
     v = 21 << 46 | x0 << 44 | x1 << 29 | x2 << 14 | x3 << 13 | x4 << 5 | c0
     for e0 in s0[1:]:
-        if len(e0) != 3:
-            raise Misfit
         x5 = e0["D_GRADIENT"]
         x6 = e0["Q_GDIR"]
         x7 = e0["G_A"]
-        if x5 >> 15 | x6 >> 1 | x7 >> 8:
+        if x5 >> 15 | x6 >> 1 | x7 >> 8 or len(e0) != 3:
             raise Misfit
         v = v << 24 | x5 << 9 | x6 << 8 | x7
     b += 24 * c0
@@ -1139,55 +1124,54 @@ def read_to_train_27(n: int, p: int) -> tuple[Tree, int]:
         "L_PACKET": length,
         "Q_SCALE": w0 >> 28 & 3,
     }
-    s1 = []
+    s1: list[Tree] = []
     e0: Tree = {
         "D_STATIC": w0 >> 13 & 32767,
         "V_STATIC": w0 >> 6 & 127,
         "Q_FRONT": w0 >> 5 & 1,
         "categories": s1,
     }
-    for _ in range(c1):
+    while c1:
+        c1 -= 1
         w = n >> p - 13 & 8191
-        q0 = w >> 11
-        if q0 == 0:
+        if w < 2048:
             p -= 13
             s1.append({"Q_DIFF": 0, "NC_CDDIFF": w >> 7 & 15, "V_DIFF": w & 127})
+        elif w < 6144:
+            p -= 13
+            s1.append({"Q_DIFF": w >> 11, "NC_DIFF": w >> 7 & 15, "V_DIFF": w & 127})
         else:
-            if 1 <= q0 <= 2:
-                p -= 13
-                s1.append({"Q_DIFF": q0, "NC_DIFF": w >> 7 & 15, "V_DIFF": w & 127})
-            else:
-                p -= 9
-                s1.append({"Q_DIFF": q0, "V_DIFF": w >> 4 & 127})
+            p -= 9
+            s1.append({"Q_DIFF": 3, "V_DIFF": w >> 4 & 127})
     p -= 5
     w1 = n >> p & 31
     c0 = w1
-    s0 = [e0]
+    s0: list[Tree] = [e0]
     t0["steps"] = s0
-    for _ in range(c0):
+    while c0:
+        c0 -= 1
         p -= 28
         w2 = n >> p & 268435455
         c2 = w2 & 31
-        s2 = []
+        s2: list[Tree] = []
         e2: Tree = {
             "D_STATIC": w2 >> 13,
             "V_STATIC": w2 >> 6 & 127,
             "Q_FRONT": w2 >> 5 & 1,
             "categories": s2,
         }
-        for _ in range(c2):
+        while c2:
+            c2 -= 1
             w = n >> p - 13 & 8191
-            q1 = w >> 11
-            if q1 == 0:
+            if w < 2048:
                 p -= 13
                 s2.append({"Q_DIFF": 0, "NC_CDDIFF": w >> 7 & 15, "V_DIFF": w & 127})
+            elif w < 6144:
+                p -= 13
+                s2.append({"Q_DIFF": w >> 11, "NC_DIFF": w >> 7 & 15, "V_DIFF": w & 127})
             else:
-                if 1 <= q1 <= 2:
-                    p -= 13
-                    s2.append({"Q_DIFF": q1, "NC_DIFF": w >> 7 & 15, "V_DIFF": w & 127})
-                else:
-                    p -= 9
-                    s2.append({"Q_DIFF": q1, "V_DIFF": w >> 4 & 127})
+                p -= 9
+                s2.append({"Q_DIFF": 3, "V_DIFF": w >> 4 & 127})
         s0.append(e2)
     if p < 60:
         raise Misfit
@@ -1195,7 +1179,7 @@ def read_to_train_27(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_27(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     s0 = t["steps"]
     c0 = len(s0) - 1
     e0 = s0[0]
@@ -1238,7 +1222,7 @@ def write_to_train_27(t: Tree) -> tuple[int, int]:
         raise Misfit
     v = v << 5 | c0
     for e0 in s0[1:]:
-        v0 = b0 = 0
+        b0 = 0
         s2 = e0["categories"]
         c2 = len(s2)
         x11 = e0["D_STATIC"]
@@ -1300,7 +1284,7 @@ def read_to_train_39(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_39(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 5
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
@@ -1337,14 +1321,12 @@ def read_to_train_40(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_40(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 5 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
     x2 = t["D_CURRENT"]
     x3 = t["M_CURRENT"]
-    if x0 >> 2 | x1 >> 2 | x2 >> 15 | x3 >> 10:
+    if x0 >> 2 | x1 >> 2 | x2 >> 15 | x3 >> 10 or len(t) != 5 + ("L_PACKET" in t):
         raise Misfit
     v = 40 << 42 | x0 << 40 | x1 << 25 | x2 << 10 | x3
     return v, b + 50
@@ -1375,24 +1357,24 @@ def read_to_train_41(n: int, p: int) -> tuple[Tree, int]:
     p -= 5
     w3 = n >> p & 31
     c0 = w3
-    s0 = [e0]
+    s0: list[Tree] = [e0]
     t0["levels"] = s0
-    for _ in range(c0):
+    while c0:
+        c0 -= 1
         w = n >> p - 26 & 67108863
-        q1 = w >> 23
-        if q1 == 1:
+        if (w >> 23 & 7) == 1:
             p -= 26
             s0.append({"M_LEVELTR": 1, "NID_NTC": w >> 15 & 255, "L_ACKLEVELTR": w & 32767})
         else:
             p -= 18
-            s0.append({"M_LEVELTR": q1, "L_ACKLEVELTR": w >> 8 & 32767})
+            s0.append({"M_LEVELTR": w >> 23, "L_ACKLEVELTR": w >> 8 & 32767})
     if p < 60:
         raise Misfit
     return t0, p - 60
 
 
 def write_to_train_41(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     s0 = t["levels"]
     c0 = len(s0) - 1
     e0 = s0[0]
@@ -1459,14 +1441,12 @@ def read_to_train_42(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_42(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 7 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
     x1 = t["Q_RBC"]
     x2 = t["NID_C"]
     x3 = t["NID_RBC"]
-    if x0 >> 2 | x1 >> 1 | x2 >> 10 | x3 >> 14:
+    if x0 >> 2 | x1 >> 1 | x2 >> 10 | x3 >> 14 or len(t) != 7 + ("L_PACKET" in t):
         raise Misfit
     v = 42 << 40 | x0 << 38 | x1 << 24 | x2 << 14 | x3
     x4 = digits_value(t["NID_RADIO"], 16)
@@ -1496,7 +1476,7 @@ def read_to_train_44(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_44(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 4
     x0 = t["Q_DIR"]
     x1 = t["NID_XUSER"]
@@ -1532,12 +1512,10 @@ def read_to_train_45(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_45(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 3 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
     x1 = digits_value(t["NID_MN"], 6)
-    if x0 >> 2:
+    if x0 >> 2 or len(t) != 3 + ("L_PACKET" in t):
         raise Misfit
     v = 45 << 39 | x0 << 37 | x1
     return v, b + 47
@@ -1559,24 +1537,24 @@ def read_to_train_46(n: int, p: int) -> tuple[Tree, int]:
     p -= 5
     w2 = n >> p & 31
     c0 = w2
-    s0 = [e0]
+    s0: list[Tree] = [e0]
     t0["levels"] = s0
-    for _ in range(c0):
+    while c0:
+        c0 -= 1
         w = n >> p - 11 & 2047
-        q1 = w >> 8
-        if q1 == 1:
+        if (w >> 8 & 7) == 1:
             p -= 11
             s0.append({"M_LEVELTR": 1, "NID_NTC": w & 255})
         else:
             p -= 3
-            s0.append({"M_LEVELTR": q1})
+            s0.append({"M_LEVELTR": w >> 8})
     if p < 60:
         raise Misfit
     return t0, p - 60
 
 
 def write_to_train_46(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     s0 = t["levels"]
     c0 = len(s0) - 1
     e0 = s0[0]
@@ -1623,24 +1601,24 @@ def read_to_train_49(n: int, p: int) -> tuple[Tree, int]:
     p -= 28
     w0 = n >> p & 268435455
     c0 = w0 & 31
-    s0 = []
+    s0: list[Tree] = []
     t0: Tree = {"NID_PACKET": 49, "Q_DIR": w0 >> 18 & 3, "L_PACKET": length, "groups": s0}
-    for _ in range(c0):
+    while c0:
+        c0 -= 1
         w = n >> p - 25 & 33554431
-        q0 = w >> 24
-        if q0:
+        if w & 16777216:
             p -= 25
             s0.append({"Q_NEWCOUNTRY": 1, "NID_C": w >> 14 & 1023, "NID_BG": w & 16383})
         else:
             p -= 15
-            s0.append({"Q_NEWCOUNTRY": q0, "NID_BG": w >> 10 & 16383})
+            s0.append({"Q_NEWCOUNTRY": 0, "NID_BG": w >> 10 & 16383})
     if p < 60:
         raise Misfit
     return t0, p - 60
 
 
 def write_to_train_49(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     s0 = t["groups"]
     c0 = len(s0)
     x0 = t["Q_DIR"]
@@ -1687,7 +1665,7 @@ def read_to_train_51(n: int, p: int) -> tuple[Tree, int]:
         p -= 36
         w2 = n >> p & 68719476735
         c1 = w2 & 31
-        s1 = []
+        s1: list[Tree] = []
         e0: Tree = {
             "D_AXLELOAD": w2 >> 21,
             "L_AXLELOAD": w2 >> 6 & 32767,
@@ -1700,13 +1678,14 @@ def read_to_train_51(n: int, p: int) -> tuple[Tree, int]:
         p -= 5
         w3 = n >> p & 31
         c0 = w3
-        s0 = [e0]
+        s0: list[Tree] = [e0]
         t0["areas"] = s0
-        for _ in range(c0):
+        while c0:
+            c0 -= 1
             p -= 36
             w4 = n >> p & 68719476735
             c2 = w4 & 31
-            s2 = []
+            s2: list[Tree] = []
             e2: Tree = {
                 "D_AXLELOAD": w4 >> 21,
                 "L_AXLELOAD": w4 >> 6 & 32767,
@@ -1721,7 +1700,7 @@ def read_to_train_51(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_51(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 4
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
@@ -1749,11 +1728,9 @@ def write_to_train_51(t: Tree) -> tuple[int, int]:
             raise Misfit
         v = v << 36 | x4 << 21 | x5 << 6 | x6 << 5 | c1
         for e1 in s1:
-            if len(e1) != 2:
-                raise Misfit
             x7 = e1["M_AXLELOADCAT"]
             x8 = e1["V_AXLELOAD"]
-            if x7 >> 7 | x8 >> 7:
+            if x7 >> 7 | x8 >> 7 or len(e1) != 2:
                 raise Misfit
             v = v << 14 | x7 << 7 | x8
         b += 14 * c1
@@ -1763,7 +1740,7 @@ def write_to_train_51(t: Tree) -> tuple[int, int]:
             raise Misfit
         v = v << 5 | c0
         for e0 in s0[1:]:
-            v0 = b0 = 0
+            b0 = 0
             s2 = e0["categories"]
             c2 = len(s2)
             x9 = e0["D_AXLELOAD"]
@@ -1773,11 +1750,9 @@ def write_to_train_51(t: Tree) -> tuple[int, int]:
                 raise Misfit
             v0 = x9 << 21 | x10 << 6 | x11 << 5 | c2
             for e2 in s2:
-                if len(e2) != 2:
-                    raise Misfit
                 x12 = e2["M_AXLELOADCAT"]
                 x13 = e2["V_AXLELOAD"]
-                if x12 >> 7 | x13 >> 7:
+                if x12 >> 7 | x13 >> 7 or len(e2) != 2:
                     raise Misfit
                 v0 = v0 << 14 | x12 << 7 | x13
             b0 += 14 * c2
@@ -1820,7 +1795,7 @@ def read_to_train_52(n: int, p: int) -> tuple[Tree, int]:
             "D_PBDSR": w2 >> 20 & 32767,
             "L_PBDSR": w2 >> 5 & 32767,
         }
-        s0 = [e0]
+        s0: list[Tree] = [e0]
         t0["restrictions"] = s0
         for p in range(p - 55, p - 55 * c0 - 1, -55):
             w = n >> p & 36028797018963967
@@ -1838,7 +1813,7 @@ def read_to_train_52(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_52(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 4
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
@@ -1857,27 +1832,23 @@ def write_to_train_52(t: Tree) -> tuple[int, int]:
         s0 = t["restrictions"]
         c0 = len(s0) - 1
         e0 = s0[0]
-        if len(e0) != 6:
-            raise Misfit
         x4 = e0["D_PBD"]
         x5 = e0["Q_GDIR"]
         x6 = e0["G_PBDSR"]
         x7 = e0["Q_PBDSR"]
         x8 = e0["D_PBDSR"]
         x9 = e0["L_PBDSR"]
-        if x4 >> 15 | x5 >> 1 | x6 >> 8 | x7 >> 1 | x8 >> 15 | x9 >> 15 | c0 >> 5:
+        if x4 >> 15 | x5 >> 1 | x6 >> 8 | x7 >> 1 | x8 >> 15 | x9 >> 15 | c0 >> 5 or len(e0) != 6:
             raise Misfit
         v = v << 60 | x4 << 45 | x5 << 44 | x6 << 36 | x7 << 35 | x8 << 20 | x9 << 5 | c0
         for e0 in s0[1:]:
-            if len(e0) != 6:
-                raise Misfit
             x10 = e0["D_PBD"]
             x11 = e0["Q_GDIR"]
             x12 = e0["G_PBDSR"]
             x13 = e0["Q_PBDSR"]
             x14 = e0["D_PBDSR"]
             x15 = e0["L_PBDSR"]
-            if x10 >> 15 | x11 >> 1 | x12 >> 8 | x13 >> 1 | x14 >> 15 | x15 >> 15:
+            if x10 >> 15 | x11 >> 1 | x12 >> 8 | x13 >> 1 | x14 >> 15 | x15 >> 15 or len(e0) != 6:
                 raise Misfit
             v = v << 55 | x10 << 40 | x11 << 39 | x12 << 31 | x13 << 30 | x14 << 15 | x15
         b += 55 * c0
@@ -1904,14 +1875,12 @@ def read_to_train_57(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_57(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 5 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
     x1 = t["T_MAR"]
     x2 = t["T_TIMEOUTRQST"]
     x3 = t["T_CYCRQST"]
-    if x0 >> 2 | x1 >> 8 | x2 >> 10 | x3 >> 8:
+    if x0 >> 2 | x1 >> 8 | x2 >> 10 | x3 >> 8 or len(t) != 5 + ("L_PACKET" in t):
         raise Misfit
     v = 57 << 41 | x0 << 39 | x1 << 18 | x2 << 8 | x3
     return v, b + 49
@@ -1922,7 +1891,7 @@ def read_to_train_58(n: int, p: int) -> tuple[Tree, int]:
     p -= 56
     w0 = n >> p & 72057594037927935
     c0 = w0 & 31
-    s0 = []
+    s0: list[Tree] = []
     t0: Tree = {
         "NID_PACKET": 58,
         "Q_DIR": w0 >> 46 & 3,
@@ -1940,7 +1909,7 @@ def read_to_train_58(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_58(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     s0 = t["locations"]
     c0 = len(s0)
     x0 = t["Q_DIR"]
@@ -1952,11 +1921,9 @@ def write_to_train_58(t: Tree) -> tuple[int, int]:
         raise Misfit
     v = 58 << 48 | x0 << 46 | x1 << 31 | x2 << 23 | x3 << 8 | x4 << 5 | c0
     for e0 in s0:
-        if len(e0) != 2:
-            raise Misfit
         x5 = e0["D_LOC"]
         x6 = e0["Q_LGTLOC"]
-        if x5 >> 15 | x6 >> 1:
+        if x5 >> 15 | x6 >> 1 or len(e0) != 2:
             raise Misfit
         v = v << 16 | x5 << 1 | x6
     b += 16 * c0
@@ -1972,24 +1939,24 @@ def read_to_train_63(n: int, p: int) -> tuple[Tree, int]:
     p -= 28
     w0 = n >> p & 268435455
     c0 = w0 & 31
-    s0 = []
+    s0: list[Tree] = []
     t0: Tree = {"NID_PACKET": 63, "Q_DIR": w0 >> 18 & 3, "L_PACKET": length, "groups": s0}
-    for _ in range(c0):
+    while c0:
+        c0 -= 1
         w = n >> p - 25 & 33554431
-        q0 = w >> 24
-        if q0:
+        if w & 16777216:
             p -= 25
             s0.append({"Q_NEWCOUNTRY": 1, "NID_C": w >> 14 & 1023, "NID_BG": w & 16383})
         else:
             p -= 15
-            s0.append({"Q_NEWCOUNTRY": q0, "NID_BG": w >> 10 & 16383})
+            s0.append({"Q_NEWCOUNTRY": 0, "NID_BG": w >> 10 & 16383})
     if p < 60:
         raise Misfit
     return t0, p - 60
 
 
 def write_to_train_63(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     s0 = t["groups"]
     c0 = len(s0)
     x0 = t["Q_DIR"]
@@ -2025,11 +1992,9 @@ def read_to_train_64(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_64(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 2 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
-    if x0 >> 2:
+    if x0 >> 2 or len(t) != 2 + ("L_PACKET" in t):
         raise Misfit
     v = 64 << 15 | x0 << 13
     return v, b + 23
@@ -2056,14 +2021,12 @@ def read_to_train_65(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_65(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 8 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
     x2 = t["NID_TSR"]
     x3 = t["D_TSR"]
-    if x0 >> 2 | x1 >> 2 | x2 >> 8 | x3 >> 15:
+    if x0 >> 2 | x1 >> 2 | x2 >> 8 | x3 >> 15 or len(t) != 8 + ("L_PACKET" in t):
         raise Misfit
     v = 65 << 40 | x0 << 38 | x1 << 23 | x2 << 15 | x3
     x4 = t["L_TSR"]
@@ -2084,12 +2047,10 @@ def read_to_train_66(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_66(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 3 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
     x1 = t["NID_TSR"]
-    if x0 >> 2 | x1 >> 8:
+    if x0 >> 2 | x1 >> 8 or len(t) != 3 + ("L_PACKET" in t):
         raise Misfit
     v = 66 << 23 | x0 << 21 | x1
     return v, b + 31
@@ -2101,7 +2062,7 @@ def read_to_train_67(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 1152921504606846975
     c0 = w0 & 31
     e0: Tree = {"D_TRACKCOND": w0 >> 20 & 32767, "L_TRACKCOND": w0 >> 5 & 32767}
-    s0 = [e0]
+    s0: list[Tree] = [e0]
     t0: Tree = {
         "NID_PACKET": 67,
         "Q_DIR": w0 >> 50 & 3,
@@ -2116,25 +2077,21 @@ def read_to_train_67(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_67(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     s0 = t["areas"]
     c0 = len(s0) - 1
     e0 = s0[0]
-    if len(e0) != 2:
-        raise Misfit
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
     x2 = e0["D_TRACKCOND"]
     x3 = e0["L_TRACKCOND"]
-    if x0 >> 2 | x1 >> 2 | x2 >> 15 | x3 >> 15 | c0 >> 5:
+    if x0 >> 2 | x1 >> 2 | x2 >> 15 | x3 >> 15 | c0 >> 5 or len(e0) != 2:
         raise Misfit
     v = 67 << 52 | x0 << 50 | x1 << 35 | x2 << 20 | x3 << 5 | c0
     for e0 in s0[1:]:
-        if len(e0) != 2:
-            raise Misfit
         x4 = e0["D_TRACKCOND"]
         x5 = e0["L_TRACKCOND"]
-        if x4 >> 15 | x5 >> 15:
+        if x4 >> 15 | x5 >> 15 or len(e0) != 2:
             raise Misfit
         v = v << 30 | x4 << 15 | x5
     b += 30 * c0
@@ -2168,7 +2125,7 @@ def read_to_train_68(n: int, p: int) -> tuple[Tree, int]:
             "L_TRACKCOND": w2 >> 9 & 32767,
             "M_TRACKCOND": w2 >> 5 & 15,
         }
-        s0 = [e0]
+        s0: list[Tree] = [e0]
         t0["conditions"] = s0
         for p in range(p - 34, p - 34 * c0 - 1, -34):
             w = n >> p & 17179869183
@@ -2179,7 +2136,7 @@ def read_to_train_68(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_68(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 4
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
@@ -2198,21 +2155,17 @@ def write_to_train_68(t: Tree) -> tuple[int, int]:
         s0 = t["conditions"]
         c0 = len(s0) - 1
         e0 = s0[0]
-        if len(e0) != 3:
-            raise Misfit
         x4 = e0["D_TRACKCOND"]
         x5 = e0["L_TRACKCOND"]
         x6 = e0["M_TRACKCOND"]
-        if x4 >> 15 | x5 >> 15 | x6 >> 4 | c0 >> 5:
+        if x4 >> 15 | x5 >> 15 | x6 >> 4 | c0 >> 5 or len(e0) != 3:
             raise Misfit
         v = v << 39 | x4 << 24 | x5 << 9 | x6 << 5 | c0
         for e0 in s0[1:]:
-            if len(e0) != 3:
-                raise Misfit
             x7 = e0["D_TRACKCOND"]
             x8 = e0["L_TRACKCOND"]
             x9 = e0["M_TRACKCOND"]
-            if x7 >> 15 | x8 >> 15 | x9 >> 4:
+            if x7 >> 15 | x8 >> 15 | x9 >> 4 or len(e0) != 3:
                 raise Misfit
             v = v << 34 | x7 << 19 | x8 << 4 | x9
         b += 34 * c0
@@ -2249,7 +2202,7 @@ def read_to_train_69(n: int, p: int) -> tuple[Tree, int]:
             "M_PLATFORM": w2 >> 7 & 15,
             "Q_PLATFORM": w2 >> 5 & 3,
         }
-        s0 = [e0]
+        s0: list[Tree] = [e0]
         t0["platforms"] = s0
         for p in range(p - 36, p - 36 * c0 - 1, -36):
             w = n >> p & 68719476735
@@ -2265,7 +2218,7 @@ def read_to_train_69(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_69(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 4
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
@@ -2284,23 +2237,19 @@ def write_to_train_69(t: Tree) -> tuple[int, int]:
         s0 = t["platforms"]
         c0 = len(s0) - 1
         e0 = s0[0]
-        if len(e0) != 4:
-            raise Misfit
         x4 = e0["D_TRACKCOND"]
         x5 = e0["L_TRACKCOND"]
         x6 = e0["M_PLATFORM"]
         x7 = e0["Q_PLATFORM"]
-        if x4 >> 15 | x5 >> 15 | x6 >> 4 | x7 >> 2 | c0 >> 5:
+        if x4 >> 15 | x5 >> 15 | x6 >> 4 | x7 >> 2 | c0 >> 5 or len(e0) != 4:
             raise Misfit
         v = v << 41 | x4 << 26 | x5 << 11 | x6 << 7 | x7 << 5 | c0
         for e0 in s0[1:]:
-            if len(e0) != 4:
-                raise Misfit
             x8 = e0["D_TRACKCOND"]
             x9 = e0["L_TRACKCOND"]
             x10 = e0["M_PLATFORM"]
             x11 = e0["Q_PLATFORM"]
-            if x8 >> 15 | x9 >> 15 | x10 >> 4 | x11 >> 2:
+            if x8 >> 15 | x9 >> 15 | x10 >> 4 | x11 >> 2 or len(e0) != 4:
                 raise Misfit
             v = v << 36 | x8 << 21 | x9 << 6 | x10 << 2 | x11
         b += 36 * c0
@@ -2354,54 +2303,45 @@ def read_to_train_70(n: int, p: int) -> tuple[Tree, int]:
         p -= 5
         w7 = n >> p & 31
         c0 = w7
-        s0 = [e0]
+        s0: list[Tree] = [e0]
         t0["suitabilities"] = s0
-        for _ in range(c0):
+        while c0:
+            c0 -= 1
             w = n >> p - 31 & 2147483647
-            q3 = w >> 14 & 3
-            if q3 == 0:
+            if (w >> 14 & 3) == 0:
                 p -= 25
                 s0.append(
                     {"D_SUITABILITY": w >> 16, "Q_SUITABILITY": 0, "M_LINEGAUGE": w >> 6 & 255}
                 )
-            else:
-                if q3 == 1:
-                    p -= 24
+            elif (w >> 14 & 3) == 1:
+                p -= 24
+                s0.append(
+                    {"D_SUITABILITY": w >> 16, "Q_SUITABILITY": 1, "M_AXLELOADCAT": w >> 7 & 127}
+                )
+            elif (w >> 14 & 3) == 2:
+                if w >> 10 & 15:
+                    p -= 31
                     s0.append(
                         {
                             "D_SUITABILITY": w >> 16,
-                            "Q_SUITABILITY": q3,
-                            "M_AXLELOADCAT": w >> 7 & 127,
+                            "Q_SUITABILITY": 2,
+                            "M_VOLTAGE": w >> 10 & 15,
+                            "NID_CTRACTION": w & 1023,
                         }
                     )
                 else:
-                    if q3 == 2:
-                        q4 = w >> 10 & 15
-                        if q4:
-                            p -= 31
-                            s0.append(
-                                {
-                                    "D_SUITABILITY": w >> 16,
-                                    "Q_SUITABILITY": q3,
-                                    "M_VOLTAGE": q4,
-                                    "NID_CTRACTION": w & 1023,
-                                }
-                            )
-                        else:
-                            p -= 21
-                            s0.append(
-                                {"D_SUITABILITY": w >> 16, "Q_SUITABILITY": q3, "M_VOLTAGE": q4}
-                            )
-                    else:
-                        p -= 17
-                        s0.append({"D_SUITABILITY": w >> 16, "Q_SUITABILITY": q3})
+                    p -= 21
+                    s0.append({"D_SUITABILITY": w >> 16, "Q_SUITABILITY": 2, "M_VOLTAGE": 0})
+            else:
+                p -= 17
+                s0.append({"D_SUITABILITY": w >> 16, "Q_SUITABILITY": 3})
     if p < 60:
         raise Misfit
     return t0, p - 60
 
 
 def write_to_train_70(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 4
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
@@ -2518,15 +2458,13 @@ def read_to_train_71(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_71(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 6 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
     x2 = t["D_ADHESION"]
     x3 = t["L_ADHESION"]
     x4 = t["M_ADHESION"]
-    if x0 >> 2 | x1 >> 2 | x2 >> 15 | x3 >> 15 | x4 >> 1:
+    if x0 >> 2 | x1 >> 2 | x2 >> 15 | x3 >> 15 | x4 >> 1 or len(t) != 6 + ("L_PACKET" in t):
         raise Misfit
     v = 71 << 48 | x0 << 46 | x1 << 31 | x2 << 16 | x3 << 1 | x4
     return v, b + 56
@@ -2596,7 +2534,7 @@ def read_to_train_72(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_72(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 9
     g0 = t["start"]
     k1 = 3
@@ -2732,7 +2670,7 @@ def read_to_train_76(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_76(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 9
     g0 = t["start"]
     k1 = 3
@@ -2823,9 +2761,10 @@ def read_to_train_79(n: int, p: int) -> tuple[Tree, int]:
     p -= 5
     w3 = n >> p & 31
     c0 = w3
-    s0 = [e0]
+    s0: list[Tree] = [e0]
     t0["positions"] = s0
-    for _ in range(c0):
+    while c0:
+        c0 -= 1
         p -= 1
         w4 = n >> p & 1
         q1 = w4
@@ -2845,7 +2784,7 @@ def read_to_train_79(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_79(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     s0 = t["positions"]
     c0 = len(s0) - 1
     e0 = s0[0]
@@ -2873,7 +2812,7 @@ def write_to_train_79(t: Tree) -> tuple[int, int]:
         raise Misfit
     v = v << 59 | x4 << 45 | x5 << 30 | x6 << 29 | x7 << 5 | c0
     for e0 in s0[1:]:
-        v0 = b0 = 0
+        b0 = 0
         k1 = 5
         x8 = e0["Q_NEWCOUNTRY"]
         if x8 >> 1:
@@ -2917,7 +2856,7 @@ def read_to_train_80(n: int, p: int) -> tuple[Tree, int]:
         "L_ACKMAMODE": w1 >> 6 & 32767,
         "Q_MAMODE": w1 >> 5 & 1,
     }
-    s0 = [e0]
+    s0: list[Tree] = [e0]
     t0: Tree = {
         "NID_PACKET": 80,
         "Q_DIR": w0 >> 39 & 3,
@@ -2941,18 +2880,16 @@ def read_to_train_80(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_80(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     s0 = t["profiles"]
     c0 = len(s0) - 1
     e0 = s0[0]
-    if len(e0) != 6:
-        raise Misfit
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
     x2 = e0["D_MAMODE"]
     x3 = e0["M_MAMODE"]
     x4 = e0["V_MAMODE"]
-    if x0 >> 2 | x1 >> 2 | x2 >> 15 | x3 >> 2 | x4 >> 7:
+    if x0 >> 2 | x1 >> 2 | x2 >> 15 | x3 >> 2 | x4 >> 7 or len(e0) != 6:
         raise Misfit
     v = 80 << 41 | x0 << 39 | x1 << 24 | x2 << 9 | x3 << 7 | x4
     x5 = e0["L_MAMODE"]
@@ -2962,15 +2899,13 @@ def write_to_train_80(t: Tree) -> tuple[int, int]:
         raise Misfit
     v = v << 36 | x5 << 21 | x6 << 6 | x7 << 5 | c0
     for e0 in s0[1:]:
-        if len(e0) != 6:
-            raise Misfit
         x8 = e0["D_MAMODE"]
         x9 = e0["M_MAMODE"]
         x10 = e0["V_MAMODE"]
         x11 = e0["L_MAMODE"]
         x12 = e0["L_ACKMAMODE"]
         x13 = e0["Q_MAMODE"]
-        if x8 >> 15 | x9 >> 2 | x10 >> 7 | x11 >> 15 | x12 >> 15 | x13 >> 1:
+        if x8 >> 15 | x9 >> 2 | x10 >> 7 | x11 >> 15 | x12 >> 15 | x13 >> 1 or len(e0) != 6:
             raise Misfit
         v = v << 55 | x8 << 40 | x9 << 38 | x10 << 31 | x11 << 16 | x12 << 1 | x13
     b += 55 * c0
@@ -3010,7 +2945,7 @@ def read_to_train_88(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_88(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 7
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
@@ -3061,7 +2996,7 @@ def read_to_train_90(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_90(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 4
     x0 = t["Q_DIR"]
     x1 = t["Q_NEWCOUNTRY"]
@@ -3109,14 +3044,12 @@ def read_to_train_131(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_131(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 8 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
     x2 = t["D_RBCTR"]
     x3 = t["NID_C"]
-    if x0 >> 2 | x1 >> 2 | x2 >> 15 | x3 >> 10:
+    if x0 >> 2 | x1 >> 2 | x2 >> 15 | x3 >> 10 or len(t) != 8 + ("L_PACKET" in t):
         raise Misfit
     v = 131 << 42 | x0 << 40 | x1 << 25 | x2 << 10 | x3
     x4 = t["NID_RBC"]
@@ -3141,12 +3074,10 @@ def read_to_train_132(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_132(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 3 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
     x1 = t["Q_ASPECT"]
-    if x0 >> 2 | x1 >> 1:
+    if x0 >> 2 | x1 >> 1 or len(t) != 3 + ("L_PACKET" in t):
         raise Misfit
     v = 132 << 16 | x0 << 14 | x1
     return v, b + 24
@@ -3177,15 +3108,13 @@ def read_to_train_133(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_133(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 10 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
     x2 = t["Q_RIU"]
     x3 = t["NID_C"]
     x4 = t["NID_RIU"]
-    if x0 >> 2 | x1 >> 2 | x2 >> 1 | x3 >> 10 | x4 >> 14:
+    if x0 >> 2 | x1 >> 2 | x2 >> 1 | x3 >> 10 | x4 >> 14 or len(t) != 10 + ("L_PACKET" in t):
         raise Misfit
     v = 133 << 42 | x0 << 40 | x1 << 25 | x2 << 24 | x3 << 14 | x4
     x5 = digits_value(t["NID_RADIO"], 16)
@@ -3220,14 +3149,12 @@ def read_to_train_134(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_134(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 8 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
     x2 = t["NID_LOOP"]
     x3 = t["D_LOOP"]
-    if x0 >> 2 | x1 >> 2 | x2 >> 14 | x3 >> 15:
+    if x0 >> 2 | x1 >> 2 | x2 >> 14 | x3 >> 15 or len(t) != 8 + ("L_PACKET" in t):
         raise Misfit
     v = 134 << 46 | x0 << 44 | x1 << 29 | x2 << 15 | x3
     x4 = t["L_LOOP"]
@@ -3248,11 +3175,9 @@ def read_to_train_135(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_135(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 2 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
-    if x0 >> 2:
+    if x0 >> 2 or len(t) != 2 + ("L_PACKET" in t):
         raise Misfit
     v = 135 << 15 | x0 << 13
     return v, b + 23
@@ -3275,7 +3200,7 @@ def read_to_train_136(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_136(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 4
     x0 = t["Q_DIR"]
     x1 = t["Q_NEWCOUNTRY"]
@@ -3307,12 +3232,10 @@ def read_to_train_137(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_137(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 3 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
     x1 = t["Q_SRSTOP"]
-    if x0 >> 2 | x1 >> 1:
+    if x0 >> 2 | x1 >> 1 or len(t) != 3 + ("L_PACKET" in t):
         raise Misfit
     v = 137 << 16 | x0 << 14 | x1
     return v, b + 24
@@ -3334,14 +3257,12 @@ def read_to_train_138(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_138(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 5 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
     x2 = t["D_STARTREVERSE"]
     x3 = t["L_REVERSEAREA"]
-    if x0 >> 2 | x1 >> 2 | x2 >> 15 | x3 >> 15:
+    if x0 >> 2 | x1 >> 2 | x2 >> 15 | x3 >> 15 or len(t) != 5 + ("L_PACKET" in t):
         raise Misfit
     v = 138 << 47 | x0 << 45 | x1 << 30 | x2 << 15 | x3
     return v, b + 55
@@ -3363,14 +3284,12 @@ def read_to_train_139(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_139(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 5 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
     x2 = t["D_REVERSE"]
     x3 = t["V_REVERSE"]
-    if x0 >> 2 | x1 >> 2 | x2 >> 15 | x3 >> 7:
+    if x0 >> 2 | x1 >> 2 | x2 >> 15 | x3 >> 7 or len(t) != 5 + ("L_PACKET" in t):
         raise Misfit
     v = 139 << 39 | x0 << 37 | x1 << 22 | x2 << 7 | x3
     return v, b + 47
@@ -3390,12 +3309,10 @@ def read_to_train_140(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_140(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 3 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
     x1 = digits_value(t["NID_OPERATIONAL"], 8)
-    if x0 >> 2:
+    if x0 >> 2 or len(t) != 3 + ("L_PACKET" in t):
         raise Misfit
     v = 140 << 47 | x0 << 45 | x1
     return v, b + 55
@@ -3416,13 +3333,11 @@ def read_to_train_141(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_141(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 4 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
     x1 = t["Q_GDIR"]
     x2 = t["G_TSR"]
-    if x0 >> 2 | x1 >> 1 | x2 >> 8:
+    if x0 >> 2 | x1 >> 1 | x2 >> 8 or len(t) != 4 + ("L_PACKET" in t):
         raise Misfit
     v = 141 << 24 | x0 << 22 | x1 << 8 | x2
     return v, b + 32
@@ -3447,14 +3362,12 @@ def read_to_train_143(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_143(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 6 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
     x1 = t["Q_RIU"]
     x2 = t["NID_C"]
     x3 = t["NID_RIU"]
-    if x0 >> 2 | x1 >> 1 | x2 >> 10 | x3 >> 14:
+    if x0 >> 2 | x1 >> 1 | x2 >> 10 | x3 >> 14 or len(t) != 6 + ("L_PACKET" in t):
         raise Misfit
     v = 143 << 40 | x0 << 38 | x1 << 24 | x2 << 14 | x3
     x4 = digits_value(t["NID_RADIO"], 16)
@@ -3471,11 +3384,9 @@ def read_to_train_145(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_145(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 2 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
-    if x0 >> 2:
+    if x0 >> 2 or len(t) != 2 + ("L_PACKET" in t):
         raise Misfit
     v = 145 << 15 | x0 << 13
     return v, b + 23
@@ -3495,7 +3406,7 @@ def read_to_train_180(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_180(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 3
     x0 = t["Q_DIR"]
     x1 = t["Q_LSSMA"]
@@ -3523,11 +3434,9 @@ def read_to_train_181(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_181(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 2 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
-    if x0 >> 2:
+    if x0 >> 2 or len(t) != 2 + ("L_PACKET" in t):
         raise Misfit
     v = 181 << 15 | x0 << 13
     return v, b + 23
@@ -3542,11 +3451,9 @@ def read_to_train_254(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_254(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 2 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["Q_DIR"]
-    if x0 >> 2:
+    if x0 >> 2 or len(t) != 2 + ("L_PACKET" in t):
         raise Misfit
     v = 254 << 15 | x0 << 13
     return v, b + 23
@@ -3560,7 +3467,7 @@ def read_to_train_255(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_train_255(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     if len(t) != 1:
         raise Misfit
     v = 255
@@ -3605,7 +3512,7 @@ def read_to_track_0(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_track_0(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 13
     x0 = t["Q_SCALE"]
     x1 = t["NID_LRBG"]
@@ -3688,7 +3595,7 @@ def read_to_track_1(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_track_1(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     k0 = 14
     x0 = t["Q_SCALE"]
     x1 = t["NID_LRBG"]
@@ -3740,7 +3647,7 @@ def read_to_track_2(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 8589934591
     c0 = w0 & 31
     e0: Tree = {"M_VERSION": w0 >> 5 & 127}
-    s0 = [e0]
+    s0: list[Tree] = [e0]
     t0: Tree = {"NID_PACKET": 2, "L_PACKET": length, "versions": s0}
     for p in range(p - 7, p - 7 * c0 - 1, -7):
         w = n >> p & 127
@@ -3749,21 +3656,17 @@ def read_to_track_2(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_track_2(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     s0 = t["versions"]
     c0 = len(s0) - 1
     e0 = s0[0]
-    if len(e0) != 1:
-        raise Misfit
     x0 = e0["M_VERSION"]
-    if x0 >> 7 | c0 >> 5:
+    if x0 >> 7 | c0 >> 5 or len(e0) != 1:
         raise Misfit
     v = 2 << 25 | x0 << 5 | c0
     for e0 in s0[1:]:
-        if len(e0) != 1:
-            raise Misfit
         x1 = e0["M_VERSION"]
-        if x1 >> 7:
+        if x1 >> 7 or len(e0) != 1:
             raise Misfit
         v = v << 7 | x1
     b += 7 * c0
@@ -3781,11 +3684,9 @@ def read_to_track_4(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_track_4(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 2 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["M_ERROR"]
-    if x0 >> 8:
+    if x0 >> 8 or len(t) != 2 + ("L_PACKET" in t):
         raise Misfit
     v = 4 << 21 | x0
     return v, b + 29
@@ -3804,10 +3705,10 @@ def read_to_track_5(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_track_5(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
+    x0 = digits_value(t["NID_OPERATIONAL"], 8)
     if len(t) != 2 + ("L_PACKET" in t):
         raise Misfit
-    x0 = digits_value(t["NID_OPERATIONAL"], 8)
     v = 5 << 45 | x0
     return v, b + 53
 
@@ -3821,11 +3722,9 @@ def read_to_track_9(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_track_9(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 2 + ("L_PACKET" in t):
-        raise Misfit
+    b = 0
     x0 = t["NID_LTRBG"]
-    if x0 >> 24:
+    if x0 >> 24 or len(t) != 2 + ("L_PACKET" in t):
         raise Misfit
     v = 9 << 37 | x0
     return v, b + 45
@@ -3840,7 +3739,7 @@ def read_to_track_11(n: int, p: int) -> tuple[Tree, int]:
     p -= 32
     w1 = n >> p & 4294967295
     c0 = w1 & 31
-    s0 = []
+    s0: list[Tree] = []
     t0: Tree = {
         "NID_PACKET": 11,
         "L_PACKET": length,
@@ -3854,19 +3753,19 @@ def read_to_track_11(n: int, p: int) -> tuple[Tree, int]:
         "N_AXLE": w1 >> 5 & 1023,
         "tractions": s0,
     }
-    for _ in range(c0):
+    while c0:
+        c0 -= 1
         w = n >> p - 14 & 16383
-        q0 = w >> 10
-        if q0:
+        if w >> 10 & 15:
             p -= 14
-            s0.append({"M_VOLTAGE": q0, "NID_CTRACTION": w & 1023})
+            s0.append({"M_VOLTAGE": w >> 10, "NID_CTRACTION": w & 1023})
         else:
             p -= 4
-            s0.append({"M_VOLTAGE": q0})
+            s0.append({"M_VOLTAGE": 0})
     p -= 5
     w2 = n >> p & 31
     c1 = w2
-    s1 = []
+    s1: list[Tree] = []
     t0["national_systems"] = s1
     for p in range(p - 8, p - 8 * c1 - 1, -8):
         w = n >> p & 255
@@ -3877,7 +3776,7 @@ def read_to_track_11(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_track_11(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     s0 = t["tractions"]
     c0 = len(s0)
     x0 = t["NC_CDTRAIN"]
@@ -3913,10 +3812,8 @@ def write_to_track_11(t: Tree) -> tuple[int, int]:
         raise Misfit
     v = v << 5 | c1
     for e1 in s1:
-        if len(e1) != 1:
-            raise Misfit
         x10 = e1["NID_NTC"]
-        if x10 >> 8:
+        if x10 >> 8 or len(e1) != 1:
             raise Misfit
         v = v << 8 | x10
     b += 8 * c1
@@ -3938,7 +3835,7 @@ def read_to_track_44(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_to_track_44(t: Tree) -> tuple[int, int]:
-    v = b = 0
+    b = 0
     x0 = t["NID_XUSER"]
     if x0 >> 9:
         raise Misfit
@@ -3966,11 +3863,9 @@ def read_message_129(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_129(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 3 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
-    if x0 >> 32:
+    if x0 >> 32 or len(t) != 3 + ("L_MESSAGE" in t):
         raise Misfit
     v = 129 << 42 | x0
     x1 = t["NID_ENGINE"]
@@ -3995,11 +3890,9 @@ def read_message_130(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_130(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 3 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
-    if x0 >> 32:
+    if x0 >> 32 or len(t) != 3 + ("L_MESSAGE" in t):
         raise Misfit
     v = 130 << 42 | x0
     x1 = t["NID_ENGINE"]
@@ -4025,11 +3918,9 @@ def read_message_132(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_132(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 4 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
-    if x0 >> 32:
+    if x0 >> 32 or len(t) != 4 + ("L_MESSAGE" in t):
         raise Misfit
     v = 132 << 42 | x0
     x1 = t["NID_ENGINE"]
@@ -4055,11 +3946,9 @@ def read_message_136(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_136(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 3 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
-    if x0 >> 32:
+    if x0 >> 32 or len(t) != 3 + ("L_MESSAGE" in t):
         raise Misfit
     v = 136 << 42 | x0
     x1 = t["NID_ENGINE"]
@@ -4085,11 +3974,9 @@ def read_message_137(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_137(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 4 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
-    if x0 >> 32:
+    if x0 >> 32 or len(t) != 4 + ("L_MESSAGE" in t):
         raise Misfit
     v = 137 << 42 | x0
     x1 = t["NID_ENGINE"]
@@ -4116,11 +4003,9 @@ def read_message_138(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_138(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 4 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
-    if x0 >> 32:
+    if x0 >> 32 or len(t) != 4 + ("L_MESSAGE" in t):
         raise Misfit
     v = 138 << 42 | x0
     x1 = t["NID_ENGINE"]
@@ -4147,11 +4032,9 @@ def read_message_146(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_146(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 4 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
-    if x0 >> 32:
+    if x0 >> 32 or len(t) != 4 + ("L_MESSAGE" in t):
         raise Misfit
     v = 146 << 42 | x0
     x1 = t["NID_ENGINE"]
@@ -4179,11 +4062,9 @@ def read_message_147(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_147(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 5 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
-    if x0 >> 32:
+    if x0 >> 32 or len(t) != 5 + ("L_MESSAGE" in t):
         raise Misfit
     v = 147 << 42 | x0
     x1 = t["NID_ENGINE"]
@@ -4210,11 +4091,9 @@ def read_message_149(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_149(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 3 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
-    if x0 >> 32:
+    if x0 >> 32 or len(t) != 3 + ("L_MESSAGE" in t):
         raise Misfit
     v = 149 << 42 | x0
     x1 = t["NID_ENGINE"]
@@ -4239,11 +4118,9 @@ def read_message_150(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_150(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 3 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
-    if x0 >> 32:
+    if x0 >> 32 or len(t) != 3 + ("L_MESSAGE" in t):
         raise Misfit
     v = 150 << 42 | x0
     x1 = t["NID_ENGINE"]
@@ -4271,11 +4148,9 @@ def read_message_153(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_153(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 6 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
-    if x0 >> 32:
+    if x0 >> 32 or len(t) != 6 + ("L_MESSAGE" in t):
         raise Misfit
     v = 153 << 42 | x0
     x1 = t["NID_ENGINE"]
@@ -4303,11 +4178,9 @@ def read_message_154(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_154(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 3 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
-    if x0 >> 32:
+    if x0 >> 32 or len(t) != 3 + ("L_MESSAGE" in t):
         raise Misfit
     v = 154 << 42 | x0
     x1 = t["NID_ENGINE"]
@@ -4332,11 +4205,9 @@ def read_message_155(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_155(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 3 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
-    if x0 >> 32:
+    if x0 >> 32 or len(t) != 3 + ("L_MESSAGE" in t):
         raise Misfit
     v = 155 << 42 | x0
     x1 = t["NID_ENGINE"]
@@ -4361,11 +4232,9 @@ def read_message_156(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_156(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 3 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
-    if x0 >> 32:
+    if x0 >> 32 or len(t) != 3 + ("L_MESSAGE" in t):
         raise Misfit
     v = 156 << 42 | x0
     x1 = t["NID_ENGINE"]
@@ -4391,11 +4260,9 @@ def read_message_157(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_157(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 4 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
-    if x0 >> 32:
+    if x0 >> 32 or len(t) != 4 + ("L_MESSAGE" in t):
         raise Misfit
     v = 157 << 42 | x0
     x1 = t["NID_ENGINE"]
@@ -4422,11 +4289,9 @@ def read_message_158(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_158(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 4 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
-    if x0 >> 32:
+    if x0 >> 32 or len(t) != 4 + ("L_MESSAGE" in t):
         raise Misfit
     v = 158 << 42 | x0
     x1 = t["NID_ENGINE"]
@@ -4452,11 +4317,9 @@ def read_message_159(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_159(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 3 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
-    if x0 >> 32:
+    if x0 >> 32 or len(t) != 3 + ("L_MESSAGE" in t):
         raise Misfit
     v = 159 << 42 | x0
     x1 = t["NID_ENGINE"]
@@ -4484,12 +4347,10 @@ def read_message_2(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_2(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 6 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 6 + ("L_MESSAGE" in t):
         raise Misfit
     v = 2 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -4517,12 +4378,10 @@ def read_message_3(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_3(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 4 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 4 + ("L_MESSAGE" in t):
         raise Misfit
     v = 3 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -4548,12 +4407,10 @@ def read_message_6(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_6(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 4 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 4 + ("L_MESSAGE" in t):
         raise Misfit
     v = 6 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -4580,12 +4437,10 @@ def read_message_8(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_8(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 5 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 5 + ("L_MESSAGE" in t):
         raise Misfit
     v = 8 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -4612,12 +4467,10 @@ def read_message_9(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_9(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 4 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 4 + ("L_MESSAGE" in t):
         raise Misfit
     v = 9 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -4650,12 +4503,10 @@ def read_message_15(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_15(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 9 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 9 + ("L_MESSAGE" in t):
         raise Misfit
     v = 15 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -4690,12 +4541,10 @@ def read_message_16(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_16(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 5 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 5 + ("L_MESSAGE" in t):
         raise Misfit
     v = 16 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -4723,12 +4572,10 @@ def read_message_18(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_18(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 5 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 5 + ("L_MESSAGE" in t):
         raise Misfit
     v = 18 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -4755,12 +4602,10 @@ def read_message_24(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_24(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 4 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 4 + ("L_MESSAGE" in t):
         raise Misfit
     v = 24 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -4787,12 +4632,10 @@ def read_message_27(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_27(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 5 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 5 + ("L_MESSAGE" in t):
         raise Misfit
     v = 27 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -4820,12 +4663,10 @@ def read_message_28(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_28(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 5 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 5 + ("L_MESSAGE" in t):
         raise Misfit
     v = 28 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -4853,12 +4694,10 @@ def read_message_32(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_32(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 5 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 5 + ("L_MESSAGE" in t):
         raise Misfit
     v = 32 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -4887,12 +4726,10 @@ def read_message_33(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_33(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 6 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 6 + ("L_MESSAGE" in t):
         raise Misfit
     v = 33 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -4927,12 +4764,10 @@ def read_message_34(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_34(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 9 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 9 + ("L_MESSAGE" in t):
         raise Misfit
     v = 34 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -4966,12 +4801,10 @@ def read_message_37(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_37(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 4 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 4 + ("L_MESSAGE" in t):
         raise Misfit
     v = 37 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -4997,12 +4830,10 @@ def read_message_39(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_39(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 4 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 4 + ("L_MESSAGE" in t):
         raise Misfit
     v = 39 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -5028,12 +4859,10 @@ def read_message_40(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_40(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 4 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 4 + ("L_MESSAGE" in t):
         raise Misfit
     v = 40 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -5059,12 +4888,10 @@ def read_message_41(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_41(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 4 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 4 + ("L_MESSAGE" in t):
         raise Misfit
     v = 41 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -5090,12 +4917,10 @@ def read_message_43(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_43(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 4 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 4 + ("L_MESSAGE" in t):
         raise Misfit
     v = 43 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -5122,12 +4947,10 @@ def read_message_45(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_message_45(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 5 + ("L_MESSAGE" in t):
-        raise Misfit
+    b = 0
     x0 = t["T_TRAIN"]
     x1 = t["M_ACK"]
-    if x0 >> 32 | x1 >> 1:
+    if x0 >> 32 | x1 >> 1 or len(t) != 5 + ("L_MESSAGE" in t):
         raise Misfit
     v = 45 << 43 | x0 << 1 | x1
     x2 = t["NID_LRBG"]
@@ -5157,9 +4980,7 @@ def read_balise(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_balise(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 10:
-        raise Misfit
+    b = 0
     x0 = t["Q_UPDOWN"]
     x1 = t["M_VERSION"]
     x2 = t["Q_MEDIA"]
@@ -5181,6 +5002,7 @@ def write_balise(t: Tree) -> tuple[int, int]:
         | x7 >> 10
         | x8 >> 14
         | x9 >> 1
+        or len(t) != 10
     ):
         raise Misfit
     v = (
@@ -5212,15 +5034,13 @@ def read_loop(n: int, p: int) -> tuple[Tree, int]:
 
 
 def write_loop(t: Tree) -> tuple[int, int]:
-    v = b = 0
-    if len(t) != 5:
-        raise Misfit
+    b = 0
     x0 = t["Q_UPDOWN"]
     x1 = t["M_VERSION"]
     x2 = t["Q_MEDIA"]
     x3 = t["NID_C"]
     x4 = t["NID_LOOP"]
-    if x0 >> 1 | x1 >> 7 | x2 >> 1 | x3 >> 10 | x4 >> 14:
+    if x0 >> 1 | x1 >> 7 | x2 >> 1 | x3 >> 10 | x4 >> 14 or len(t) != 5:
         raise Misfit
     v = x0 << 32 | x1 << 25 | x2 << 24 | x3 << 14 | x4
     return v, b + 33
@@ -5456,4 +5276,5 @@ CODEC = Codec(
     },
     write_header={"balise": write_balise, "loop": write_loop},
     unmeasured={"to-train": {0: 14, 255: 8}, "to-track": {}},
+    versions={16: "1.0", 17: "1.1", 32: "2.0", 33: "2.1"},
 )
