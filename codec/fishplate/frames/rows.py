@@ -101,17 +101,17 @@ class _Frame:
 
     def rows(self) -> list[Row]:
         """Return rows that cover the whole frame."""
-        cursor = self._cursor(0, self.size)
+        surplus = self.message.surplus["bits"] if self.message.surplus else 0
+        cursor = self._cursor(0, self.size - surplus)
         self._header(cursor)
         for index in range(len(self.message.packets)):
             self._packet(cursor, index)
-        surplus = self.message.surplus["bits"] if self.message.surplus else 0
         for name in ("padding", "filler", "content"):
             if getattr(self.message, name):
-                self._walk(cursor).unexplained(cursor.left - surplus, (name,))
-        if surplus:
-            self._walk(cursor).unexplained(surplus, ("surplus",))
-        return cursor.rows
+                self._walk(cursor).unexplained(cursor.left, (name,))
+        behind = self._cursor(self.size - surplus, surplus)
+        self._walk(behind).unexplained(surplus, ("surplus",))
+        return cursor.rows + behind.rows
 
     def rows_before(self, error: DecodeError) -> list[Row]:
         """Return the rows of everything that could be read before the trouble."""
@@ -136,12 +136,9 @@ class _Frame:
         return Walk(self.registry.variables, cursor)
 
     def _header(self, cursor: Cursor) -> None:
-        if not self.message.header:
-            return
-        nodes = self._header_nodes()
-        if set(self.message.header) == {"NID_MESSAGE", "L_MESSAGE"}:
-            nodes = nodes[:2]
-        self._walk(cursor).scope(nodes, ("header",), {})
+        """Add the header, or as much of it as there is."""
+        if self.message.medium is not None:
+            self._until_it_ends(cursor, self._header_nodes(), ("header",))
 
     def _header_nodes(self) -> Sequence[Node]:
         if self.message.medium != "radio":
@@ -162,9 +159,7 @@ class _Frame:
         packet = self.message.packets[index]
         path = ("packets", index)
         if "content" in packet:
-            self._walk(cursor).scope(self._head_nodes(), path, {})
-            width = packet["content"]["bits"]
-            self._walk(cursor).unexplained(width, (*path, "content"))
+            self._kept_packet(cursor, index)
             return
         nodes = self.registry.packets[self._direction, packet["NID_PACKET"]].nodes
         width = packet.get("L_PACKET", cursor.left)
@@ -172,6 +167,18 @@ class _Frame:
         self._walk(inner).scope(nodes, path, {})
         if "surplus" in packet:
             self._walk(inner).unexplained(inner.left, (*path, "surplus"))
+        cursor.rows += inner.rows
+        cursor.position += inner.position
+
+    def _kept_packet(self, cursor: Cursor, index: int) -> None:
+        """Add a packet kept as content: the fields before the trouble, then the rest as it is."""
+        packet = self.message.packets[index]
+        path = ("packets", index)
+        known = self.registry.packets.get((self._direction, packet["NID_PACKET"]))
+        width = HEADS[self._direction] + packet["content"]["bits"]
+        inner = self._cursor(cursor.position, width)
+        self._until_it_ends(inner, known.nodes if known else self._head_nodes(), path)
+        self._walk(inner).unexplained(inner.left, (*path, "content"))
         cursor.rows += inner.rows
         cursor.position += inner.position
 
