@@ -49,7 +49,7 @@ UNITS: Mapping[str, Mapping[str, Fraction]] = MappingProxyType(
         "s": {"s": Fraction(1), "min": Fraction(60), "h": Fraction(3600), "ms": Fraction(1, 1000)},
         "permille": {"‰": Fraction(1), "permille": Fraction(1), "per mille": Fraction(1)},
         "m/s2": {"m/s2": Fraction(1), "m/s²": Fraction(1)},
-        "A": {"a": Fraction(1), "ka": Fraction(1000)},
+        "A": {"A": Fraction(1), "kA": Fraction(1000)},
         "bit": {"bit": Fraction(1), "bits": Fraction(1)},
         "byte": {"byte": Fraction(1), "bytes": Fraction(1)},
         "character": {"character": Fraction(1), "characters": Fraction(1)},
@@ -182,7 +182,7 @@ def parse(variable: Variable, given: object, scale: int | None = None) -> int | 
 def _parse_number(variable: Variable, text: str, match: re.Match[str], scale: int | None) -> int:
     factors = UNITS[variable.unit]
     unit = match["unit"].strip()
-    factor = factors.get(unit.lower())
+    factor = {name.casefold(): each for name, each in factors.items()}.get(unit.casefold())
     if factor is None:
         names = " or ".join(factors)
         reason = f"{text!r} is in {unit!r}, expected {names}" if unit else f"{text!r} has no unit"

@@ -2,14 +2,19 @@
 
 from __future__ import annotations
 
-from functools import cache
+from functools import cache, partial
 from typing import TYPE_CHECKING, Annotated, Any, Literal
 
-from pydantic import BeforeValidator, ConfigDict, ValidationError, create_model
+from pydantic import BeforeValidator, ValidationError, create_model
 
 from fishplate.errors import EncodeError, Path
 from fishplate.frames.decoding import FIRST_TO_TRACK
-from fishplate.models.schema import content_packet_schema, message_schema, telegram_schema
+from fishplate.models.schema import (
+    content_packet_schema,
+    message_schema,
+    packet_schema,
+    telegram_schema,
+)
 from fishplate.models.scopes import Bits, Scope, custom_error, scope_model
 from fishplate.standard import registry
 from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN, Field, Node
@@ -17,8 +22,6 @@ from fishplate.versions import DEFAULT_VERSION, closest_layouts
 
 if TYPE_CHECKING:
     from collections.abc import Callable
-
-    from pydantic import BaseModel
 
     from fishplate.standard import Registry
 
@@ -31,45 +34,41 @@ def packet_model(
     layouts = registry(version)
     packet = layouts.packets[direction, number]
     name = f"Packet{number}{'ToTrain' if direction == TO_TRAIN else 'ToTrack'}"
-    return scope_model(layouts, packet.nodes, name, {"surplus": Bits})
+    model = scope_model(layouts, packet.nodes, name, {"surplus": Bits})
+    model.declared = partial(packet_schema, layouts, direction, number)
+    return model
 
 
 @cache
 def message_model(
     number: int, direction: str | None = None, version: str = DEFAULT_VERSION
-) -> type[BaseModel]:
+) -> type[Scope]:
     """Return the model of one radio message; `KeyError` when the registry holds none."""
     layouts = registry(version)
     if direction is None:
         direction = TO_TRAIN if (TO_TRAIN, number) in layouts.messages else TO_TRACK
     nodes = layouts.messages[direction, number].nodes
-    schema = message_schema(layouts, direction, number)
+    schema = partial(message_schema, layouts, direction, number)
     return _frame_model(layouts, f"Message{number}", "radio", direction, nodes, schema)
 
 
 @cache
-def telegram_model(version: str = DEFAULT_VERSION) -> type[BaseModel]:
+def telegram_model(version: str = DEFAULT_VERSION) -> type[Scope]:
     """Return the model of a balise telegram."""
     return _telegram_model("balise", version)
 
 
 @cache
-def loop_model(version: str = DEFAULT_VERSION) -> type[BaseModel]:
+def loop_model(version: str = DEFAULT_VERSION) -> type[Scope]:
     """Return the model of a loop message."""
     return _telegram_model("loop", version)
 
 
-def _telegram_model(medium: str, version: str) -> type[BaseModel]:
+def _telegram_model(medium: str, version: str) -> type[Scope]:
     layouts = registry(version)
     nodes = layouts.headers[medium].nodes
-    schema = telegram_schema(layouts, medium)
+    schema = partial(telegram_schema, layouts, medium)
     return _frame_model(layouts, medium.capitalize(), medium, TO_TRAIN, nodes, schema)
-
-
-class _Frame(Scope):
-    """Base of the models of frames."""
-
-    model_config = ConfigDict(extra="forbid")
 
 
 def _frame_model(
@@ -78,8 +77,8 @@ def _frame_model(
     medium: str,
     direction: str,
     nodes: tuple[Node, ...],
-    schema: dict[str, Any],
-) -> type[BaseModel]:
+    schema: Callable[[], dict[str, Any]],
+) -> type[Scope]:
     header = scope_model(layouts, nodes, f"{name}Header")
     packet = Annotated[Any, BeforeValidator(_packet_validator(direction, layouts.version))]
     rests = ("padding", "surplus", "content") if medium == "radio" else ("filler", "content")
@@ -93,17 +92,9 @@ def _frame_model(
         **dict.fromkeys(rests, (Bits, None)),
         "problems": (list[Any], None),
     }
-    model = create_model(name, __base__=_Frame, **fields)
-    model.model_config["json_schema_extra"] = _replaced_by(schema)
+    model = create_model(name, __base__=Scope, **fields)
+    model.declared = schema
     return model
-
-
-def _replaced_by(schema: dict[str, Any]) -> Callable[[dict[str, Any]], None]:
-    def replace(generated: dict[str, Any]) -> None:
-        generated.clear()
-        generated.update(schema)
-
-    return replace
 
 
 def _packet_validator(direction: str, version: str) -> Callable[[Any], dict[str, Any]]:
@@ -131,7 +122,7 @@ def content_packet_model(direction: str, version: str = DEFAULT_VERSION) -> type
     names = ["NID_PACKET", *(["Q_DIR"] if direction == TO_TRAIN else []), "L_PACKET"]
     nodes = tuple(Field(each) for each in names)
     model = scope_model(registry(version), nodes, "ContentPacket", {"content": Bits})
-    model.model_config["json_schema_extra"] = _replaced_by(content_packet_schema(direction))
+    model.declared = partial(content_packet_schema, direction)
     return model
 
 
@@ -151,7 +142,7 @@ def codes_of(tree: object) -> dict[str, Any]:
     return validated.model_dump(exclude_none=True, exclude={"problems"})
 
 
-def _model_for(tree: dict[str, Any]) -> type[BaseModel]:
+def _model_for(tree: dict[str, Any]) -> type[Scope]:
     version = closest_layouts(str(tree.get("version", DEFAULT_VERSION))) or DEFAULT_VERSION
     header = tree.get("header")
     if not isinstance(header, dict):

@@ -6,8 +6,10 @@ validation names all that is wrong.
 
 from __future__ import annotations
 
+from collections.abc import Callable  # noqa: TC003  pydantic evaluates annotations of a model
 from contextvars import ContextVar
 from difflib import get_close_matches
+from functools import partial
 from typing import TYPE_CHECKING, Annotated, Any, ClassVar
 
 from annotated_types import Len
@@ -27,7 +29,7 @@ from fishplate.engine.spell import COMPUTED, all_keys, code_of, conditional_keys
 from fishplate.engine.walk import holds
 from fishplate.errors import EncodeError
 from fishplate.meaning import parse
-from fishplate.models.schema import BITS_SCHEMA, scope_schema
+from fishplate.models.schema import DIALECT, scope_schema
 from fishplate.standard.vocabulary import (
     COUNT,
     Field,
@@ -41,10 +43,7 @@ from fishplate.standard.vocabulary import (
 )
 
 if TYPE_CHECKING:
-    from collections.abc import Callable, Iterator, Mapping, Sequence
-
-    from pydantic import GetJsonSchemaHandler
-    from pydantic_core.core_schema import CoreSchema
+    from collections.abc import Iterator, Mapping, Sequence
 
     from fishplate.standard import Registry
     from fishplate.standard.vocabulary import Variable
@@ -69,6 +68,7 @@ class Scope(BaseModel):
 
     nodes: ClassVar[tuple[Node, ...]] = ()
     registry_used: ClassVar[Any] = None
+    declared: ClassVar[Callable[[], dict[str, Any]]]
 
     @model_validator(mode="wrap")
     @classmethod
@@ -126,13 +126,9 @@ class Scope(BaseModel):
         return self.model_dump(exclude_none=True)
 
     @classmethod
-    def __get_pydantic_json_schema__(
-        cls, core_schema: CoreSchema, handler: GetJsonSchemaHandler
-    ) -> dict[str, Any]:
-        """Give the schema that the layout declares, conditions included."""
-        if not cls.nodes:
-            return handler(core_schema)
-        return scope_schema(cls.registry_used, cls.nodes)
+    def model_json_schema(cls, *_arguments: Any, **_options: Any) -> dict[str, Any]:
+        """Return the schema that the layout declares, conditions included."""
+        return {"$schema": DIALECT, **cls.declared()}
 
 
 def _fields(nodes: Sequence[Node]) -> Iterator[Field]:
@@ -232,17 +228,7 @@ def _checked_bits(value: object) -> object:
     return value
 
 
-class _BitsSchema:
-    """Gives the schema of ``{"bits": n, "hex": "..."}``."""
-
-    @classmethod
-    def __get_pydantic_json_schema__(
-        cls, _core_schema: CoreSchema, _handler: GetJsonSchemaHandler
-    ) -> dict[str, Any]:
-        return dict(BITS_SCHEMA)
-
-
-Bits = Annotated[dict[str, Any], _as_pydantic(_checked_bits), _BitsSchema]
+Bits = Annotated[dict[str, Any], _as_pydantic(_checked_bits)]
 """Bits that no layout explains."""
 
 
@@ -258,6 +244,7 @@ def scope_model(
     model = create_model(name, __base__=Scope, **fields)
     model.nodes = nodes
     model.registry_used = registry
+    model.declared = partial(scope_schema, registry, nodes)
     return model
 
 
