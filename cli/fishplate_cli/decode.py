@@ -1,0 +1,158 @@
+"""`fishplate decode`: frames to trees, or to text for people."""
+
+from __future__ import annotations
+
+import json
+from decimal import Decimal
+from enum import StrEnum
+from itertools import chain
+from typing import TYPE_CHECKING, Annotated, Any
+
+import typer
+
+from fishplate_cli.console import Complaints, coloured, width, write
+from fishplate_cli.inputs import (
+    DirectionOption,
+    FormOption,
+    Given,
+    Inputs,
+    MediumOption,
+    VersionOption,
+    check_frames,
+    read_frames,
+)
+
+if TYPE_CHECKING:
+    from collections.abc import Callable, Iterable, Iterator
+
+    from fishplate.captures import Frame
+    from fishplate.frames import Message
+
+    Decoded = Iterable[tuple[Frame, Message]]
+
+HELP = """\
+Say what frames mean, or write them as trees.
+
+text is for people: every line begins with the bit it stands at, !! marks a problem and ! a
+spare code. jsonl carries time, note and true bit length along, so that `encode` can give the
+capture back."""
+
+
+class As(StrEnum):
+    """What is written."""
+
+    TEXT = "text"
+    JSON = "json"
+    JSONL = "jsonl"
+    YAML = "yaml"
+
+
+def command(
+    inputs: Inputs,
+    *,
+    view: Annotated[As, typer.Option("--as", help="What to write.")] = As.TEXT,
+    medium: MediumOption = None,
+    direction: DirectionOption = None,
+    version: VersionOption = None,
+    form: FormOption = None,
+) -> None:
+    """Decode frames."""
+    check_frames(inputs)
+    given = Given(medium, direction, version, form)
+    complaints = Complaints()
+    if view is As.TEXT:
+        _text(inputs, given, complaints)
+    else:
+        WRITERS[view](_decoded(inputs, given, complaints))
+    complaints.end()
+
+
+def _decoded(
+    inputs: list[str], given: Given, complaints: Complaints
+) -> Iterator[tuple[Frame, Message]]:
+    for frame in read_frames(inputs, given, complaints):
+        if frame.problem:
+            continue
+        message = given.decode(frame)
+        yield frame, message
+        complaints.about_message(frame, message)
+
+
+def _text(inputs: list[str], given: Given, complaints: Complaints) -> None:
+    from fishplate_cli.view import View  # noqa: PLC0415  the other forms do without
+
+    view = View(width(), colour=coloured())
+    for number, frame in enumerate(read_frames(inputs, given, complaints)):
+        if number:
+            write("")
+        if frame.problem:
+            for line in view.unreadable(frame):
+                write(line)
+            continue
+        message = given.decode(frame)
+        for line in view.frame(frame, message):
+            write(line)
+        complaints.about_message(frame, message)
+
+
+def context(frame: Frame, message: Message, *, full: bool) -> dict[str, Any]:
+    """Return what stands beside a tree: time and note, and in full bits and what was assumed."""
+    beside: dict[str, Any] = {}
+    if frame.time is not None:
+        beside["time"] = frame.time
+    if frame.note:
+        beside["note"] = frame.note
+    if full:
+        beside["bits"] = frame.bits
+        if message.medium == "radio" and message.version_from == "assumed":
+            beside["assumed"] = ["version"]
+    return beside
+
+
+def _dump(tree: dict[str, Any], indent: int | None = None) -> str:
+    """Write a tree as JSON, a time that is a number with its own digits."""
+    time = tree.get("time")
+    if not isinstance(time, Decimal):
+        return json.dumps(tree, ensure_ascii=False, indent=indent)
+    text = json.dumps({**tree, "time": None}, ensure_ascii=False, indent=indent)
+    return text.replace('"time": null', f'"time": {time}', 1)
+
+
+def _jsonl(decoded: Decoded) -> None:
+    for frame, message in decoded:
+        write(_dump(context(frame, message, full=True) | message.tree()))
+
+
+def _json(decoded: Decoded) -> None:
+    """Write the tree of one frame, or the list of several."""
+    texts = (
+        _dump(context(frame, message, full=False) | message.tree(), indent=2)
+        for frame, message in decoded
+    )
+    first = next(texts, None)
+    if first is None:
+        return
+    second = next(texts, None)
+    if second is None:
+        write(first)
+        return
+    write(f"[\n{first}")
+    for text in chain((second,), texts):
+        write(f",\n{text}")
+    write("]")
+
+
+def _yaml(decoded: Decoded) -> None:
+    from fishplate_cli.yaml_output import dump  # noqa: PLC0415  loads PyYAML
+
+    for number, (frame, message) in enumerate(decoded):
+        if number:
+            write("---")
+        write(dump(context(frame, message, full=False) | message.tree()))
+
+
+WRITERS: dict[As, Callable[[Decoded], None]] = {
+    As.JSON: _json,
+    As.JSONL: _jsonl,
+    As.YAML: _yaml,
+}

@@ -1,0 +1,143 @@
+"""How codes, bits and whole frames are named in text."""
+
+from __future__ import annotations
+
+import json
+from functools import lru_cache
+from types import MappingProxyType
+from typing import TYPE_CHECKING, Any
+
+from fishplate.meaning import explain
+from fishplate.standard import registry
+from fishplate.versions import DEFAULT_VERSION, closest_layouts
+from fishplate_cli.console import visible
+
+if TYPE_CHECKING:
+    from fishplate.frames import FieldRow, Message
+    from fishplate.standard import Registry
+    from fishplate.standard.vocabulary import Variable
+
+WAYS = MappingProxyType({"to-train": "to train", "to-track": "to track"})
+IN_HEADING = MappingProxyType(
+    {
+        "radio": frozenset({"NID_MESSAGE", "L_MESSAGE"}),
+        "balise": frozenset({"M_VERSION", "Q_MEDIA", "N_PIG", "N_TOTAL", "NID_C", "NID_BG"}),
+        "loop": frozenset({"M_VERSION", "Q_MEDIA", "NID_C", "NID_LOOP"}),
+    }
+)
+"""Variables of the header that the heading of a frame says already."""
+
+CODED = frozenset({"special", "spare", "value"})
+SPARE = "!"
+SHOWN_HEX = 32
+POSITION_REPORTS = (0, 1)
+END_FLAG = 255
+
+
+def book_of(message: Message) -> Registry:
+    """Return the registry whose layouts read the message."""
+    return registry(closest_layouts(message.version) or DEFAULT_VERSION)
+
+
+@lru_cache(maxsize=4096)
+def said(variable: Variable, raw: int | str, scale: int | None = None) -> str:
+    """Say what a code means, with the code itself where the meaning hides it."""
+    if isinstance(raw, str):
+        return quoted(raw)
+    meaning = explain(variable, raw, scale)
+    text = meaning.text
+    if meaning.kind in CODED and variable.bits > 1 and "(" not in text:
+        text = f"{text} ({raw})"
+    return f"{SPARE} {text}" if meaning.kind == "spare" else text
+
+
+def quoted(text: str) -> str:
+    """Return a text in quotes, control characters as escapes."""
+    return visible(json.dumps(text, ensure_ascii=False))
+
+
+def unexplained(raw: str, bits: int) -> str:
+    """Say how many bits there are and what they hold, shortened."""
+    if not bits:
+        return "none"
+    value = int(raw, 16) >> -bits % 8
+    if value == 0:
+        return f"{bits} bits, all 0"
+    if value == (1 << bits) - 1:
+        return f"{bits} bits, all 1"
+    return f"{bits} bits, {raw[:SHOWN_HEX]}{'…' if len(raw) > SHOWN_HEX else ''}"
+
+
+def row_text(row: FieldRow, book: Registry) -> str:
+    """Say what one field row holds."""
+    if row.variable is None:
+        return unexplained(str(row.raw), row.width)
+    return said(book.variables[row.variable], row.raw, row.scale)
+
+
+def heading(message: Message, book: Registry) -> tuple[str, str]:
+    """Return what came which way, and what it is."""
+    way = WAYS.get(message.direction or "", "")
+    first = "  ".join(filter(None, (message.medium, way, f"{message.size} bits")))
+    version = ""
+    if message.version and message.medium:
+        assumed = " (assumed)" if message.version_from == "assumed" else ""
+        version = f"; system version {message.version}{assumed}"
+    return first, f"{_what(message, book)}{version}"
+
+
+def _what(message: Message, book: Registry) -> str:
+    header = message.header
+    match message.medium:
+        case "radio" if "NID_MESSAGE" in header:
+            number = header["NID_MESSAGE"]
+            return f"message {number}, {message_name(message, book)}"
+        case "balise" if header:
+            place = f"balise {header['N_PIG'] + 1} of {header['N_TOTAL'] + 1}"
+            return f"balise group {header['NID_C']}/{header['NID_BG']}, {place}"
+        case "loop" if header:
+            return f"loop {header['NID_C']}/{header['NID_LOOP']}"
+        case None:
+            return "not recognised"
+    return f"{message.medium}, header not readable"
+
+
+def message_name(message: Message, book: Registry) -> str:
+    """Return the name of a radio message."""
+    found = book.messages.get((message.direction or "", message.header.get("NID_MESSAGE", -1)))
+    return found.name if found else "not known"
+
+
+def in_heading(row: FieldRow, message: Message, book: Registry) -> bool:
+    """Tell whether the heading says a field of the header already; never for spare codes."""
+    if row.variable not in IN_HEADING.get(message.medium or "", ()):
+        return False
+    return not row_text(row, book).startswith(SPARE)
+
+
+def packet_title(packet: dict[str, Any], direction: str, book: Registry) -> str:
+    """Return number, name, validity direction and length of a packet."""
+    number = packet["NID_PACKET"]
+    found = book.packets.get((direction, number))
+    known = []
+    if "Q_DIR" in packet:
+        known.append(said(book.variables["Q_DIR"], packet["Q_DIR"]).partition(" (")[0])
+    if "L_PACKET" in packet:
+        known.append(f"{packet['L_PACKET']} bits")
+    name = found.name if found else "not known"
+    return f"packet {number}, {name}" + (f" ({', '.join(known)})" if known else "")
+
+
+def reference(message: Message, book: Registry) -> str:
+    """Return the identity a frame counts from: group, loop, last relevant group, or engine."""
+    header = message.header
+    if message.medium == "balise" and header:
+        return f"group {header['NID_C']}/{header['NID_BG']}"
+    if message.medium == "loop" and header:
+        return f"loop {header['NID_C']}/{header['NID_LOOP']}"
+    reports = (each for each in message.packets if each["NID_PACKET"] in POSITION_REPORTS)
+    report = next(reports, {}) if message.direction == "to-track" else {}
+    lrbg = header.get("NID_LRBG", report.get("NID_LRBG"))
+    if lrbg is not None:
+        return f"LRBG {said(book.variables['NID_LRBG'], lrbg).partition(' (')[0]}"
+    return f"engine {header['NID_ENGINE']}" if "NID_ENGINE" in header else "-"

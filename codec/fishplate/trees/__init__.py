@@ -1,0 +1,119 @@
+"""Trees as people write them: JSON, JSON Lines and YAML text to plain dicts and lists.
+
+Only what a tree can hold is read: mappings, lists, texts, whole numbers, true, false and null. In
+YAML everything else that is not quoted stays the text it is (``0049123``, ``yes``, ``1.5``). A
+key that stands twice is an error, since one of its values would be lost.
+"""
+
+from __future__ import annotations
+
+import json
+from typing import TYPE_CHECKING, Any, NamedTuple
+
+from fishplate.errors import EncodeError
+
+if TYPE_CHECKING:
+    from collections.abc import Iterable, Iterator
+
+CONTEXT = ("time", "note", "bits", "frame", "assumed", "source")
+"""Keys that may stand beside those of a tree: what is known about the frame, not its content."""
+
+
+class NumberText(str):
+    """A number with a fraction or an exponent, kept as it was written."""
+
+    __slots__ = ()
+
+
+class Authored(NamedTuple):
+    """One tree as it was written, or the reason why it cannot be read.
+
+    `document` counts trees from 1; `line` is where it begins, 0 where that is not known.
+    """
+
+    document: int
+    line: int
+    tree: Any
+    problem: EncodeError | None = None
+
+
+def split_context(tree: dict[str, Any]) -> tuple[dict[str, Any], dict[str, Any]]:
+    """Return what a tree says of its content, and what stands beside it."""
+    beside = {key: tree[key] for key in CONTEXT if key in tree}
+    return {key: value for key, value in tree.items() if key not in beside}, beside
+
+
+def parse_json(text: str) -> Any:
+    """Read JSON, numbers with a fraction as the text they are; raises `EncodeError`."""
+    try:
+        return json.loads(
+            text, object_pairs_hook=_unique, parse_float=NumberText, parse_constant=_constant
+        )
+    except json.JSONDecodeError as error:
+        place = f"line {error.lineno}, character {error.colno}"
+        raise EncodeError(f"not JSON: {error.msg} ({place})") from None
+    except (ValueError, RecursionError) as error:
+        raise EncodeError(f"not JSON: {error}") from None
+
+
+def read_json(text: str) -> Iterator[Authored]:
+    """Yield the tree of a JSON text, or each tree of a list."""
+    try:
+        found = parse_json(text)
+    except EncodeError as error:
+        yield Authored(1, 0, None, error)
+        return
+    trees = found if isinstance(found, list) else [found]
+    for number, tree in enumerate(trees, 1):
+        yield _checked(Authored(number, 0, tree))
+
+
+def read_json_lines(lines: Iterable[tuple[int, str, EncodeError | None]]) -> Iterator[Authored]:
+    """Yield one tree a line of ``(line number, text, problem)``; blank lines are passed over."""
+    document = 0
+    for line, text, problem in lines:
+        if problem is None and not text.strip():
+            continue
+        document += 1
+        if problem is not None:
+            yield Authored(document, line, None, problem)
+            continue
+        try:
+            yield _checked(Authored(document, line, parse_json(text)))
+        except EncodeError as error:
+            yield Authored(document, line, None, error)
+
+
+def read_yaml(text: str) -> Iterator[Authored]:
+    """Yield the trees of one or several YAML documents, each a tree or a list of trees."""
+    from fishplate.trees.yaml_text import yaml_documents  # noqa: PLC0415  loads PyYAML
+
+    number = 0
+    try:
+        for line, found in yaml_documents(text):
+            for tree in found if isinstance(found, list) else [found]:
+                number += 1
+                yield _checked(Authored(number, line, tree))
+    except EncodeError as error:
+        yield Authored(number + 1, 0, None, error)
+
+
+def _checked(authored: Authored) -> Authored:
+    if isinstance(authored.tree, dict):
+        return authored
+    kind = "nothing" if authored.tree is None else type(authored.tree).__name__
+    problem = EncodeError(f"expected a tree (a mapping), got {kind}", got=authored.tree)
+    return authored._replace(problem=problem)
+
+
+def _unique(pairs: list[tuple[str, Any]]) -> dict[str, Any]:
+    found = dict(pairs)
+    if len(found) != len(pairs):
+        names = [key for key, _ in pairs]
+        twice = next(key for key in names if names.count(key) > 1)
+        raise ValueError(f"key {twice!r} stands twice")
+    return found
+
+
+def _constant(name: str) -> None:
+    raise ValueError(f"{name} is not a JSON number")
