@@ -23,6 +23,7 @@ if TYPE_CHECKING:
 
 NIBBLE = 4
 BYTE = 8
+_BINARY = frozenset("01")
 _HEX = frozenset("0123456789abcdefABCDEF")
 _HEX_OF_BYTE = tuple(f"{octet:02X}" for octet in range(256))
 _BLOB_KEYS = frozenset({"bits", "hex"})
@@ -67,12 +68,14 @@ def _cut(value: int, width: int, size: int) -> tuple[int, int]:
 def read_text(text: str, *, whole_bytes: bool = True) -> tuple[int, int]:
     """Read a literal: hex digits with blanks and an optional ``0x``, ``0b...`` or ``base64:...``.
 
-    Raises `DecodeError` naming the first character that does not belong.
+    ``0b`` with anything but 0 and 1 behind it is hex that begins with the byte 0B. Raises
+    `DecodeError` naming the first character that does not belong.
     """
     text = text.strip()
-    if text[:2] in {"0b", "0B"}:
-        digits = _digits(text, 2, frozenset("01"), "a binary digit")
-        return int(digits or "0", 2), len(digits)
+    if text.startswith("0b"):
+        digits = "".join(text[2:].split())
+        if _BINARY.issuperset(digits):
+            return int(digits or "0", 2), len(digits)
     if text[:7].lower() == "base64:":
         try:
             octets = base64.b64decode("".join(text[7:].split()), validate=True)
@@ -80,7 +83,7 @@ def read_text(text: str, *, whole_bytes: bool = True) -> tuple[int, int]:
             raise DecodeError(f"not base64: {error}") from None
         return int.from_bytes(octets), len(octets) * BYTE
     start = 2 if text[:2] in {"0x", "0X"} else 0
-    digits = _digits(text, start, _HEX, "a hex digit")
+    digits = _hex_digits(text, start)
     if whole_bytes and len(digits) % 2:
         raise DecodeError(
             f"odd number of hex digits ({len(digits)}): half a byte is missing, "
@@ -90,12 +93,14 @@ def read_text(text: str, *, whole_bytes: bool = True) -> tuple[int, int]:
     return int(digits or "0", 16), len(digits) * NIBBLE
 
 
-def _digits(text: str, start: int, allowed: frozenset[str], what: str) -> str:
+def _hex_digits(text: str, start: int) -> str:
     digits = "".join(text[start:].split())
-    if not allowed.issuperset(digits):
+    if not _HEX.issuperset(digits):
         for index, character in enumerate(text[start:], start):
-            if character not in allowed and not character.isspace():
-                raise DecodeError(f"character {index + 1} of the text is {character!r}, not {what}")
+            if character not in _HEX and not character.isspace():
+                raise DecodeError(
+                    f"character {index + 1} of the text is {character!r}, not a hex digit"
+                )
     return digits
 
 
@@ -140,10 +145,11 @@ def read_blob(data: object, path: Path) -> tuple[int, int]:
             except ValueError:
                 octets = b""
             spare = len(octets) * BYTE - size
-            if 0 <= spare < BYTE:
-                return int.from_bytes(octets) >> spare, size
+            value = int.from_bytes(octets)
+            if 0 <= spare < BYTE and size >= 0 and not value & (1 << spare) - 1:
+                return value >> spare, size
     raise EncodeError(
-        'expected {"bits": n, "hex": "..."} with n bits in whole bytes of hex, left aligned',
+        'expected {"bits": n, "hex": "..."}: n bits in whole bytes of hex, left aligned',
         path=path,
         expected="bits and hex",
         got=data,

@@ -66,7 +66,7 @@ class Truncated(DecodeError):
     kind = "truncated"
 
     def __init__(
-        self, reason: str, *, missing: int, path: Path = (), bit: int | None = None
+        self, reason: str, *, missing: int = 0, path: Path = (), bit: int | None = None
     ) -> None:
         super().__init__(reason, path=path, bit=bit)
         self.missing = missing
@@ -77,7 +77,9 @@ class Unknown(DecodeError):
 
     kind = "unknown"
 
-    def __init__(self, reason: str, *, kind: str, path: Path = (), bit: int | None = None) -> None:
+    def __init__(
+        self, reason: str, *, kind: str = kind, path: Path = (), bit: int | None = None
+    ) -> None:
         super().__init__(reason, path=path, bit=bit)
         self.kind = kind
 

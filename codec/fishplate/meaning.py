@@ -63,6 +63,7 @@ NUMBER = re.compile(r"(?P<number>[+-]?\d+(?:\.\d+)?)\s*(?P<unit>.*)", re.DOTALL)
 IDENTITY = re.compile(r"(\d+)\s*/\s*(\d+)")
 VERSION = re.compile(r"(\d+)\.(\d+)")
 NO_BIT = "none"
+NO_DIGITS = "no digits"
 JOIN = " + "
 
 
@@ -86,12 +87,11 @@ def explain(variable: Variable, code: int | str, scale: int | None = None) -> Me
     found = _codes_of(variable, code)
     if variable.coding == "version":
         text = f"{code >> 4}.{code & 15}"
-        if found is None or found.kind == "value":
-            return Meaning(text, "identity")
-        kind: Kind = "spare" if found.kind == "spare" else "identity"
-        return Meaning(f"{text} ({found.label})", kind)
+        if found is not None and found.kind == "spare":
+            return Meaning(f"{text} ({found.label})", "spare")
+        return Meaning(text, "identity")
     if found is not None and found.kind != "range":
-        kind = "value" if found.kind == "value" else "special"
+        kind: Kind = "value" if found.kind == "value" else "special"
         return Meaning(found.label, "spare" if found.kind == "spare" else kind)
     if variable.coding == "group-identity":
         return Meaning(f"{code >> 14}/{code & 16383}", "identity")
@@ -136,7 +136,7 @@ def _explain_digits(variable: Variable, code: int) -> Meaning:
     found = _codes_of(variable, code)
     if found is not None:
         return Meaning(found.label, "spare" if found.kind == "spare" else "special")
-    return Meaning(f"{code:0{variable.bits // 4}X}".rstrip("F") or "no digits", "text")
+    return Meaning(f"{code:0{variable.bits // 4}X}".rstrip("F") or NO_DIGITS, "text")
 
 
 def _explain_bits(variable: Variable, code: int) -> Meaning:
@@ -251,12 +251,13 @@ def _by_label(variable: Variable, text: str) -> int | None:
 
 def _no_such_label(variable: Variable, text: str) -> str:
     labels = [label for label, _ in _labels(variable)]
+    form = "" if _only_labels(variable) or variable.coding == "bitset" else _form(variable)
     if not labels:
-        return f"{text!r} is not {_form(variable)}"
+        return f"{text!r} is not {form}"
     held = [each for each in labels if text.casefold() in each.casefold()]
     if len(held) > 1:
         return f"{text!r} may be {_listed(held)}"
-    return f"{text!r} is not one of {_listed(labels)}"
+    return f"{text!r} is not {form + ' or ' if form else ''}one of {_listed(labels)}"
 
 
 def _form(variable: Variable) -> str:
@@ -285,7 +286,7 @@ def _parse_digits(variable: Variable, given: object) -> str:
     labels = [each for each in variable.codes if each.label.casefold() == given.casefold()]
     if labels:
         return f"{labels[0].first:0{nibbles}X}".rstrip("F")
-    text = "".join(given.split()).upper()
+    text = "" if given == NO_DIGITS else "".join(given.split()).upper()
     if len(text) > nibbles or not re.fullmatch("[0-9A-F]*", text):
         raise _error(variable, given, f"{given!r} is not at most {nibbles} digits")
     return text

@@ -8,6 +8,8 @@ from importlib import import_module
 from types import MappingProxyType
 from typing import TYPE_CHECKING, Any
 
+from fishplate.errors import EncodeError
+
 if TYPE_CHECKING:
     from collections.abc import Callable, Mapping
 
@@ -21,7 +23,7 @@ class Misfit(ValueError):
     """A value does not fit its layout; the walk finds out which and why."""
 
 
-MISFITS = (Misfit, KeyError, TypeError, ValueError, IndexError, AttributeError)
+MISFITS = (EncodeError, KeyError, TypeError, ValueError, IndexError, AttributeError)
 """Everything a generated writer may raise on a tree that does not fit."""
 
 

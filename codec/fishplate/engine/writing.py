@@ -14,11 +14,8 @@ from fishplate.engine.branches import Unfolded, unfold
 from fishplate.engine.source import Source, chunks, condition_text, condition_variables
 from fishplate.standard.vocabulary import (
     COUNT,
-    Condition,
-    Eq,
     Field,
     Group,
-    Ne,
     Node,
     Opaque,
     Repeat,
@@ -42,8 +39,6 @@ class _Entry:
     variable: Variable
     expression: str
     local: str = ""
-    certain: bool = False
-    """True when a condition has already held the value to its range."""
 
 
 class WriterSource(Source):
@@ -168,6 +163,7 @@ class WriterSource(Source):
             rest = f"{items}[1:]"
         else:
             self.line(f"{count} = len({items})")
+            self._misfit(f"not {count} and not isinstance({items}, (list, tuple))")
         self.run.append(_Entry(self.variables[COUNT], count, count))
         self._flush()
         outer = self.width
@@ -215,14 +211,14 @@ class WriterSource(Source):
             bits = self.variables[name].bits
             self.line(f"if {condition_text(way.condition, self.scope[name], bits)}:")
             self.depth += 1
-            self._way(way.true, _made_certain(entries, way.condition), element)
+            self._way(way.true, entries, element)
             self.depth -= 1
             self.line("else:")
             self.depth += 1
             self._way(way.false, entries, element)
             self.depth -= 1
             return
-        checks = " | ".join(_check(each) for each in entries if not each.certain)
+        checks = " | ".join(_check(each) for each in entries)
         self._misfit(f"{checks} or len({element}) != {len(entries)}")
         width = sum(each.variable.bits for each in entries)
         self.line(f"{self.v} = {self.v} << {width}{_word(entries, width)}")
@@ -261,21 +257,6 @@ class WriterSource(Source):
             else:
                 self.line(f"{self.v} = {self.v} << {width}{word}")
             self.width += width
-
-
-def _made_certain(entries: Sequence[_Entry], condition: Condition) -> list[_Entry]:
-    """Return the entries as they are known where the condition holds."""
-    if isinstance(condition, Ne):
-        return list(entries)
-    made = []
-    for entry in entries:
-        if entry.variable.name != condition.variable:
-            made.append(entry)
-        elif isinstance(condition, Eq):
-            made.append(_Entry(entry.variable, str(condition.code), "", certain=True))
-        else:
-            made.append(_Entry(entry.variable, entry.expression, entry.local, certain=True))
-    return made
 
 
 def _looked_up(entry: _Entry) -> str:

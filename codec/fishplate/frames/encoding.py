@@ -116,7 +116,14 @@ class _Writer:
             return read_blob(tree["content"], ("content",))
         number: Any = header.get("NID_MESSAGE") if isinstance(header, dict) else None
         direction = tree.get("direction") or self._direction_of(number)
-        writer = self.codec.write_message.get(direction, {}).get(number)
+        if direction not in HEADS:
+            raise EncodeError(
+                f"expected {TO_TRAIN} or {TO_TRACK}, got {direction!r}",
+                path=("direction",),
+                expected=f"{TO_TRAIN} or {TO_TRACK}",
+                got=direction,
+            )
+        writer = self.codec.write_message[direction].get(number)
         if writer is None or ("content" in tree and not tree.get("packets")):
             self._start_only(header, direction)
         else:
@@ -238,14 +245,7 @@ class _Writer:
         packets = self.tree.get("packets", ())
         if not isinstance(packets, (list, tuple)):
             raise EncodeError("expected a list of packets", path=("packets",), got=packets)
-        writers = self.codec.write_packet.get(direction)
-        if writers is None:
-            raise EncodeError(
-                f"expected {TO_TRAIN} or {TO_TRACK}, got {direction!r}",
-                path=("direction",),
-                expected=f"{TO_TRAIN} or {TO_TRACK}",
-                got=direction,
-            )
+        writers = self.codec.write_packet[direction]
         unmeasured = self.codec.unmeasured[direction]
         head = HEADS[direction]
         number = None
@@ -254,13 +254,13 @@ class _Writer:
             try:
                 number = packet["NID_PACKET"]
                 part, width = writers[number](packet)
-                if number not in unmeasured:
-                    if packet.get("L_PACKET", width) != width or width > LONGEST_PACKET:
-                        part, width = self._odd_packet(packet, direction, index)
-                    else:
-                        part |= width << width - head
             except MISFITS:
                 part, width = self._odd_packet(packet, direction, index)
+            else:
+                if number not in unmeasured:
+                    part |= width << width - head
+                    if packet.get("L_PACKET", width) != width or width > LONGEST_PACKET:
+                        part, width = self._odd_packet(packet, direction, index)
             value = value << width | part
             size += width
         self.value, self.size = value, size

@@ -27,6 +27,10 @@ MESSAGE_START_BITS = 18
 KEYS = frozenset({"medium", "direction", "version", "issue", "header", "packets", "padding"})
 
 
+OCTETS = {f"{octet:02X}": octet for octet in range(256)}
+"""What the hex of a padding may be: less than a byte, left aligned."""
+
+
 class _Way(NamedTuple):
     """All that reading or writing one kind of message needs."""
 
@@ -118,10 +122,10 @@ def write_radio(tree: Tree) -> tuple[int, int] | None:
         value <<= spare
         size += spare
         if "padding" in tree:
-            padding = tree["padding"]
-            if padding["bits"] != spare or len(padding["hex"]) != 2 or len(padding) != 2:  # noqa: PLR2004
+            padding = OCTETS[tree["padding"]["hex"]]
+            if tree["padding"] != blob(padding >> 8 - spare, spare):
                 return None
-            value |= int(padding["hex"], 16) >> 8 - spare
+            value |= padding >> 8 - spare
         length = size >> 3
         if length > LONGEST_MESSAGE or header.get("L_MESSAGE", length) != length:
             return None

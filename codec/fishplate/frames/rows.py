@@ -14,7 +14,7 @@ from fishplate.frames.decoding import decode
 from fishplate.frames.reader import HEADS
 from fishplate.meaning import explain
 from fishplate.standard import Registry, registry
-from fishplate.standard.vocabulary import TO_TRAIN, Field
+from fishplate.standard.vocabulary import TO_TRAIN, Field, Opaque
 from fishplate.versions import DEFAULT_VERSION, closest_layouts
 
 if TYPE_CHECKING:
@@ -177,7 +177,7 @@ class _Frame:
         known = self.registry.packets.get((self._direction, packet["NID_PACKET"]))
         width = HEADS[self._direction] + packet["content"]["bits"]
         inner = self._cursor(cursor.position, width)
-        self._until_it_ends(inner, known.nodes if known else self._head_nodes(), path)
+        self._until_it_ends(inner, _explained(known.nodes) if known else self._head_nodes(), path)
         self._walk(inner).unexplained(inner.left, (*path, "content"))
         cursor.rows += inner.rows
         cursor.position += inner.position
@@ -198,7 +198,7 @@ class _Frame:
                 cursor.rows.pop()
                 return
             if known:
-                nodes = known.nodes
+                nodes = _explained(known.nodes)
                 width = min(width, max(packets[index]["L_PACKET"], HEADS[self._direction]))
         inner = self._cursor(cursor.position, width)
         self._until_it_ends(inner, nodes, path)
@@ -210,3 +210,8 @@ class _Frame:
         except Truncated:
             # The trouble itself is raised by the caller, after the rows read so far.
             return
+
+
+def _explained(nodes: Sequence[Node]) -> list[Node]:
+    """Return a layout without the part that nothing explains: cut, it is no field of its own."""
+    return [each for each in nodes if not isinstance(each, Opaque)]

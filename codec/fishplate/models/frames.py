@@ -9,6 +9,7 @@ from pydantic import BeforeValidator, ValidationError, create_model
 
 from fishplate.errors import EncodeError, Path
 from fishplate.frames.decoding import FIRST_TO_TRACK
+from fishplate.frames.encoding import KEYS
 from fishplate.models.schema import (
     content_packet_schema,
     message_schema,
@@ -146,7 +147,9 @@ def _model_for(tree: dict[str, Any]) -> type[Scope]:
     version = closest_layouts(str(tree.get("version", DEFAULT_VERSION))) or DEFAULT_VERSION
     header = tree.get("header")
     if not isinstance(header, dict):
-        raise EncodeError("expected the header as a mapping", path=("header",), got=header)
+        found = [f"; {each} is not part of a tree" for each in tree if each not in KEYS]
+        reason = "expected the header as a mapping" + "".join(found)
+        raise EncodeError(reason, path=("header",), got=header)
     medium = tree.get("medium")
     if medium == "loop" or (medium is None and "NID_LOOP" in header):
         return loop_model(version)

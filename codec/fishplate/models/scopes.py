@@ -12,7 +12,6 @@ from difflib import get_close_matches
 from functools import partial
 from typing import TYPE_CHECKING, Annotated, Any, ClassVar
 
-from annotated_types import Len
 from pydantic import (
     BaseModel,
     BeforeValidator,
@@ -22,6 +21,7 @@ from pydantic import (
     create_model,
     model_validator,
 )
+from pydantic import Field as Limits
 from pydantic_core import InitErrorDetails, PydanticCustomError
 
 from fishplate.bits import read_blob
@@ -261,7 +261,7 @@ def _types(registry: Registry, nodes: Sequence[Node], name: str) -> Iterator[tup
                 first = 1 if isinstance(node, Series) else 0
                 most = first + (1 << registry.variables[COUNT].bits) - 1
                 element = scope_model(registry, node.nodes, f"{name}_{node.name}")
-                yield node.name, Annotated[list[element], Len(first, most)]  # type: ignore[valid-type]
+                yield node.name, Annotated[list[element], Limits(min_length=first, max_length=most)]  # type: ignore[valid-type]
             case Text():
                 yield node.element, _text_type(registry.variables[node.length])
             case Opaque():

@@ -9,6 +9,7 @@ from fishplate.errors import Path, RegistryError
 from fishplate.standard.vocabulary import (
     COUNT,
     SCALED,
+    UNITS,
     Declarations,
     Direction,
     Eq,
@@ -88,6 +89,8 @@ def _check_variable(variable: Variable) -> None:
         )
     if variable.coding == "digits" and variable.bits % NIBBLE:
         raise RegistryError(f"width mismatch: digits do not fill {variable.bits} bits", path=path)
+    if variable.unit not in UNITS:
+        raise RegistryError(f"unit {variable.unit!r} is none of the vocabulary", path=path)
     if variable.resolution == SCALED:
         if variable.unit != "m":
             raise RegistryError("a scaled variable is in metres", path=path)
@@ -101,7 +104,7 @@ def _check_resolution(text: str, path: Path) -> None:
         step = Decimal(text)
     except InvalidOperation:
         raise RegistryError(f"resolution {text!r} is not a decimal number", path=path) from None
-    if step <= 0:
+    if not step.is_finite() or step <= 0:
         raise RegistryError(f"resolution {text} is not positive", path=path)
 
 
@@ -155,10 +158,13 @@ class _Layout:
                     read[node.variable] = self._field(node, path, read)
                 case When():
                     self._condition(node.condition, path, read)
-                    self._scope(node.nodes, path, read, keys, last_in_packet=last)
+                    # What is read under a condition may be absent behind it.
+                    self._scope(node.nodes, path, dict(read), keys, last_in_packet=last)
                 case Group() | Series() | Repeat():
                     self._key(node.name, path, keys)
                     inner = (*path, node.name)
+                    if not _begins_with_field(node):
+                        raise RegistryError("a set begins with a field", path=inner)
                     self._scope(node.nodes, inner, dict(read), set(), last_in_packet=False)
                 case Text():
                     self._key(node.element, path, keys)
@@ -196,6 +202,8 @@ class _Layout:
             )
         codes = condition.codes if isinstance(condition, In) else (condition.code,)
         bits = read[condition.variable].bits
+        if not codes:
+            raise RegistryError(f"condition on no code of {condition.variable}", path=path)
         for code in codes:
             if code < 0 or code >> bits:
                 raise RegistryError(
@@ -209,6 +217,10 @@ class _Layout:
             raise RegistryError(f"{node.element} is not a text character", path=path)
 
 
+def _begins_with_field(node: Group | Series | Repeat) -> bool:
+    return not isinstance(node.nodes[0], (When, Series, Repeat, Text)) if node.nodes else True
+
+
 def _heads_with(nodes: Sequence[Node], names: Sequence[str]) -> bool:
     start = nodes[: len(names)]
     return [each.name if isinstance(each, Field) else "" for each in start] == list(names)
@@ -217,12 +229,18 @@ def _heads_with(nodes: Sequence[Node], names: Sequence[str]) -> bool:
 def _check_packet(packet: Packet, variables: dict[str, Variable]) -> None:
     path: Path = (f"{packet.direction} packet {packet.number}",)
     _Layout(variables).check(packet.nodes, path, {})
-    if not 0 <= packet.number < 1 << variables["NID_PACKET"].bits:
-        raise RegistryError("width mismatch: the number does not fit NID_PACKET", path=path)
+    _check_number(packet.number, variables["NID_PACKET"], path)
     measured = any(isinstance(each, Field) and each.name == "L_PACKET" for each in packet.nodes)
     heads = PACKET_HEADS if measured else (("NID_PACKET",),)
+    if not measured and not all(isinstance(each, Field) for each in packet.nodes):
+        raise RegistryError("without L_PACKET, only fixed variables may stand here", path=path)
     if not any(_heads_with(packet.nodes, head) for head in heads):
         raise RegistryError("a packet begins with NID_PACKET, [Q_DIR,] L_PACKET", path=path)
+
+
+def _check_number(number: int, variable: Variable, path: Path) -> None:
+    if not 0 <= number < 1 << variable.bits:
+        raise RegistryError(f"width mismatch: the number does not fit {variable.name}", path=path)
 
 
 def _check_message(
@@ -230,6 +248,7 @@ def _check_message(
 ) -> None:
     path: Path = (f"{message.direction} message {message.number}",)
     _Layout(variables).check(message.nodes, path, {})
+    _check_number(message.number, variables["NID_MESSAGE"], path)
     if not _heads_with(message.nodes, MESSAGE_HEAD):
         raise RegistryError("a message begins with NID_MESSAGE, L_MESSAGE", path=path)
     _only_fields(message.nodes, path)

@@ -22,6 +22,11 @@ CodeKind = Literal["value", "special", "spare", "bit", "spare_bit", "range"]
 without meaning, ``bit`` and ``spare_bit`` the weight of one bit of a bit set, ``range`` a note
 on codes that are plain numbers."""
 
+UNITS: Final = frozenset(
+    {"", "A", "bit", "byte", "character", "day", "km/h", "m", "m/s2", "permille", "s"}
+)
+"""The units a variable may be declared in; metres per second squared is ``m/s2``."""
+
 SCALED: Final = "scale"
 """The resolution of a distance whose step is set by the governing Q_SCALE (0.1, 1 or 10 m)."""
 

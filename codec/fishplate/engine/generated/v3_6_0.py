@@ -540,9 +540,12 @@ def write_to_train_5(t: Tree) -> tuple[int, int]:
             x13 = e0["Q_LINKORIENTATION"]
             x14 = e0["Q_LINKREACTION"]
             x15 = e0["Q_LOCACC"]
-            if x9 >> 15 | x11 >> 10 | x12 >> 14 | x13 >> 1 | x14 >> 2 | x15 >> 6 or len(e0) != 7:
+            if (
+                x9 >> 15 | x10 >> 1 | x11 >> 10 | x12 >> 14 | x13 >> 1 | x14 >> 2 | x15 >> 6
+                or len(e0) != 7
+            ):
                 raise Misfit
-            v = v << 49 | x9 << 34 | 1 << 33 | x11 << 23 | x12 << 9 | x13 << 8 | x14 << 6 | x15
+            v = v << 49 | x9 << 34 | x10 << 33 | x11 << 23 | x12 << 9 | x13 << 8 | x14 << 6 | x15
             b += 49
         else:
             x16 = e0["NID_BG"]
@@ -683,6 +686,8 @@ def write_to_train_12(t: Tree) -> tuple[int, int]:
     k0 = 12
     s0 = t["sections"]
     c0 = len(s0)
+    if not c0 and not isinstance(s0, (list, tuple)):
+        raise Misfit
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
     x2 = t["V_MAIN"]
@@ -697,9 +702,9 @@ def write_to_train_12(t: Tree) -> tuple[int, int]:
         if x6:
             x7 = e0["T_SECTIONTIMER"]
             x8 = e0["D_SECTIONTIMERSTOPLOC"]
-            if x5 >> 15 | x7 >> 10 | x8 >> 15 or len(e0) != 4:
+            if x5 >> 15 | x6 >> 1 | x7 >> 10 | x8 >> 15 or len(e0) != 4:
                 raise Misfit
-            v = v << 41 | x5 << 26 | 1 << 25 | x7 << 15 | x8
+            v = v << 41 | x5 << 26 | x6 << 25 | x7 << 15 | x8
             b += 41
         else:
             if x5 >> 15 | x6 >> 1 or len(e0) != 2:
@@ -864,9 +869,9 @@ def write_to_train_13(t: Tree) -> tuple[int, int]:
             x10 = e0["NID_C"]
             x11 = e0["NID_BG"]
             x12 = e0["D_SR"]
-            if x10 >> 10 | x11 >> 14 | x12 >> 15 or len(e0) != 4:
+            if x9 >> 1 | x10 >> 10 | x11 >> 14 | x12 >> 15 or len(e0) != 4:
                 raise Misfit
-            v = v << 40 | 1 << 39 | x10 << 29 | x11 << 15 | x12
+            v = v << 40 | x9 << 39 | x10 << 29 | x11 << 15 | x12
             b += 40
         else:
             x13 = e0["NID_BG"]
@@ -962,6 +967,8 @@ def write_to_train_15(t: Tree) -> tuple[int, int]:
     k0 = 11
     s0 = t["sections"]
     c0 = len(s0)
+    if not c0 and not isinstance(s0, (list, tuple)):
+        raise Misfit
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
     x2 = t["V_EMA"]
@@ -975,9 +982,9 @@ def write_to_train_15(t: Tree) -> tuple[int, int]:
         if x5:
             x6 = e0["T_SECTIONTIMER"]
             x7 = e0["D_SECTIONTIMERSTOPLOC"]
-            if x4 >> 15 | x6 >> 10 | x7 >> 15 or len(e0) != 4:
+            if x4 >> 15 | x5 >> 1 | x6 >> 10 | x7 >> 15 or len(e0) != 4:
                 raise Misfit
-            v = v << 41 | x4 << 26 | 1 << 25 | x6 << 15 | x7
+            v = v << 41 | x4 << 26 | x5 << 25 | x6 << 15 | x7
             b += 41
         else:
             if x4 >> 15 | x5 >> 1 or len(e0) != 2:
@@ -1185,6 +1192,8 @@ def write_to_train_27(t: Tree) -> tuple[int, int]:
     e0 = s0[0]
     s1 = e0["categories"]
     c1 = len(s1)
+    if not c1 and not isinstance(s1, (list, tuple)):
+        raise Misfit
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
     x2 = e0["D_STATIC"]
@@ -1198,15 +1207,15 @@ def write_to_train_27(t: Tree) -> tuple[int, int]:
         if x5 == 0:
             x6 = e1["NC_CDDIFF"]
             x7 = e1["V_DIFF"]
-            if x6 >> 4 | x7 >> 7 or len(e1) != 3:
+            if x5 >> 2 | x6 >> 4 | x7 >> 7 or len(e1) != 3:
                 raise Misfit
-            v = v << 13 | x6 << 7 | x7
+            v = v << 13 | x5 << 11 | x6 << 7 | x7
             b += 13
         else:
             if 1 <= x5 <= 2:
                 x8 = e1["NC_DIFF"]
                 x9 = e1["V_DIFF"]
-                if x8 >> 4 | x9 >> 7 or len(e1) != 3:
+                if x5 >> 2 | x8 >> 4 | x9 >> 7 or len(e1) != 3:
                     raise Misfit
                 v = v << 13 | x5 << 11 | x8 << 7 | x9
                 b += 13
@@ -1225,6 +1234,8 @@ def write_to_train_27(t: Tree) -> tuple[int, int]:
         b0 = 0
         s2 = e0["categories"]
         c2 = len(s2)
+        if not c2 and not isinstance(s2, (list, tuple)):
+            raise Misfit
         x11 = e0["D_STATIC"]
         x12 = e0["V_STATIC"]
         x13 = e0["Q_FRONT"]
@@ -1236,15 +1247,15 @@ def write_to_train_27(t: Tree) -> tuple[int, int]:
             if x14 == 0:
                 x15 = e2["NC_CDDIFF"]
                 x16 = e2["V_DIFF"]
-                if x15 >> 4 | x16 >> 7 or len(e2) != 3:
+                if x14 >> 2 | x15 >> 4 | x16 >> 7 or len(e2) != 3:
                     raise Misfit
-                v0 = v0 << 13 | x15 << 7 | x16
+                v0 = v0 << 13 | x14 << 11 | x15 << 7 | x16
                 b0 += 13
             else:
                 if 1 <= x14 <= 2:
                     x17 = e2["NC_DIFF"]
                     x18 = e2["V_DIFF"]
-                    if x17 >> 4 | x18 >> 7 or len(e2) != 3:
+                    if x14 >> 2 | x17 >> 4 | x18 >> 7 or len(e2) != 3:
                         raise Misfit
                     v0 = v0 << 13 | x14 << 11 | x17 << 7 | x18
                     b0 += 13
@@ -1404,9 +1415,9 @@ def write_to_train_41(t: Tree) -> tuple[int, int]:
         if x6 == 1:
             x7 = e0["NID_NTC"]
             x8 = e0["L_ACKLEVELTR"]
-            if x7 >> 8 | x8 >> 15 or len(e0) != 3:
+            if x6 >> 3 | x7 >> 8 | x8 >> 15 or len(e0) != 3:
                 raise Misfit
-            v = v << 26 | 1 << 23 | x7 << 15 | x8
+            v = v << 26 | x6 << 23 | x7 << 15 | x8
             b += 26
         else:
             x9 = e0["L_ACKLEVELTR"]
@@ -1580,9 +1591,9 @@ def write_to_train_46(t: Tree) -> tuple[int, int]:
         x3 = e0["M_LEVELTR"]
         if x3 == 1:
             x4 = e0["NID_NTC"]
-            if x4 >> 8 or len(e0) != 2:
+            if x3 >> 3 | x4 >> 8 or len(e0) != 2:
                 raise Misfit
-            v = v << 11 | 1 << 8 | x4
+            v = v << 11 | x3 << 8 | x4
             b += 11
         else:
             if x3 >> 3 or len(e0) != 1:
@@ -1621,6 +1632,8 @@ def write_to_train_49(t: Tree) -> tuple[int, int]:
     b = 0
     s0 = t["groups"]
     c0 = len(s0)
+    if not c0 and not isinstance(s0, (list, tuple)):
+        raise Misfit
     x0 = t["Q_DIR"]
     if x0 >> 2 | c0 >> 5:
         raise Misfit
@@ -1630,9 +1643,9 @@ def write_to_train_49(t: Tree) -> tuple[int, int]:
         if x1:
             x2 = e0["NID_C"]
             x3 = e0["NID_BG"]
-            if x2 >> 10 | x3 >> 14 or len(e0) != 3:
+            if x1 >> 1 | x2 >> 10 | x3 >> 14 or len(e0) != 3:
                 raise Misfit
-            v = v << 25 | 1 << 24 | x2 << 14 | x3
+            v = v << 25 | x1 << 24 | x2 << 14 | x3
             b += 25
         else:
             x4 = e0["NID_BG"]
@@ -1721,6 +1734,8 @@ def write_to_train_51(t: Tree) -> tuple[int, int]:
         e0 = s0[0]
         s1 = e0["categories"]
         c1 = len(s1)
+        if not c1 and not isinstance(s1, (list, tuple)):
+            raise Misfit
         x4 = e0["D_AXLELOAD"]
         x5 = e0["L_AXLELOAD"]
         x6 = e0["Q_FRONT"]
@@ -1743,6 +1758,8 @@ def write_to_train_51(t: Tree) -> tuple[int, int]:
             b0 = 0
             s2 = e0["categories"]
             c2 = len(s2)
+            if not c2 and not isinstance(s2, (list, tuple)):
+                raise Misfit
             x9 = e0["D_AXLELOAD"]
             x10 = e0["L_AXLELOAD"]
             x11 = e0["Q_FRONT"]
@@ -1912,6 +1929,8 @@ def write_to_train_58(t: Tree) -> tuple[int, int]:
     b = 0
     s0 = t["locations"]
     c0 = len(s0)
+    if not c0 and not isinstance(s0, (list, tuple)):
+        raise Misfit
     x0 = t["Q_DIR"]
     x1 = t["Q_SCALE"]
     x2 = t["T_CYCLOC"]
@@ -1959,6 +1978,8 @@ def write_to_train_63(t: Tree) -> tuple[int, int]:
     b = 0
     s0 = t["groups"]
     c0 = len(s0)
+    if not c0 and not isinstance(s0, (list, tuple)):
+        raise Misfit
     x0 = t["Q_DIR"]
     if x0 >> 2 | c0 >> 5:
         raise Misfit
@@ -1968,9 +1989,9 @@ def write_to_train_63(t: Tree) -> tuple[int, int]:
         if x1:
             x2 = e0["NID_C"]
             x3 = e0["NID_BG"]
-            if x2 >> 10 | x3 >> 14 or len(e0) != 3:
+            if x1 >> 1 | x2 >> 10 | x3 >> 14 or len(e0) != 3:
                 raise Misfit
-            v = v << 25 | 1 << 24 | x2 << 14 | x3
+            v = v << 25 | x1 << 24 | x2 << 14 | x3
             b += 25
         else:
             x4 = e0["NID_BG"]
@@ -2404,30 +2425,30 @@ def write_to_train_70(t: Tree) -> tuple[int, int]:
             x11 = e0["Q_SUITABILITY"]
             if x11 == 0:
                 x12 = e0["M_LINEGAUGE"]
-                if x10 >> 15 | x12 >> 8 or len(e0) != 3:
+                if x10 >> 15 | x11 >> 2 | x12 >> 8 or len(e0) != 3:
                     raise Misfit
-                v = v << 25 | x10 << 10 | x12
+                v = v << 25 | x10 << 10 | x11 << 8 | x12
                 b += 25
             else:
                 if x11 == 1:
                     x13 = e0["M_AXLELOADCAT"]
-                    if x10 >> 15 | x13 >> 7 or len(e0) != 3:
+                    if x10 >> 15 | x11 >> 2 | x13 >> 7 or len(e0) != 3:
                         raise Misfit
-                    v = v << 24 | x10 << 9 | 1 << 7 | x13
+                    v = v << 24 | x10 << 9 | x11 << 7 | x13
                     b += 24
                 else:
                     if x11 == 2:
                         x14 = e0["M_VOLTAGE"]
                         if x14:
                             x15 = e0["NID_CTRACTION"]
-                            if x10 >> 15 | x14 >> 4 | x15 >> 10 or len(e0) != 4:
+                            if x10 >> 15 | x11 >> 2 | x14 >> 4 | x15 >> 10 or len(e0) != 4:
                                 raise Misfit
-                            v = v << 31 | x10 << 16 | 2 << 14 | x14 << 10 | x15
+                            v = v << 31 | x10 << 16 | x11 << 14 | x14 << 10 | x15
                             b += 31
                         else:
-                            if x10 >> 15 | x14 >> 4 or len(e0) != 3:
+                            if x10 >> 15 | x11 >> 2 | x14 >> 4 or len(e0) != 3:
                                 raise Misfit
-                            v = v << 21 | x10 << 6 | 2 << 4 | x14
+                            v = v << 21 | x10 << 6 | x11 << 4 | x14
                             b += 21
                     else:
                         if x10 >> 15 | x11 >> 2 or len(e0) != 2:
@@ -3779,6 +3800,8 @@ def write_to_track_11(t: Tree) -> tuple[int, int]:
     b = 0
     s0 = t["tractions"]
     c0 = len(s0)
+    if not c0 and not isinstance(s0, (list, tuple)):
+        raise Misfit
     x0 = t["NC_CDTRAIN"]
     x1 = t["NC_TRAIN"]
     x2 = t["L_TRAIN"]
@@ -3808,6 +3831,8 @@ def write_to_track_11(t: Tree) -> tuple[int, int]:
             b += 4
     s1 = t["national_systems"]
     c1 = len(s1)
+    if not c1 and not isinstance(s1, (list, tuple)):
+        raise Misfit
     if c1 >> 5:
         raise Misfit
     v = v << 5 | c1
