@@ -50,14 +50,7 @@ def read_to_train_3(n: int, p: int) -> tuple[Tree, int]:
     c0 = w0 & 31
     e0: Tree = {"NID_C": w0 >> 5 & 1023}
     s0: list[Tree] = [e0]
-    t0: Tree = {
-        "NID_PACKET": 3,
-        "Q_DIR": w0 >> 45 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 30 & 3,
-        "D_VALIDNV": w0 >> 15 & 32767,
-        "countries": s0,
-    }
+    t0: Tree = {"NID_PACKET": 3, "Q_DIR": w0 >> 45 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 30 & 3, "D_VALIDNV": w0 >> 15 & 32767, "countries": s0}
     for p in range(p - 10, p - 10 * c0 - 1, -10):
         w = n >> p & 1023
         s0.append({"NID_C": w})
@@ -212,32 +205,9 @@ def write_to_train_3(t: Tree) -> tuple[int, int]:
     x12 = t["Q_NVSBTSMPERM"]
     x13 = t["Q_NVEMRRLS"]
     x14 = t["Q_NVGUIPERM"]
-    if (
-        x5 >> 7
-        | x6 >> 7
-        | x7 >> 7
-        | x8 >> 7
-        | x9 >> 7
-        | x10 >> 7
-        | x11 >> 15
-        | x12 >> 1
-        | x13 >> 1
-        | x14 >> 1
-    ):
+    if x5 >> 7 | x6 >> 7 | x7 >> 7 | x8 >> 7 | x9 >> 7 | x10 >> 7 | x11 >> 15 | x12 >> 1 | x13 >> 1 | x14 >> 1:
         raise Misfit
-    v = (
-        v << 60
-        | x5 << 53
-        | x6 << 46
-        | x7 << 39
-        | x8 << 32
-        | x9 << 25
-        | x10 << 18
-        | x11 << 3
-        | x12 << 2
-        | x13 << 1
-        | x14
-    )
+    v = v << 60 | x5 << 53 | x6 << 46 | x7 << 39 | x8 << 32 | x9 << 25 | x10 << 18 | x11 << 3 | x12 << 2 | x13 << 1 | x14
     x15 = t["Q_NVSBFBPERM"]
     x16 = t["Q_NVINHSMICPERM"]
     x17 = t["V_NVALLOWOVTRP"]
@@ -248,17 +218,7 @@ def write_to_train_3(t: Tree) -> tuple[int, int]:
     x22 = t["M_NVCONTACT"]
     if x15 >> 1 | x16 >> 1 | x17 >> 7 | x18 >> 7 | x19 >> 15 | x20 >> 8 | x21 >> 15 | x22 >> 2:
         raise Misfit
-    v = (
-        v << 56
-        | x15 << 55
-        | x16 << 54
-        | x17 << 47
-        | x18 << 40
-        | x19 << 25
-        | x20 << 17
-        | x21 << 2
-        | x22
-    )
+    v = v << 56 | x15 << 55 | x16 << 54 | x17 << 47 | x18 << 40 | x19 << 25 | x20 << 17 | x21 << 2 | x22
     x23 = t["T_NVCONTACT"]
     x24 = t["M_NVDERUN"]
     x25 = t["D_NVSTFF"]
@@ -270,34 +230,9 @@ def write_to_train_3(t: Tree) -> tuple[int, int]:
     x31 = t["M_NVAVADH"]
     x32 = t["M_NVEBCL"]
     x33 = t["Q_NVKINT"]
-    if (
-        x23 >> 8
-        | x24 >> 1
-        | x25 >> 15
-        | x26 >> 1
-        | x27 >> 6
-        | x28 >> 6
-        | x29 >> 6
-        | x30 >> 6
-        | x31 >> 5
-        | x32 >> 4
-        | x33 >> 1
-    ):
+    if x23 >> 8 | x24 >> 1 | x25 >> 15 | x26 >> 1 | x27 >> 6 | x28 >> 6 | x29 >> 6 | x30 >> 6 | x31 >> 5 | x32 >> 4 | x33 >> 1:
         raise Misfit
-    v = (
-        v << 59
-        | x23 << 51
-        | x24 << 50
-        | x25 << 35
-        | x26 << 34
-        | x27 << 28
-        | x28 << 22
-        | x29 << 16
-        | x30 << 10
-        | x31 << 5
-        | x32 << 1
-        | x33
-    )
+    v = v << 59 | x23 << 51 | x24 << 50 | x25 << 35 | x26 << 34 | x27 << 28 | x28 << 22 | x29 << 16 | x30 << 10 | x31 << 5 | x32 << 1 | x33
     if x33:
         s1 = t["kv_sets"]
         c1 = len(s1) - 1
@@ -474,29 +409,10 @@ def read_to_train_5(n: int, p: int) -> tuple[Tree, int]:
         w = n >> p - 49 & 562949953421311
         if w & 8589934592:
             p -= 49
-            s0.append(
-                {
-                    "D_LINK": w >> 34,
-                    "Q_NEWCOUNTRY": 1,
-                    "NID_C": w >> 23 & 1023,
-                    "NID_BG": w >> 9 & 16383,
-                    "Q_LINKORIENTATION": w >> 8 & 1,
-                    "Q_LINKREACTION": w >> 6 & 3,
-                    "Q_LOCACC": w & 63,
-                }
-            )
+            s0.append({"D_LINK": w >> 34, "Q_NEWCOUNTRY": 1, "NID_C": w >> 23 & 1023, "NID_BG": w >> 9 & 16383, "Q_LINKORIENTATION": w >> 8 & 1, "Q_LINKREACTION": w >> 6 & 3, "Q_LOCACC": w & 63})
         else:
             p -= 39
-            s0.append(
-                {
-                    "D_LINK": w >> 34,
-                    "Q_NEWCOUNTRY": 0,
-                    "NID_BG": w >> 19 & 16383,
-                    "Q_LINKORIENTATION": w >> 18 & 1,
-                    "Q_LINKREACTION": w >> 16 & 3,
-                    "Q_LOCACC": w >> 10 & 63,
-                }
-            )
+            s0.append({"D_LINK": w >> 34, "Q_NEWCOUNTRY": 0, "NID_BG": w >> 19 & 16383, "Q_LINKORIENTATION": w >> 18 & 1, "Q_LINKREACTION": w >> 16 & 3, "Q_LOCACC": w >> 10 & 63})
     if p < 60:
         raise Misfit
     return t0, p - 60
@@ -540,10 +456,7 @@ def write_to_train_5(t: Tree) -> tuple[int, int]:
             x13 = e0["Q_LINKORIENTATION"]
             x14 = e0["Q_LINKREACTION"]
             x15 = e0["Q_LOCACC"]
-            if (
-                x9 >> 15 | x10 >> 1 | x11 >> 10 | x12 >> 14 | x13 >> 1 | x14 >> 2 | x15 >> 6
-                or len(e0) != 7
-            ):
+            if x9 >> 15 | x10 >> 1 | x11 >> 10 | x12 >> 14 | x13 >> 1 | x14 >> 2 | x15 >> 6 or len(e0) != 7:
                 raise Misfit
             v = v << 49 | x9 << 34 | x10 << 33 | x11 << 23 | x12 << 9 | x13 << 8 | x14 << 6 | x15
             b += 49
@@ -566,14 +479,7 @@ def read_to_train_6(n: int, p: int) -> tuple[Tree, int]:
     p -= 40
     w0 = n >> p & 1099511627775
     q0 = w0 >> 16 & 1
-    t0: Tree = {
-        "NID_PACKET": 6,
-        "Q_DIR": w0 >> 30 & 3,
-        "L_PACKET": length,
-        "Q_VBCO": q0,
-        "NID_VBCMK": w0 >> 10 & 63,
-        "NID_C": w0 & 1023,
-    }
+    t0: Tree = {"NID_PACKET": 6, "Q_DIR": w0 >> 30 & 3, "L_PACKET": length, "Q_VBCO": q0, "NID_VBCMK": w0 >> 10 & 63, "NID_C": w0 & 1023}
     if q0:
         p -= 8
         w1 = n >> p & 255
@@ -611,29 +517,13 @@ def read_to_train_12(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 18014398509481983
     c0 = w0 & 31
     s0: list[Tree] = []
-    t0: Tree = {
-        "NID_PACKET": 12,
-        "Q_DIR": w0 >> 44 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 29 & 3,
-        "V_MAIN": w0 >> 22 & 127,
-        "V_EMA": w0 >> 15 & 127,
-        "T_EMA": w0 >> 5 & 1023,
-        "sections": s0,
-    }
+    t0: Tree = {"NID_PACKET": 12, "Q_DIR": w0 >> 44 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 29 & 3, "V_MAIN": w0 >> 22 & 127, "V_EMA": w0 >> 15 & 127, "T_EMA": w0 >> 5 & 1023, "sections": s0}
     while c0:
         c0 -= 1
         w = n >> p - 41 & 2199023255551
         if w & 33554432:
             p -= 41
-            s0.append(
-                {
-                    "L_SECTION": w >> 26,
-                    "Q_SECTIONTIMER": 1,
-                    "T_SECTIONTIMER": w >> 15 & 1023,
-                    "D_SECTIONTIMERSTOPLOC": w & 32767,
-                }
-            )
+            s0.append({"L_SECTION": w >> 26, "Q_SECTIONTIMER": 1, "T_SECTIONTIMER": w >> 15 & 1023, "D_SECTIONTIMERSTOPLOC": w & 32767})
         else:
             p -= 16
             s0.append({"L_SECTION": w >> 26, "Q_SECTIONTIMER": 0})
@@ -774,13 +664,7 @@ def read_to_train_13(n: int, p: int) -> tuple[Tree, int]:
     p -= 26
     w0 = n >> p & 67108863
     q0 = w0 & 1
-    t0: Tree = {
-        "NID_PACKET": 13,
-        "Q_DIR": w0 >> 16 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 1 & 3,
-        "Q_NEWCOUNTRY": q0,
-    }
+    t0: Tree = {"NID_PACKET": 13, "Q_DIR": w0 >> 16 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 1 & 3, "Q_NEWCOUNTRY": q0}
     if q0:
         p -= 10
         w1 = n >> p & 1023
@@ -808,14 +692,7 @@ def read_to_train_13(n: int, p: int) -> tuple[Tree, int]:
         w = n >> p - 40 & 1099511627775
         if w & 549755813888:
             p -= 40
-            s0.append(
-                {
-                    "Q_NEWCOUNTRY": 1,
-                    "NID_C": w >> 29 & 1023,
-                    "NID_BG": w >> 15 & 16383,
-                    "D_SR": w & 32767,
-                }
-            )
+            s0.append({"Q_NEWCOUNTRY": 1, "NID_C": w >> 29 & 1023, "NID_BG": w >> 15 & 16383, "D_SR": w & 32767})
         else:
             p -= 30
             s0.append({"Q_NEWCOUNTRY": 0, "NID_BG": w >> 25 & 16383, "D_SR": w >> 10 & 32767})
@@ -893,28 +770,13 @@ def read_to_train_15(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 140737488355327
     c0 = w0 & 31
     s0: list[Tree] = []
-    t0: Tree = {
-        "NID_PACKET": 15,
-        "Q_DIR": w0 >> 37 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 22 & 3,
-        "V_EMA": w0 >> 15 & 127,
-        "T_EMA": w0 >> 5 & 1023,
-        "sections": s0,
-    }
+    t0: Tree = {"NID_PACKET": 15, "Q_DIR": w0 >> 37 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 22 & 3, "V_EMA": w0 >> 15 & 127, "T_EMA": w0 >> 5 & 1023, "sections": s0}
     while c0:
         c0 -= 1
         w = n >> p - 41 & 2199023255551
         if w & 33554432:
             p -= 41
-            s0.append(
-                {
-                    "L_SECTION": w >> 26,
-                    "Q_SECTIONTIMER": 1,
-                    "T_SECTIONTIMER": w >> 15 & 1023,
-                    "D_SECTIONTIMERSTOPLOC": w & 32767,
-                }
-            )
+            s0.append({"L_SECTION": w >> 26, "Q_SECTIONTIMER": 1, "T_SECTIONTIMER": w >> 15 & 1023, "D_SECTIONTIMERSTOPLOC": w & 32767})
         else:
             p -= 16
             s0.append({"L_SECTION": w >> 26, "Q_SECTIONTIMER": 0})
@@ -1051,13 +913,7 @@ def read_to_train_16(n: int, p: int) -> tuple[Tree, int]:
     length = p
     p -= 40
     w0 = n >> p & 1099511627775
-    t0: Tree = {
-        "NID_PACKET": 16,
-        "Q_DIR": w0 >> 30 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 15 & 3,
-        "L_SECTION": w0 & 32767,
-    }
+    t0: Tree = {"NID_PACKET": 16, "Q_DIR": w0 >> 30 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 15 & 3, "L_SECTION": w0 & 32767}
     return t0, p
 
 
@@ -1079,13 +935,7 @@ def read_to_train_21(n: int, p: int) -> tuple[Tree, int]:
     c0 = w0 & 31
     e0: Tree = {"D_GRADIENT": w0 >> 14 & 32767, "Q_GDIR": w0 >> 13 & 1, "G_A": w0 >> 5 & 255}
     s0: list[Tree] = [e0]
-    t0: Tree = {
-        "NID_PACKET": 21,
-        "Q_DIR": w0 >> 44 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 29 & 3,
-        "gradients": s0,
-    }
+    t0: Tree = {"NID_PACKET": 21, "Q_DIR": w0 >> 44 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 29 & 3, "gradients": s0}
     for p in range(p - 24, p - 24 * c0 - 1, -24):
         w = n >> p & 16777215
         s0.append({"D_GRADIENT": w >> 9, "Q_GDIR": w >> 8 & 1, "G_A": w & 255})
@@ -1125,19 +975,9 @@ def read_to_train_27(n: int, p: int) -> tuple[Tree, int]:
     p -= 53
     w0 = n >> p & 9007199254740991
     c1 = w0 & 31
-    t0: Tree = {
-        "NID_PACKET": 27,
-        "Q_DIR": w0 >> 43 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 28 & 3,
-    }
+    t0: Tree = {"NID_PACKET": 27, "Q_DIR": w0 >> 43 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 28 & 3}
     s1: list[Tree] = []
-    e0: Tree = {
-        "D_STATIC": w0 >> 13 & 32767,
-        "V_STATIC": w0 >> 6 & 127,
-        "Q_FRONT": w0 >> 5 & 1,
-        "categories": s1,
-    }
+    e0: Tree = {"D_STATIC": w0 >> 13 & 32767, "V_STATIC": w0 >> 6 & 127, "Q_FRONT": w0 >> 5 & 1, "categories": s1}
     while c1:
         c1 -= 1
         w = n >> p - 13 & 8191
@@ -1161,12 +1001,7 @@ def read_to_train_27(n: int, p: int) -> tuple[Tree, int]:
         w2 = n >> p & 268435455
         c2 = w2 & 31
         s2: list[Tree] = []
-        e2: Tree = {
-            "D_STATIC": w2 >> 13,
-            "V_STATIC": w2 >> 6 & 127,
-            "Q_FRONT": w2 >> 5 & 1,
-            "categories": s2,
-        }
+        e2: Tree = {"D_STATIC": w2 >> 13, "V_STATIC": w2 >> 6 & 127, "Q_FRONT": w2 >> 5 & 1, "categories": s2}
         while c2:
             c2 -= 1
             w = n >> p - 13 & 8191
@@ -1279,14 +1114,7 @@ def read_to_train_39(n: int, p: int) -> tuple[Tree, int]:
     p -= 44
     w0 = n >> p & 17592186044415
     q0 = w0 & 15
-    t0: Tree = {
-        "NID_PACKET": 39,
-        "Q_DIR": w0 >> 34 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 19 & 3,
-        "D_TRACTION": w0 >> 4 & 32767,
-        "M_VOLTAGE": q0,
-    }
+    t0: Tree = {"NID_PACKET": 39, "Q_DIR": w0 >> 34 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 19 & 3, "D_TRACTION": w0 >> 4 & 32767, "M_VOLTAGE": q0}
     if q0:
         p -= 10
         w1 = n >> p & 1023
@@ -1320,14 +1148,7 @@ def read_to_train_40(n: int, p: int) -> tuple[Tree, int]:
     length = p
     p -= 50
     w0 = n >> p & 1125899906842623
-    t0: Tree = {
-        "NID_PACKET": 40,
-        "Q_DIR": w0 >> 40 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 25 & 3,
-        "D_CURRENT": w0 >> 10 & 32767,
-        "M_CURRENT": w0 & 1023,
-    }
+    t0: Tree = {"NID_PACKET": 40, "Q_DIR": w0 >> 40 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 25 & 3, "D_CURRENT": w0 >> 10 & 32767, "M_CURRENT": w0 & 1023}
     return t0, p
 
 
@@ -1350,13 +1171,7 @@ def read_to_train_41(n: int, p: int) -> tuple[Tree, int]:
     p -= 43
     w0 = n >> p & 8796093022207
     q0 = w0 & 7
-    t0: Tree = {
-        "NID_PACKET": 41,
-        "Q_DIR": w0 >> 33 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 18 & 3,
-        "D_LEVELTR": w0 >> 3 & 32767,
-    }
+    t0: Tree = {"NID_PACKET": 41, "Q_DIR": w0 >> 33 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 18 & 3, "D_LEVELTR": w0 >> 3 & 32767}
     e0: Tree = {"M_LEVELTR": q0}
     if q0 == 1:
         p -= 8
@@ -1438,16 +1253,7 @@ def read_to_train_42(n: int, p: int) -> tuple[Tree, int]:
     w1 = n >> p & 18446744073709551615
     p -= 1
     w2 = n >> p & 1
-    t0: Tree = {
-        "NID_PACKET": 42,
-        "Q_DIR": w0 >> 38 & 3,
-        "L_PACKET": length,
-        "Q_RBC": w0 >> 24 & 1,
-        "NID_C": w0 >> 14 & 1023,
-        "NID_RBC": w0 & 16383,
-        "NID_RADIO": digits_text(w1, 16),
-        "Q_SLEEPSESSION": w2,
-    }
+    t0: Tree = {"NID_PACKET": 42, "Q_DIR": w0 >> 38 & 3, "L_PACKET": length, "Q_RBC": w0 >> 24 & 1, "NID_C": w0 >> 14 & 1023, "NID_RBC": w0 & 16383, "NID_RADIO": digits_text(w1, 16), "Q_SLEEPSESSION": w2}
     return t0, p
 
 
@@ -1513,12 +1319,7 @@ def read_to_train_45(n: int, p: int) -> tuple[Tree, int]:
     length = p
     p -= 47
     w0 = n >> p & 140737488355327
-    t0: Tree = {
-        "NID_PACKET": 45,
-        "Q_DIR": w0 >> 37 & 3,
-        "L_PACKET": length,
-        "NID_MN": digits_text(w0 & 16777215, 6),
-    }
+    t0: Tree = {"NID_PACKET": 45, "Q_DIR": w0 >> 37 & 3, "L_PACKET": length, "NID_MN": digits_text(w0 & 16777215, 6)}
     return t0, p
 
 
@@ -1663,13 +1464,7 @@ def read_to_train_51(n: int, p: int) -> tuple[Tree, int]:
     p -= 26
     w0 = n >> p & 67108863
     q0 = w0 & 1
-    t0: Tree = {
-        "NID_PACKET": 51,
-        "Q_DIR": w0 >> 16 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 1 & 3,
-        "Q_TRACKINIT": q0,
-    }
+    t0: Tree = {"NID_PACKET": 51, "Q_DIR": w0 >> 16 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 1 & 3, "Q_TRACKINIT": q0}
     if q0:
         p -= 15
         w1 = n >> p & 32767
@@ -1679,12 +1474,7 @@ def read_to_train_51(n: int, p: int) -> tuple[Tree, int]:
         w2 = n >> p & 68719476735
         c1 = w2 & 31
         s1: list[Tree] = []
-        e0: Tree = {
-            "D_AXLELOAD": w2 >> 21,
-            "L_AXLELOAD": w2 >> 6 & 32767,
-            "Q_FRONT": w2 >> 5 & 1,
-            "categories": s1,
-        }
+        e0: Tree = {"D_AXLELOAD": w2 >> 21, "L_AXLELOAD": w2 >> 6 & 32767, "Q_FRONT": w2 >> 5 & 1, "categories": s1}
         for p in range(p - 14, p - 14 * c1 - 1, -14):
             w = n >> p & 16383
             s1.append({"M_AXLELOADCAT": w >> 7, "V_AXLELOAD": w & 127})
@@ -1699,12 +1489,7 @@ def read_to_train_51(n: int, p: int) -> tuple[Tree, int]:
             w4 = n >> p & 68719476735
             c2 = w4 & 31
             s2: list[Tree] = []
-            e2: Tree = {
-                "D_AXLELOAD": w4 >> 21,
-                "L_AXLELOAD": w4 >> 6 & 32767,
-                "Q_FRONT": w4 >> 5 & 1,
-                "categories": s2,
-            }
+            e2: Tree = {"D_AXLELOAD": w4 >> 21, "L_AXLELOAD": w4 >> 6 & 32767, "Q_FRONT": w4 >> 5 & 1, "categories": s2}
             for p in range(p - 14, p - 14 * c2 - 1, -14):
                 w = n >> p & 16383
                 s2.append({"M_AXLELOADCAT": w >> 7, "V_AXLELOAD": w & 127})
@@ -1789,13 +1574,7 @@ def read_to_train_52(n: int, p: int) -> tuple[Tree, int]:
     p -= 26
     w0 = n >> p & 67108863
     q0 = w0 & 1
-    t0: Tree = {
-        "NID_PACKET": 52,
-        "Q_DIR": w0 >> 16 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 1 & 3,
-        "Q_TRACKINIT": q0,
-    }
+    t0: Tree = {"NID_PACKET": 52, "Q_DIR": w0 >> 16 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 1 & 3, "Q_TRACKINIT": q0}
     if q0:
         p -= 15
         w1 = n >> p & 32767
@@ -1804,28 +1583,12 @@ def read_to_train_52(n: int, p: int) -> tuple[Tree, int]:
         p -= 60
         w2 = n >> p & 1152921504606846975
         c0 = w2 & 31
-        e0: Tree = {
-            "D_PBD": w2 >> 45,
-            "Q_GDIR": w2 >> 44 & 1,
-            "G_PBDSR": w2 >> 36 & 255,
-            "Q_PBDSR": w2 >> 35 & 1,
-            "D_PBDSR": w2 >> 20 & 32767,
-            "L_PBDSR": w2 >> 5 & 32767,
-        }
+        e0: Tree = {"D_PBD": w2 >> 45, "Q_GDIR": w2 >> 44 & 1, "G_PBDSR": w2 >> 36 & 255, "Q_PBDSR": w2 >> 35 & 1, "D_PBDSR": w2 >> 20 & 32767, "L_PBDSR": w2 >> 5 & 32767}
         s0: list[Tree] = [e0]
         t0["restrictions"] = s0
         for p in range(p - 55, p - 55 * c0 - 1, -55):
             w = n >> p & 36028797018963967
-            s0.append(
-                {
-                    "D_PBD": w >> 40,
-                    "Q_GDIR": w >> 39 & 1,
-                    "G_PBDSR": w >> 31 & 255,
-                    "Q_PBDSR": w >> 30 & 1,
-                    "D_PBDSR": w >> 15 & 32767,
-                    "L_PBDSR": w & 32767,
-                }
-            )
+            s0.append({"D_PBD": w >> 40, "Q_GDIR": w >> 39 & 1, "G_PBDSR": w >> 31 & 255, "Q_PBDSR": w >> 30 & 1, "D_PBDSR": w >> 15 & 32767, "L_PBDSR": w & 32767})
     return t0, p
 
 
@@ -1880,14 +1643,7 @@ def read_to_train_57(n: int, p: int) -> tuple[Tree, int]:
     length = p
     p -= 49
     w0 = n >> p & 562949953421311
-    t0: Tree = {
-        "NID_PACKET": 57,
-        "Q_DIR": w0 >> 39 & 3,
-        "L_PACKET": length,
-        "T_MAR": w0 >> 18 & 255,
-        "T_TIMEOUTRQST": w0 >> 8 & 1023,
-        "T_CYCRQST": w0 & 255,
-    }
+    t0: Tree = {"NID_PACKET": 57, "Q_DIR": w0 >> 39 & 3, "L_PACKET": length, "T_MAR": w0 >> 18 & 255, "T_TIMEOUTRQST": w0 >> 8 & 1023, "T_CYCRQST": w0 & 255}
     return t0, p
 
 
@@ -1909,16 +1665,7 @@ def read_to_train_58(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 72057594037927935
     c0 = w0 & 31
     s0: list[Tree] = []
-    t0: Tree = {
-        "NID_PACKET": 58,
-        "Q_DIR": w0 >> 46 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 31 & 3,
-        "T_CYCLOC": w0 >> 23 & 255,
-        "D_CYCLOC": w0 >> 8 & 32767,
-        "M_LOC": w0 >> 5 & 7,
-        "locations": s0,
-    }
+    t0: Tree = {"NID_PACKET": 58, "Q_DIR": w0 >> 46 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 31 & 3, "T_CYCLOC": w0 >> 23 & 255, "D_CYCLOC": w0 >> 8 & 32767, "M_LOC": w0 >> 5 & 7, "locations": s0}
     for p in range(p - 16, p - 16 * c0 - 1, -16):
         w = n >> p & 65535
         s0.append({"D_LOC": w >> 1, "Q_LGTLOC": w & 1})
@@ -2027,17 +1774,7 @@ def read_to_train_65(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 281474976710655
     p -= 23
     w1 = n >> p & 8388607
-    t0: Tree = {
-        "NID_PACKET": 65,
-        "Q_DIR": w0 >> 38 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 23 & 3,
-        "NID_TSR": w0 >> 15 & 255,
-        "D_TSR": w0 & 32767,
-        "L_TSR": w1 >> 8,
-        "Q_FRONT": w1 >> 7 & 1,
-        "V_TSR": w1 & 127,
-    }
+    t0: Tree = {"NID_PACKET": 65, "Q_DIR": w0 >> 38 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 23 & 3, "NID_TSR": w0 >> 15 & 255, "D_TSR": w0 & 32767, "L_TSR": w1 >> 8, "Q_FRONT": w1 >> 7 & 1, "V_TSR": w1 & 127}
     return t0, p
 
 
@@ -2084,13 +1821,7 @@ def read_to_train_67(n: int, p: int) -> tuple[Tree, int]:
     c0 = w0 & 31
     e0: Tree = {"D_TRACKCOND": w0 >> 20 & 32767, "L_TRACKCOND": w0 >> 5 & 32767}
     s0: list[Tree] = [e0]
-    t0: Tree = {
-        "NID_PACKET": 67,
-        "Q_DIR": w0 >> 50 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 35 & 3,
-        "areas": s0,
-    }
+    t0: Tree = {"NID_PACKET": 67, "Q_DIR": w0 >> 50 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 35 & 3, "areas": s0}
     for p in range(p - 30, p - 30 * c0 - 1, -30):
         w = n >> p & 1073741823
         s0.append({"D_TRACKCOND": w >> 15, "L_TRACKCOND": w & 32767})
@@ -2126,13 +1857,7 @@ def read_to_train_68(n: int, p: int) -> tuple[Tree, int]:
     p -= 26
     w0 = n >> p & 67108863
     q0 = w0 & 1
-    t0: Tree = {
-        "NID_PACKET": 68,
-        "Q_DIR": w0 >> 16 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 1 & 3,
-        "Q_TRACKINIT": q0,
-    }
+    t0: Tree = {"NID_PACKET": 68, "Q_DIR": w0 >> 16 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 1 & 3, "Q_TRACKINIT": q0}
     if q0:
         p -= 15
         w1 = n >> p & 32767
@@ -2141,18 +1866,12 @@ def read_to_train_68(n: int, p: int) -> tuple[Tree, int]:
         p -= 39
         w2 = n >> p & 549755813887
         c0 = w2 & 31
-        e0: Tree = {
-            "D_TRACKCOND": w2 >> 24,
-            "L_TRACKCOND": w2 >> 9 & 32767,
-            "M_TRACKCOND": w2 >> 5 & 15,
-        }
+        e0: Tree = {"D_TRACKCOND": w2 >> 24, "L_TRACKCOND": w2 >> 9 & 32767, "M_TRACKCOND": w2 >> 5 & 15}
         s0: list[Tree] = [e0]
         t0["conditions"] = s0
         for p in range(p - 34, p - 34 * c0 - 1, -34):
             w = n >> p & 17179869183
-            s0.append(
-                {"D_TRACKCOND": w >> 19, "L_TRACKCOND": w >> 4 & 32767, "M_TRACKCOND": w & 15}
-            )
+            s0.append({"D_TRACKCOND": w >> 19, "L_TRACKCOND": w >> 4 & 32767, "M_TRACKCOND": w & 15})
     return t0, p
 
 
@@ -2202,13 +1921,7 @@ def read_to_train_69(n: int, p: int) -> tuple[Tree, int]:
     p -= 26
     w0 = n >> p & 67108863
     q0 = w0 & 1
-    t0: Tree = {
-        "NID_PACKET": 69,
-        "Q_DIR": w0 >> 16 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 1 & 3,
-        "Q_TRACKINIT": q0,
-    }
+    t0: Tree = {"NID_PACKET": 69, "Q_DIR": w0 >> 16 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 1 & 3, "Q_TRACKINIT": q0}
     if q0:
         p -= 15
         w1 = n >> p & 32767
@@ -2217,24 +1930,12 @@ def read_to_train_69(n: int, p: int) -> tuple[Tree, int]:
         p -= 41
         w2 = n >> p & 2199023255551
         c0 = w2 & 31
-        e0: Tree = {
-            "D_TRACKCOND": w2 >> 26,
-            "L_TRACKCOND": w2 >> 11 & 32767,
-            "M_PLATFORM": w2 >> 7 & 15,
-            "Q_PLATFORM": w2 >> 5 & 3,
-        }
+        e0: Tree = {"D_TRACKCOND": w2 >> 26, "L_TRACKCOND": w2 >> 11 & 32767, "M_PLATFORM": w2 >> 7 & 15, "Q_PLATFORM": w2 >> 5 & 3}
         s0: list[Tree] = [e0]
         t0["platforms"] = s0
         for p in range(p - 36, p - 36 * c0 - 1, -36):
             w = n >> p & 68719476735
-            s0.append(
-                {
-                    "D_TRACKCOND": w >> 21,
-                    "L_TRACKCOND": w >> 6 & 32767,
-                    "M_PLATFORM": w >> 2 & 15,
-                    "Q_PLATFORM": w & 3,
-                }
-            )
+            s0.append({"D_TRACKCOND": w >> 21, "L_TRACKCOND": w >> 6 & 32767, "M_PLATFORM": w >> 2 & 15, "Q_PLATFORM": w & 3})
     return t0, p
 
 
@@ -2288,13 +1989,7 @@ def read_to_train_70(n: int, p: int) -> tuple[Tree, int]:
     p -= 26
     w0 = n >> p & 67108863
     q0 = w0 & 1
-    t0: Tree = {
-        "NID_PACKET": 70,
-        "Q_DIR": w0 >> 16 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 1 & 3,
-        "Q_TRACKINIT": q0,
-    }
+    t0: Tree = {"NID_PACKET": 70, "Q_DIR": w0 >> 16 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 1 & 3, "Q_TRACKINIT": q0}
     if q0:
         p -= 15
         w1 = n >> p & 32767
@@ -2331,25 +2026,14 @@ def read_to_train_70(n: int, p: int) -> tuple[Tree, int]:
             w = n >> p - 31 & 2147483647
             if (w >> 14 & 3) == 0:
                 p -= 25
-                s0.append(
-                    {"D_SUITABILITY": w >> 16, "Q_SUITABILITY": 0, "M_LINEGAUGE": w >> 6 & 255}
-                )
+                s0.append({"D_SUITABILITY": w >> 16, "Q_SUITABILITY": 0, "M_LINEGAUGE": w >> 6 & 255})
             elif (w >> 14 & 3) == 1:
                 p -= 24
-                s0.append(
-                    {"D_SUITABILITY": w >> 16, "Q_SUITABILITY": 1, "M_AXLELOADCAT": w >> 7 & 127}
-                )
+                s0.append({"D_SUITABILITY": w >> 16, "Q_SUITABILITY": 1, "M_AXLELOADCAT": w >> 7 & 127})
             elif (w >> 14 & 3) == 2:
-                if w >> 10 & 15:
+                if (w >> 10 & 15):
                     p -= 31
-                    s0.append(
-                        {
-                            "D_SUITABILITY": w >> 16,
-                            "Q_SUITABILITY": 2,
-                            "M_VOLTAGE": w >> 10 & 15,
-                            "NID_CTRACTION": w & 1023,
-                        }
-                    )
+                    s0.append({"D_SUITABILITY": w >> 16, "Q_SUITABILITY": 2, "M_VOLTAGE": w >> 10 & 15, "NID_CTRACTION": w & 1023})
                 else:
                     p -= 21
                     s0.append({"D_SUITABILITY": w >> 16, "Q_SUITABILITY": 2, "M_VOLTAGE": 0})
@@ -2466,15 +2150,7 @@ def read_to_train_71(n: int, p: int) -> tuple[Tree, int]:
     length = p
     p -= 56
     w0 = n >> p & 72057594037927935
-    t0: Tree = {
-        "NID_PACKET": 71,
-        "Q_DIR": w0 >> 46 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 31 & 3,
-        "D_ADHESION": w0 >> 16 & 32767,
-        "L_ADHESION": w0 >> 1 & 32767,
-        "M_ADHESION": w0 & 1,
-    }
+    t0: Tree = {"NID_PACKET": 71, "Q_DIR": w0 >> 46 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 31 & 3, "D_ADHESION": w0 >> 16 & 32767, "L_ADHESION": w0 >> 1 & 32767, "M_ADHESION": w0 & 1}
     return t0, p
 
 
@@ -2495,22 +2171,11 @@ def read_to_train_72(n: int, p: int) -> tuple[Tree, int]:
     length = p
     p -= 28
     w0 = n >> p & 268435455
-    t0: Tree = {
-        "NID_PACKET": 72,
-        "Q_DIR": w0 >> 18 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 3 & 3,
-        "Q_TEXTCLASS": w0 >> 1 & 3,
-        "Q_TEXTDISPLAY": w0 & 1,
-    }
+    t0: Tree = {"NID_PACKET": 72, "Q_DIR": w0 >> 18 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 3 & 3, "Q_TEXTCLASS": w0 >> 1 & 3, "Q_TEXTDISPLAY": w0 & 1}
     p -= 22
     w1 = n >> p & 4194303
     q0 = w1 & 7
-    g0: Tree = {
-        "D_TEXTDISPLAY": w1 >> 7,
-        "M_MODETEXTDISPLAY": w1 >> 3 & 15,
-        "M_LEVELTEXTDISPLAY": q0,
-    }
+    g0: Tree = {"D_TEXTDISPLAY": w1 >> 7, "M_MODETEXTDISPLAY": w1 >> 3 & 15, "M_LEVELTEXTDISPLAY": q0}
     if q0 == 1:
         p -= 8
         w2 = n >> p & 255
@@ -2519,12 +2184,7 @@ def read_to_train_72(n: int, p: int) -> tuple[Tree, int]:
     p -= 32
     w3 = n >> p & 4294967295
     q1 = w3 & 7
-    g1: Tree = {
-        "L_TEXTDISPLAY": w3 >> 17,
-        "T_TEXTDISPLAY": w3 >> 7 & 1023,
-        "M_MODETEXTDISPLAY": w3 >> 3 & 15,
-        "M_LEVELTEXTDISPLAY": q1,
-    }
+    g1: Tree = {"L_TEXTDISPLAY": w3 >> 17, "T_TEXTDISPLAY": w3 >> 7 & 1023, "M_MODETEXTDISPLAY": w3 >> 3 & 15, "M_LEVELTEXTDISPLAY": q1}
     if q1 == 1:
         p -= 8
         w4 = n >> p & 255
@@ -2633,22 +2293,11 @@ def read_to_train_76(n: int, p: int) -> tuple[Tree, int]:
     length = p
     p -= 28
     w0 = n >> p & 268435455
-    t0: Tree = {
-        "NID_PACKET": 76,
-        "Q_DIR": w0 >> 18 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 3 & 3,
-        "Q_TEXTCLASS": w0 >> 1 & 3,
-        "Q_TEXTDISPLAY": w0 & 1,
-    }
+    t0: Tree = {"NID_PACKET": 76, "Q_DIR": w0 >> 18 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 3 & 3, "Q_TEXTCLASS": w0 >> 1 & 3, "Q_TEXTDISPLAY": w0 & 1}
     p -= 22
     w1 = n >> p & 4194303
     q0 = w1 & 7
-    g0: Tree = {
-        "D_TEXTDISPLAY": w1 >> 7,
-        "M_MODETEXTDISPLAY": w1 >> 3 & 15,
-        "M_LEVELTEXTDISPLAY": q0,
-    }
+    g0: Tree = {"D_TEXTDISPLAY": w1 >> 7, "M_MODETEXTDISPLAY": w1 >> 3 & 15, "M_LEVELTEXTDISPLAY": q0}
     if q0 == 1:
         p -= 8
         w2 = n >> p & 255
@@ -2657,12 +2306,7 @@ def read_to_train_76(n: int, p: int) -> tuple[Tree, int]:
     p -= 32
     w3 = n >> p & 4294967295
     q1 = w3 & 7
-    g1: Tree = {
-        "L_TEXTDISPLAY": w3 >> 17,
-        "T_TEXTDISPLAY": w3 >> 7 & 1023,
-        "M_MODETEXTDISPLAY": w3 >> 3 & 15,
-        "M_LEVELTEXTDISPLAY": q1,
-    }
+    g1: Tree = {"L_TEXTDISPLAY": w3 >> 17, "T_TEXTDISPLAY": w3 >> 7 & 1023, "M_MODETEXTDISPLAY": w3 >> 3 & 15, "M_LEVELTEXTDISPLAY": q1}
     if q1 == 1:
         p -= 8
         w4 = n >> p & 255
@@ -2869,34 +2513,12 @@ def read_to_train_80(n: int, p: int) -> tuple[Tree, int]:
     p -= 36
     w1 = n >> p & 68719476735
     c0 = w1 & 31
-    e0: Tree = {
-        "D_MAMODE": w0 >> 9 & 32767,
-        "M_MAMODE": w0 >> 7 & 3,
-        "V_MAMODE": w0 & 127,
-        "L_MAMODE": w1 >> 21,
-        "L_ACKMAMODE": w1 >> 6 & 32767,
-        "Q_MAMODE": w1 >> 5 & 1,
-    }
+    e0: Tree = {"D_MAMODE": w0 >> 9 & 32767, "M_MAMODE": w0 >> 7 & 3, "V_MAMODE": w0 & 127, "L_MAMODE": w1 >> 21, "L_ACKMAMODE": w1 >> 6 & 32767, "Q_MAMODE": w1 >> 5 & 1}
     s0: list[Tree] = [e0]
-    t0: Tree = {
-        "NID_PACKET": 80,
-        "Q_DIR": w0 >> 39 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 24 & 3,
-        "profiles": s0,
-    }
+    t0: Tree = {"NID_PACKET": 80, "Q_DIR": w0 >> 39 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 24 & 3, "profiles": s0}
     for p in range(p - 55, p - 55 * c0 - 1, -55):
         w = n >> p & 36028797018963967
-        s0.append(
-            {
-                "D_MAMODE": w >> 40,
-                "M_MAMODE": w >> 38 & 3,
-                "V_MAMODE": w >> 31 & 127,
-                "L_MAMODE": w >> 16 & 32767,
-                "L_ACKMAMODE": w >> 1 & 32767,
-                "Q_MAMODE": w & 1,
-            }
-        )
+        s0.append({"D_MAMODE": w >> 40, "M_MAMODE": w >> 38 & 3, "V_MAMODE": w >> 31 & 127, "L_MAMODE": w >> 16 & 32767, "L_ACKMAMODE": w >> 1 & 32767, "Q_MAMODE": w & 1})
     return t0, p
 
 
@@ -2942,16 +2564,7 @@ def read_to_train_88(n: int, p: int) -> tuple[Tree, int]:
     p -= 16
     w1 = n >> p & 65535
     q0 = w1 & 1
-    t0: Tree = {
-        "NID_PACKET": 88,
-        "Q_DIR": w0 >> 38 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 23 & 3,
-        "NID_LX": w0 >> 15 & 255,
-        "D_LX": w0 & 32767,
-        "L_LX": w1 >> 1,
-        "Q_LXSTATUS": q0,
-    }
+    t0: Tree = {"NID_PACKET": 88, "Q_DIR": w0 >> 38 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 23 & 3, "NID_LX": w0 >> 15 & 255, "D_LX": w0 & 32767, "L_LX": w1 >> 1, "Q_LXSTATUS": q0}
     if q0:
         p -= 8
         w2 = n >> p & 255
@@ -3050,17 +2663,7 @@ def read_to_train_131(n: int, p: int) -> tuple[Tree, int]:
     w2 = n >> p & 18446744073709551615
     p -= 1
     w3 = n >> p & 1
-    t0: Tree = {
-        "NID_PACKET": 131,
-        "Q_DIR": w0 >> 40 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 25 & 3,
-        "D_RBCTR": w0 >> 10 & 32767,
-        "NID_C": w0 & 1023,
-        "NID_RBC": w1,
-        "NID_RADIO": digits_text(w2, 16),
-        "Q_SLEEPSESSION": w3,
-    }
+    t0: Tree = {"NID_PACKET": 131, "Q_DIR": w0 >> 40 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 25 & 3, "D_RBCTR": w0 >> 10 & 32767, "NID_C": w0 & 1023, "NID_RBC": w1, "NID_RADIO": digits_text(w2, 16), "Q_SLEEPSESSION": w3}
     return t0, p
 
 
@@ -3112,19 +2715,7 @@ def read_to_train_133(n: int, p: int) -> tuple[Tree, int]:
     w1 = n >> p & 18446744073709551615
     p -= 39
     w2 = n >> p & 549755813887
-    t0: Tree = {
-        "NID_PACKET": 133,
-        "Q_DIR": w0 >> 40 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 25 & 3,
-        "Q_RIU": w0 >> 24 & 1,
-        "NID_C": w0 >> 14 & 1023,
-        "NID_RIU": w0 & 16383,
-        "NID_RADIO": digits_text(w1, 16),
-        "D_INFILL": w2 >> 24,
-        "NID_C_BG": w2 >> 14 & 1023,
-        "NID_BG": w2 & 16383,
-    }
+    t0: Tree = {"NID_PACKET": 133, "Q_DIR": w0 >> 40 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 25 & 3, "Q_RIU": w0 >> 24 & 1, "NID_C": w0 >> 14 & 1023, "NID_RIU": w0 & 16383, "NID_RADIO": digits_text(w1, 16), "D_INFILL": w2 >> 24, "NID_C_BG": w2 >> 14 & 1023, "NID_BG": w2 & 16383}
     return t0, p
 
 
@@ -3155,17 +2746,7 @@ def read_to_train_134(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 18014398509481983
     p -= 20
     w1 = n >> p & 1048575
-    t0: Tree = {
-        "NID_PACKET": 134,
-        "Q_DIR": w0 >> 44 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 29 & 3,
-        "NID_LOOP": w0 >> 15 & 16383,
-        "D_LOOP": w0 & 32767,
-        "L_LOOP": w1 >> 5,
-        "Q_LOOPDIR": w1 >> 4 & 1,
-        "Q_SSCODE": w1 & 15,
-    }
+    t0: Tree = {"NID_PACKET": 134, "Q_DIR": w0 >> 44 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 29 & 3, "NID_LOOP": w0 >> 15 & 16383, "D_LOOP": w0 & 32767, "L_LOOP": w1 >> 5, "Q_LOOPDIR": w1 >> 4 & 1, "Q_SSCODE": w1 & 15}
     return t0, p
 
 
@@ -3266,14 +2847,7 @@ def read_to_train_138(n: int, p: int) -> tuple[Tree, int]:
     length = p
     p -= 55
     w0 = n >> p & 36028797018963967
-    t0: Tree = {
-        "NID_PACKET": 138,
-        "Q_DIR": w0 >> 45 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 30 & 3,
-        "D_STARTREVERSE": w0 >> 15 & 32767,
-        "L_REVERSEAREA": w0 & 32767,
-    }
+    t0: Tree = {"NID_PACKET": 138, "Q_DIR": w0 >> 45 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 30 & 3, "D_STARTREVERSE": w0 >> 15 & 32767, "L_REVERSEAREA": w0 & 32767}
     return t0, p
 
 
@@ -3293,14 +2867,7 @@ def read_to_train_139(n: int, p: int) -> tuple[Tree, int]:
     length = p
     p -= 47
     w0 = n >> p & 140737488355327
-    t0: Tree = {
-        "NID_PACKET": 139,
-        "Q_DIR": w0 >> 37 & 3,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 22 & 3,
-        "D_REVERSE": w0 >> 7 & 32767,
-        "V_REVERSE": w0 & 127,
-    }
+    t0: Tree = {"NID_PACKET": 139, "Q_DIR": w0 >> 37 & 3, "L_PACKET": length, "Q_SCALE": w0 >> 22 & 3, "D_REVERSE": w0 >> 7 & 32767, "V_REVERSE": w0 & 127}
     return t0, p
 
 
@@ -3320,12 +2887,7 @@ def read_to_train_140(n: int, p: int) -> tuple[Tree, int]:
     length = p
     p -= 55
     w0 = n >> p & 36028797018963967
-    t0: Tree = {
-        "NID_PACKET": 140,
-        "Q_DIR": w0 >> 45 & 3,
-        "L_PACKET": length,
-        "NID_OPERATIONAL": digits_text(w0 & 4294967295, 8),
-    }
+    t0: Tree = {"NID_PACKET": 140, "Q_DIR": w0 >> 45 & 3, "L_PACKET": length, "NID_OPERATIONAL": digits_text(w0 & 4294967295, 8)}
     return t0, p
 
 
@@ -3343,13 +2905,7 @@ def read_to_train_141(n: int, p: int) -> tuple[Tree, int]:
     length = p
     p -= 32
     w0 = n >> p & 4294967295
-    t0: Tree = {
-        "NID_PACKET": 141,
-        "Q_DIR": w0 >> 22 & 3,
-        "L_PACKET": length,
-        "Q_GDIR": w0 >> 8 & 1,
-        "G_TSR": w0 & 255,
-    }
+    t0: Tree = {"NID_PACKET": 141, "Q_DIR": w0 >> 22 & 3, "L_PACKET": length, "Q_GDIR": w0 >> 8 & 1, "G_TSR": w0 & 255}
     return t0, p
 
 
@@ -3370,15 +2926,7 @@ def read_to_train_143(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 281474976710655
     p -= 64
     w1 = n >> p & 18446744073709551615
-    t0: Tree = {
-        "NID_PACKET": 143,
-        "Q_DIR": w0 >> 38 & 3,
-        "L_PACKET": length,
-        "Q_RIU": w0 >> 24 & 1,
-        "NID_C": w0 >> 14 & 1023,
-        "NID_RIU": w0 & 16383,
-        "NID_RADIO": digits_text(w1, 16),
-    }
+    t0: Tree = {"NID_PACKET": 143, "Q_DIR": w0 >> 38 & 3, "L_PACKET": length, "Q_RIU": w0 >> 24 & 1, "NID_C": w0 >> 14 & 1023, "NID_RIU": w0 & 16383, "NID_RADIO": digits_text(w1, 16)}
     return t0, p
 
 
@@ -3502,18 +3050,7 @@ def read_to_track_0(n: int, p: int) -> tuple[Tree, int]:
     p -= 51
     w1 = n >> p & 2251799813685247
     q0 = w1 & 3
-    t0: Tree = {
-        "NID_PACKET": 0,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 24 & 3,
-        "NID_LRBG": w0 & 16777215,
-        "D_LRBG": w1 >> 36,
-        "Q_DIRLRBG": w1 >> 34 & 3,
-        "Q_DLRBG": w1 >> 32 & 3,
-        "L_DOUBTOVER": w1 >> 17 & 32767,
-        "L_DOUBTUNDER": w1 >> 2 & 32767,
-        "Q_LENGTH": q0,
-    }
+    t0: Tree = {"NID_PACKET": 0, "L_PACKET": length, "Q_SCALE": w0 >> 24 & 3, "NID_LRBG": w0 & 16777215, "D_LRBG": w1 >> 36, "Q_DIRLRBG": w1 >> 34 & 3, "Q_DLRBG": w1 >> 32 & 3, "L_DOUBTOVER": w1 >> 17 & 32767, "L_DOUBTUNDER": w1 >> 2 & 32767, "Q_LENGTH": q0}
     if 1 <= q0 <= 2:
         p -= 15
         w2 = n >> p & 32767
@@ -3584,19 +3121,7 @@ def read_to_track_1(n: int, p: int) -> tuple[Tree, int]:
     p -= 17
     w2 = n >> p & 131071
     q0 = w2 & 3
-    t0: Tree = {
-        "NID_PACKET": 1,
-        "L_PACKET": length,
-        "Q_SCALE": w0 >> 24 & 3,
-        "NID_LRBG": w0 & 16777215,
-        "NID_PRVLRBG": w1 >> 34,
-        "D_LRBG": w1 >> 19 & 32767,
-        "Q_DIRLRBG": w1 >> 17 & 3,
-        "Q_DLRBG": w1 >> 15 & 3,
-        "L_DOUBTOVER": w1 & 32767,
-        "L_DOUBTUNDER": w2 >> 2,
-        "Q_LENGTH": q0,
-    }
+    t0: Tree = {"NID_PACKET": 1, "L_PACKET": length, "Q_SCALE": w0 >> 24 & 3, "NID_LRBG": w0 & 16777215, "NID_PRVLRBG": w1 >> 34, "D_LRBG": w1 >> 19 & 32767, "Q_DIRLRBG": w1 >> 17 & 3, "Q_DLRBG": w1 >> 15 & 3, "L_DOUBTOVER": w1 & 32767, "L_DOUBTUNDER": w2 >> 2, "Q_LENGTH": q0}
     if 1 <= q0 <= 2:
         p -= 15
         w3 = n >> p & 32767
@@ -3717,11 +3242,7 @@ def read_to_track_5(n: int, p: int) -> tuple[Tree, int]:
     length = p
     p -= 53
     w0 = n >> p & 9007199254740991
-    t0: Tree = {
-        "NID_PACKET": 5,
-        "L_PACKET": length,
-        "NID_OPERATIONAL": digits_text(w0 & 4294967295, 8),
-    }
+    t0: Tree = {"NID_PACKET": 5, "L_PACKET": length, "NID_OPERATIONAL": digits_text(w0 & 4294967295, 8)}
     return t0, p
 
 
@@ -3761,23 +3282,11 @@ def read_to_track_11(n: int, p: int) -> tuple[Tree, int]:
     w1 = n >> p & 4294967295
     c0 = w1 & 31
     s0: list[Tree] = []
-    t0: Tree = {
-        "NID_PACKET": 11,
-        "L_PACKET": length,
-        "NC_CDTRAIN": w0 >> 34 & 15,
-        "NC_TRAIN": w0 >> 19 & 32767,
-        "L_TRAIN": w0 >> 7 & 4095,
-        "V_MAXTRAIN": w0 & 127,
-        "M_LOADINGGAUGE": w1 >> 24,
-        "M_AXLELOADCAT": w1 >> 17 & 127,
-        "M_AIRTIGHT": w1 >> 15 & 3,
-        "N_AXLE": w1 >> 5 & 1023,
-        "tractions": s0,
-    }
+    t0: Tree = {"NID_PACKET": 11, "L_PACKET": length, "NC_CDTRAIN": w0 >> 34 & 15, "NC_TRAIN": w0 >> 19 & 32767, "L_TRAIN": w0 >> 7 & 4095, "V_MAXTRAIN": w0 & 127, "M_LOADINGGAUGE": w1 >> 24, "M_AXLELOADCAT": w1 >> 17 & 127, "M_AIRTIGHT": w1 >> 15 & 3, "N_AXLE": w1 >> 5 & 1023, "tractions": s0}
     while c0:
         c0 -= 1
         w = n >> p - 14 & 16383
-        if w >> 10 & 15:
+        if (w >> 10 & 15):
             p -= 14
             s0.append({"M_VOLTAGE": w >> 10, "NID_CTRACTION": w & 1023})
         else:
@@ -3878,12 +3387,7 @@ def read_message_129(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 1125899906842623
     p -= 24
     w1 = n >> p & 16777215
-    t0: Tree = {
-        "NID_MESSAGE": 129,
-        "L_MESSAGE": w0 >> 32 & 1023,
-        "T_TRAIN": w0 & 4294967295,
-        "NID_ENGINE": w1,
-    }
+    t0: Tree = {"NID_MESSAGE": 129, "L_MESSAGE": w0 >> 32 & 1023, "T_TRAIN": w0 & 4294967295, "NID_ENGINE": w1}
     return t0, p
 
 
@@ -3905,12 +3409,7 @@ def read_message_130(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 1125899906842623
     p -= 24
     w1 = n >> p & 16777215
-    t0: Tree = {
-        "NID_MESSAGE": 130,
-        "L_MESSAGE": w0 >> 32 & 1023,
-        "T_TRAIN": w0 & 4294967295,
-        "NID_ENGINE": w1,
-    }
+    t0: Tree = {"NID_MESSAGE": 130, "L_MESSAGE": w0 >> 32 & 1023, "T_TRAIN": w0 & 4294967295, "NID_ENGINE": w1}
     return t0, p
 
 
@@ -3932,13 +3431,7 @@ def read_message_132(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 1125899906842623
     p -= 29
     w1 = n >> p & 536870911
-    t0: Tree = {
-        "NID_MESSAGE": 132,
-        "L_MESSAGE": w0 >> 32 & 1023,
-        "T_TRAIN": w0 & 4294967295,
-        "NID_ENGINE": w1 >> 5,
-        "Q_MARQSTREASON": w1 & 31,
-    }
+    t0: Tree = {"NID_MESSAGE": 132, "L_MESSAGE": w0 >> 32 & 1023, "T_TRAIN": w0 & 4294967295, "NID_ENGINE": w1 >> 5, "Q_MARQSTREASON": w1 & 31}
     return t0, p
 
 
@@ -3961,12 +3454,7 @@ def read_message_136(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 1125899906842623
     p -= 24
     w1 = n >> p & 16777215
-    t0: Tree = {
-        "NID_MESSAGE": 136,
-        "L_MESSAGE": w0 >> 32 & 1023,
-        "T_TRAIN": w0 & 4294967295,
-        "NID_ENGINE": w1,
-    }
+    t0: Tree = {"NID_MESSAGE": 136, "L_MESSAGE": w0 >> 32 & 1023, "T_TRAIN": w0 & 4294967295, "NID_ENGINE": w1}
     return t0, p
 
 
@@ -3988,13 +3476,7 @@ def read_message_137(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 1125899906842623
     p -= 56
     w1 = n >> p & 72057594037927935
-    t0: Tree = {
-        "NID_MESSAGE": 137,
-        "L_MESSAGE": w0 >> 32 & 1023,
-        "T_TRAIN": w0 & 4294967295,
-        "NID_ENGINE": w1 >> 32,
-        "T_TRAIN_REFERENCE": w1 & 4294967295,
-    }
+    t0: Tree = {"NID_MESSAGE": 137, "L_MESSAGE": w0 >> 32 & 1023, "T_TRAIN": w0 & 4294967295, "NID_ENGINE": w1 >> 32, "T_TRAIN_REFERENCE": w1 & 4294967295}
     return t0, p
 
 
@@ -4017,13 +3499,7 @@ def read_message_138(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 1125899906842623
     p -= 56
     w1 = n >> p & 72057594037927935
-    t0: Tree = {
-        "NID_MESSAGE": 138,
-        "L_MESSAGE": w0 >> 32 & 1023,
-        "T_TRAIN": w0 & 4294967295,
-        "NID_ENGINE": w1 >> 32,
-        "T_TRAIN_REFERENCE": w1 & 4294967295,
-    }
+    t0: Tree = {"NID_MESSAGE": 138, "L_MESSAGE": w0 >> 32 & 1023, "T_TRAIN": w0 & 4294967295, "NID_ENGINE": w1 >> 32, "T_TRAIN_REFERENCE": w1 & 4294967295}
     return t0, p
 
 
@@ -4046,13 +3522,7 @@ def read_message_146(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 1125899906842623
     p -= 56
     w1 = n >> p & 72057594037927935
-    t0: Tree = {
-        "NID_MESSAGE": 146,
-        "L_MESSAGE": w0 >> 32 & 1023,
-        "T_TRAIN": w0 & 4294967295,
-        "NID_ENGINE": w1 >> 32,
-        "T_TRAIN_REFERENCE": w1 & 4294967295,
-    }
+    t0: Tree = {"NID_MESSAGE": 146, "L_MESSAGE": w0 >> 32 & 1023, "T_TRAIN": w0 & 4294967295, "NID_ENGINE": w1 >> 32, "T_TRAIN_REFERENCE": w1 & 4294967295}
     return t0, p
 
 
@@ -4075,14 +3545,7 @@ def read_message_147(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 1125899906842623
     p -= 30
     w1 = n >> p & 1073741823
-    t0: Tree = {
-        "NID_MESSAGE": 147,
-        "L_MESSAGE": w0 >> 32 & 1023,
-        "T_TRAIN": w0 & 4294967295,
-        "NID_ENGINE": w1 >> 6,
-        "NID_EM": w1 >> 2 & 15,
-        "Q_EMERGENCYSTOP": w1 & 3,
-    }
+    t0: Tree = {"NID_MESSAGE": 147, "L_MESSAGE": w0 >> 32 & 1023, "T_TRAIN": w0 & 4294967295, "NID_ENGINE": w1 >> 6, "NID_EM": w1 >> 2 & 15, "Q_EMERGENCYSTOP": w1 & 3}
     return t0, p
 
 
@@ -4106,12 +3569,7 @@ def read_message_149(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 1125899906842623
     p -= 24
     w1 = n >> p & 16777215
-    t0: Tree = {
-        "NID_MESSAGE": 149,
-        "L_MESSAGE": w0 >> 32 & 1023,
-        "T_TRAIN": w0 & 4294967295,
-        "NID_ENGINE": w1,
-    }
+    t0: Tree = {"NID_MESSAGE": 149, "L_MESSAGE": w0 >> 32 & 1023, "T_TRAIN": w0 & 4294967295, "NID_ENGINE": w1}
     return t0, p
 
 
@@ -4133,12 +3591,7 @@ def read_message_150(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 1125899906842623
     p -= 24
     w1 = n >> p & 16777215
-    t0: Tree = {
-        "NID_MESSAGE": 150,
-        "L_MESSAGE": w0 >> 32 & 1023,
-        "T_TRAIN": w0 & 4294967295,
-        "NID_ENGINE": w1,
-    }
+    t0: Tree = {"NID_MESSAGE": 150, "L_MESSAGE": w0 >> 32 & 1023, "T_TRAIN": w0 & 4294967295, "NID_ENGINE": w1}
     return t0, p
 
 
@@ -4160,15 +3613,7 @@ def read_message_153(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 1125899906842623
     p -= 49
     w1 = n >> p & 562949953421311
-    t0: Tree = {
-        "NID_MESSAGE": 153,
-        "L_MESSAGE": w0 >> 32 & 1023,
-        "T_TRAIN": w0 & 4294967295,
-        "NID_ENGINE": w1 >> 25,
-        "NID_C": w1 >> 15 & 1023,
-        "NID_BG": w1 >> 1 & 16383,
-        "Q_INFILL": w1 & 1,
-    }
+    t0: Tree = {"NID_MESSAGE": 153, "L_MESSAGE": w0 >> 32 & 1023, "T_TRAIN": w0 & 4294967295, "NID_ENGINE": w1 >> 25, "NID_C": w1 >> 15 & 1023, "NID_BG": w1 >> 1 & 16383, "Q_INFILL": w1 & 1}
     return t0, p
 
 
@@ -4193,12 +3638,7 @@ def read_message_154(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 1125899906842623
     p -= 24
     w1 = n >> p & 16777215
-    t0: Tree = {
-        "NID_MESSAGE": 154,
-        "L_MESSAGE": w0 >> 32 & 1023,
-        "T_TRAIN": w0 & 4294967295,
-        "NID_ENGINE": w1,
-    }
+    t0: Tree = {"NID_MESSAGE": 154, "L_MESSAGE": w0 >> 32 & 1023, "T_TRAIN": w0 & 4294967295, "NID_ENGINE": w1}
     return t0, p
 
 
@@ -4220,12 +3660,7 @@ def read_message_155(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 1125899906842623
     p -= 24
     w1 = n >> p & 16777215
-    t0: Tree = {
-        "NID_MESSAGE": 155,
-        "L_MESSAGE": w0 >> 32 & 1023,
-        "T_TRAIN": w0 & 4294967295,
-        "NID_ENGINE": w1,
-    }
+    t0: Tree = {"NID_MESSAGE": 155, "L_MESSAGE": w0 >> 32 & 1023, "T_TRAIN": w0 & 4294967295, "NID_ENGINE": w1}
     return t0, p
 
 
@@ -4247,12 +3682,7 @@ def read_message_156(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 1125899906842623
     p -= 24
     w1 = n >> p & 16777215
-    t0: Tree = {
-        "NID_MESSAGE": 156,
-        "L_MESSAGE": w0 >> 32 & 1023,
-        "T_TRAIN": w0 & 4294967295,
-        "NID_ENGINE": w1,
-    }
+    t0: Tree = {"NID_MESSAGE": 156, "L_MESSAGE": w0 >> 32 & 1023, "T_TRAIN": w0 & 4294967295, "NID_ENGINE": w1}
     return t0, p
 
 
@@ -4274,13 +3704,7 @@ def read_message_157(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 1125899906842623
     p -= 26
     w1 = n >> p & 67108863
-    t0: Tree = {
-        "NID_MESSAGE": 157,
-        "L_MESSAGE": w0 >> 32 & 1023,
-        "T_TRAIN": w0 & 4294967295,
-        "NID_ENGINE": w1 >> 2,
-        "Q_STATUS": w1 & 3,
-    }
+    t0: Tree = {"NID_MESSAGE": 157, "L_MESSAGE": w0 >> 32 & 1023, "T_TRAIN": w0 & 4294967295, "NID_ENGINE": w1 >> 2, "Q_STATUS": w1 & 3}
     return t0, p
 
 
@@ -4303,13 +3727,7 @@ def read_message_158(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 1125899906842623
     p -= 32
     w1 = n >> p & 4294967295
-    t0: Tree = {
-        "NID_MESSAGE": 158,
-        "L_MESSAGE": w0 >> 32 & 1023,
-        "T_TRAIN": w0 & 4294967295,
-        "NID_ENGINE": w1 >> 8,
-        "NID_TEXTMESSAGE": w1 & 255,
-    }
+    t0: Tree = {"NID_MESSAGE": 158, "L_MESSAGE": w0 >> 32 & 1023, "T_TRAIN": w0 & 4294967295, "NID_ENGINE": w1 >> 8, "NID_TEXTMESSAGE": w1 & 255}
     return t0, p
 
 
@@ -4332,12 +3750,7 @@ def read_message_159(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 1125899906842623
     p -= 24
     w1 = n >> p & 16777215
-    t0: Tree = {
-        "NID_MESSAGE": 159,
-        "L_MESSAGE": w0 >> 32 & 1023,
-        "T_TRAIN": w0 & 4294967295,
-        "NID_ENGINE": w1,
-    }
+    t0: Tree = {"NID_MESSAGE": 159, "L_MESSAGE": w0 >> 32 & 1023, "T_TRAIN": w0 & 4294967295, "NID_ENGINE": w1}
     return t0, p
 
 
@@ -4359,15 +3772,7 @@ def read_message_2(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 2251799813685247
     p -= 41
     w1 = n >> p & 2199023255551
-    t0: Tree = {
-        "NID_MESSAGE": 2,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1 >> 17,
-        "Q_SCALE": w1 >> 15 & 3,
-        "D_SR": w1 & 32767,
-    }
+    t0: Tree = {"NID_MESSAGE": 2, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1 >> 17, "Q_SCALE": w1 >> 15 & 3, "D_SR": w1 & 32767}
     return t0, p
 
 
@@ -4392,13 +3797,7 @@ def read_message_3(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 2251799813685247
     p -= 24
     w1 = n >> p & 16777215
-    t0: Tree = {
-        "NID_MESSAGE": 3,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1,
-    }
+    t0: Tree = {"NID_MESSAGE": 3, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1}
     return t0, p
 
 
@@ -4421,13 +3820,7 @@ def read_message_6(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 2251799813685247
     p -= 24
     w1 = n >> p & 16777215
-    t0: Tree = {
-        "NID_MESSAGE": 6,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1,
-    }
+    t0: Tree = {"NID_MESSAGE": 6, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1}
     return t0, p
 
 
@@ -4450,14 +3843,7 @@ def read_message_8(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 2251799813685247
     p -= 56
     w1 = n >> p & 72057594037927935
-    t0: Tree = {
-        "NID_MESSAGE": 8,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1 >> 32,
-        "T_TRAIN_REFERENCE": w1 & 4294967295,
-    }
+    t0: Tree = {"NID_MESSAGE": 8, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1 >> 32, "T_TRAIN_REFERENCE": w1 & 4294967295}
     return t0, p
 
 
@@ -4481,13 +3867,7 @@ def read_message_9(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 2251799813685247
     p -= 24
     w1 = n >> p & 16777215
-    t0: Tree = {
-        "NID_MESSAGE": 9,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1,
-    }
+    t0: Tree = {"NID_MESSAGE": 9, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1}
     return t0, p
 
 
@@ -4512,18 +3892,7 @@ def read_message_15(n: int, p: int) -> tuple[Tree, int]:
     w1 = n >> p & 281474976710655
     p -= 15
     w2 = n >> p & 32767
-    t0: Tree = {
-        "NID_MESSAGE": 15,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1 >> 24,
-        "NID_EM": w1 >> 20 & 15,
-        "Q_SCALE": w1 >> 18 & 3,
-        "D_REF": ((w1 >> 2 & 65535) ^ 32768) - 32768,
-        "Q_DIR": w1 & 3,
-        "D_EMERGENCYSTOP": w2,
-    }
+    t0: Tree = {"NID_MESSAGE": 15, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1 >> 24, "NID_EM": w1 >> 20 & 15, "Q_SCALE": w1 >> 18 & 3, "D_REF": ((w1 >> 2 & 65535) ^ 32768) - 32768, "Q_DIR": w1 & 3, "D_EMERGENCYSTOP": w2}
     return t0, p
 
 
@@ -4554,14 +3923,7 @@ def read_message_16(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 2251799813685247
     p -= 28
     w1 = n >> p & 268435455
-    t0: Tree = {
-        "NID_MESSAGE": 16,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1 >> 4,
-        "NID_EM": w1 & 15,
-    }
+    t0: Tree = {"NID_MESSAGE": 16, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1 >> 4, "NID_EM": w1 & 15}
     return t0, p
 
 
@@ -4585,14 +3947,7 @@ def read_message_18(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 2251799813685247
     p -= 28
     w1 = n >> p & 268435455
-    t0: Tree = {
-        "NID_MESSAGE": 18,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1 >> 4,
-        "NID_EM": w1 & 15,
-    }
+    t0: Tree = {"NID_MESSAGE": 18, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1 >> 4, "NID_EM": w1 & 15}
     return t0, p
 
 
@@ -4616,13 +3971,7 @@ def read_message_24(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 2251799813685247
     p -= 24
     w1 = n >> p & 16777215
-    t0: Tree = {
-        "NID_MESSAGE": 24,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1,
-    }
+    t0: Tree = {"NID_MESSAGE": 24, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1}
     return t0, p
 
 
@@ -4645,14 +3994,7 @@ def read_message_27(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 2251799813685247
     p -= 56
     w1 = n >> p & 72057594037927935
-    t0: Tree = {
-        "NID_MESSAGE": 27,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1 >> 32,
-        "T_TRAIN_REFERENCE": w1 & 4294967295,
-    }
+    t0: Tree = {"NID_MESSAGE": 27, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1 >> 32, "T_TRAIN_REFERENCE": w1 & 4294967295}
     return t0, p
 
 
@@ -4676,14 +4018,7 @@ def read_message_28(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 2251799813685247
     p -= 56
     w1 = n >> p & 72057594037927935
-    t0: Tree = {
-        "NID_MESSAGE": 28,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1 >> 32,
-        "T_TRAIN_REFERENCE": w1 & 4294967295,
-    }
+    t0: Tree = {"NID_MESSAGE": 28, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1 >> 32, "T_TRAIN_REFERENCE": w1 & 4294967295}
     return t0, p
 
 
@@ -4707,14 +4042,7 @@ def read_message_32(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 2251799813685247
     p -= 31
     w1 = n >> p & 2147483647
-    t0: Tree = {
-        "NID_MESSAGE": 32,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1 >> 7,
-        "M_VERSION": w1 & 127,
-    }
+    t0: Tree = {"NID_MESSAGE": 32, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1 >> 7, "M_VERSION": w1 & 127}
     return t0, p
 
 
@@ -4738,15 +4066,7 @@ def read_message_33(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 2251799813685247
     p -= 42
     w1 = n >> p & 4398046511103
-    t0: Tree = {
-        "NID_MESSAGE": 33,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1 >> 18,
-        "Q_SCALE": w1 >> 16 & 3,
-        "D_REF": ((w1 & 65535) ^ 32768) - 32768,
-    }
+    t0: Tree = {"NID_MESSAGE": 33, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1 >> 18, "Q_SCALE": w1 >> 16 & 3, "D_REF": ((w1 & 65535) ^ 32768) - 32768}
     return t0, p
 
 
@@ -4773,18 +4093,7 @@ def read_message_34(n: int, p: int) -> tuple[Tree, int]:
     w1 = n >> p & 576460752303423487
     p -= 15
     w2 = n >> p & 32767
-    t0: Tree = {
-        "NID_MESSAGE": 34,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1 >> 35,
-        "Q_SCALE": w1 >> 33 & 3,
-        "D_REF": ((w1 >> 17 & 65535) ^ 32768) - 32768,
-        "Q_DIR": w1 >> 15 & 3,
-        "D_TAFDISPLAY": w1 & 32767,
-        "L_TAFDISPLAY": w2,
-    }
+    t0: Tree = {"NID_MESSAGE": 34, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1 >> 35, "Q_SCALE": w1 >> 33 & 3, "D_REF": ((w1 >> 17 & 65535) ^ 32768) - 32768, "Q_DIR": w1 >> 15 & 3, "D_TAFDISPLAY": w1 & 32767, "L_TAFDISPLAY": w2}
     return t0, p
 
 
@@ -4815,13 +4124,7 @@ def read_message_37(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 2251799813685247
     p -= 24
     w1 = n >> p & 16777215
-    t0: Tree = {
-        "NID_MESSAGE": 37,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1,
-    }
+    t0: Tree = {"NID_MESSAGE": 37, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1}
     return t0, p
 
 
@@ -4844,13 +4147,7 @@ def read_message_39(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 2251799813685247
     p -= 24
     w1 = n >> p & 16777215
-    t0: Tree = {
-        "NID_MESSAGE": 39,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1,
-    }
+    t0: Tree = {"NID_MESSAGE": 39, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1}
     return t0, p
 
 
@@ -4873,13 +4170,7 @@ def read_message_40(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 2251799813685247
     p -= 24
     w1 = n >> p & 16777215
-    t0: Tree = {
-        "NID_MESSAGE": 40,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1,
-    }
+    t0: Tree = {"NID_MESSAGE": 40, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1}
     return t0, p
 
 
@@ -4902,13 +4193,7 @@ def read_message_41(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 2251799813685247
     p -= 24
     w1 = n >> p & 16777215
-    t0: Tree = {
-        "NID_MESSAGE": 41,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1,
-    }
+    t0: Tree = {"NID_MESSAGE": 41, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1}
     return t0, p
 
 
@@ -4931,13 +4216,7 @@ def read_message_43(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 2251799813685247
     p -= 24
     w1 = n >> p & 16777215
-    t0: Tree = {
-        "NID_MESSAGE": 43,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1,
-    }
+    t0: Tree = {"NID_MESSAGE": 43, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1}
     return t0, p
 
 
@@ -4960,14 +4239,7 @@ def read_message_45(n: int, p: int) -> tuple[Tree, int]:
     w0 = n >> p & 2251799813685247
     p -= 25
     w1 = n >> p & 33554431
-    t0: Tree = {
-        "NID_MESSAGE": 45,
-        "L_MESSAGE": w0 >> 33 & 1023,
-        "T_TRAIN": w0 >> 1 & 4294967295,
-        "M_ACK": w0 & 1,
-        "NID_LRBG": w1 >> 1,
-        "Q_ORIENTATION": w1 & 1,
-    }
+    t0: Tree = {"NID_MESSAGE": 45, "L_MESSAGE": w0 >> 33 & 1023, "T_TRAIN": w0 >> 1 & 4294967295, "M_ACK": w0 & 1, "NID_LRBG": w1 >> 1, "Q_ORIENTATION": w1 & 1}
     return t0, p
 
 
@@ -4989,18 +4261,7 @@ def write_message_45(t: Tree) -> tuple[int, int]:
 def read_balise(n: int, p: int) -> tuple[Tree, int]:
     p -= 50
     w0 = n >> p & 1125899906842623
-    t0: Tree = {
-        "Q_UPDOWN": w0 >> 49,
-        "M_VERSION": w0 >> 42 & 127,
-        "Q_MEDIA": w0 >> 41 & 1,
-        "N_PIG": w0 >> 38 & 7,
-        "N_TOTAL": w0 >> 35 & 7,
-        "M_DUP": w0 >> 33 & 3,
-        "M_MCOUNT": w0 >> 25 & 255,
-        "NID_C": w0 >> 15 & 1023,
-        "NID_BG": w0 >> 1 & 16383,
-        "Q_LINK": w0 & 1,
-    }
+    t0: Tree = {"Q_UPDOWN": w0 >> 49, "M_VERSION": w0 >> 42 & 127, "Q_MEDIA": w0 >> 41 & 1, "N_PIG": w0 >> 38 & 7, "N_TOTAL": w0 >> 35 & 7, "M_DUP": w0 >> 33 & 3, "M_MCOUNT": w0 >> 25 & 255, "NID_C": w0 >> 15 & 1023, "NID_BG": w0 >> 1 & 16383, "Q_LINK": w0 & 1}
     return t0, p
 
 
@@ -5016,45 +4277,16 @@ def write_balise(t: Tree) -> tuple[int, int]:
     x7 = t["NID_C"]
     x8 = t["NID_BG"]
     x9 = t["Q_LINK"]
-    if (
-        x0 >> 1
-        | x1 >> 7
-        | x2 >> 1
-        | x3 >> 3
-        | x4 >> 3
-        | x5 >> 2
-        | x6 >> 8
-        | x7 >> 10
-        | x8 >> 14
-        | x9 >> 1
-        or len(t) != 10
-    ):
+    if x0 >> 1 | x1 >> 7 | x2 >> 1 | x3 >> 3 | x4 >> 3 | x5 >> 2 | x6 >> 8 | x7 >> 10 | x8 >> 14 | x9 >> 1 or len(t) != 10:
         raise Misfit
-    v = (
-        x0 << 49
-        | x1 << 42
-        | x2 << 41
-        | x3 << 38
-        | x4 << 35
-        | x5 << 33
-        | x6 << 25
-        | x7 << 15
-        | x8 << 1
-        | x9
-    )
+    v = x0 << 49 | x1 << 42 | x2 << 41 | x3 << 38 | x4 << 35 | x5 << 33 | x6 << 25 | x7 << 15 | x8 << 1 | x9
     return v, b + 50
 
 
 def read_loop(n: int, p: int) -> tuple[Tree, int]:
     p -= 33
     w0 = n >> p & 8589934591
-    t0: Tree = {
-        "Q_UPDOWN": w0 >> 32,
-        "M_VERSION": w0 >> 25 & 127,
-        "Q_MEDIA": w0 >> 24 & 1,
-        "NID_C": w0 >> 14 & 1023,
-        "NID_LOOP": w0 & 16383,
-    }
+    t0: Tree = {"Q_UPDOWN": w0 >> 32, "M_VERSION": w0 >> 25 & 127, "Q_MEDIA": w0 >> 24 & 1, "NID_C": w0 >> 14 & 1023, "NID_LOOP": w0 & 16383}
     return t0, p
 
 
