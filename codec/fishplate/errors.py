@@ -8,10 +8,11 @@ start of the frame, where there is one), and reads as one line.
 
 from __future__ import annotations
 
+import copyreg
 from typing import TYPE_CHECKING
 
 if TYPE_CHECKING:
-    from collections.abc import Sequence
+    from collections.abc import Callable, Sequence
 
 Path = tuple[str | int, ...]
 
@@ -30,14 +31,31 @@ def path_text(path: Sequence[str | int]) -> str:
 class FishplateError(Exception):
     """Base of all errors raised on purpose.
 
-    `reason` is the sentence without the place, `path` and `bit` are the place.
+    `reason` is the sentence without the place, `path` and `bit` are the place. A reason that
+    takes work to find may be given as a function: it is called when the reason is first read.
     """
 
-    def __init__(self, reason: str, *, path: Path = (), bit: int | None = None) -> None:
-        super().__init__(reason)
-        self.reason = reason
+    def __init__(
+        self, reason: str | Callable[[], str], *, path: Path = (), bit: int | None = None
+    ) -> None:
+        super().__init__()
+        self._reason = reason
         self.path = path
         self.bit = bit
+
+    @property
+    def reason(self) -> str:
+        """The sentence without the place."""
+        if not isinstance(self._reason, str):
+            self._reason = self._reason()
+        return self._reason
+
+    def __reduce__(self) -> tuple[Callable[..., object], tuple[type], dict[str, object]]:
+        """Pickle with the reason worked out."""
+        return copyreg.__newobj__, (type(self),), {**self.__dict__, "_reason": self.reason}  # type: ignore[attr-defined]  # how pickle itself makes objects
+
+    def __repr__(self) -> str:
+        return f"{type(self).__name__}({str(self)!r})"
 
     def __str__(self) -> str:
         place = path_text(self.path)
@@ -66,7 +84,7 @@ class Truncated(DecodeError):
     kind = "truncated"
 
     def __init__(
-        self, reason: str, *, missing: int = 0, path: Path = (), bit: int | None = None
+        self, reason: str, *, missing: int, path: Path = (), bit: int | None = None
     ) -> None:
         super().__init__(reason, path=path, bit=bit)
         self.missing = missing
@@ -77,9 +95,7 @@ class Unknown(DecodeError):
 
     kind = "unknown"
 
-    def __init__(
-        self, reason: str, *, kind: str = kind, path: Path = (), bit: int | None = None
-    ) -> None:
+    def __init__(self, reason: str, *, kind: str, path: Path = (), bit: int | None = None) -> None:
         super().__init__(reason, path=path, bit=bit)
         self.kind = kind
 

@@ -37,6 +37,10 @@ if TYPE_CHECKING:
     from fishplate.standard.vocabulary import Variable
 
 
+LONG_BITS = 1024
+"""From here on it pays to cut off the bits that have been read, once an element."""
+
+
 @dataclass
 class _Entry:
     """One value of a run: where it goes in the tree, or which local keeps it."""
@@ -214,6 +218,9 @@ class ReaderSource(Source):
             self._way(unfolded, _Way(items, width))
             self.depth -= 1
             return
+        # Shifting a long packet copies all of it: leave what has been read behind.
+        self.line(f"    if p > {LONG_BITS}:")
+        self.line("        n &= (1 << p) - 1")
         self._block(node.nodes, element)
         self.line(f"    {items}.append({element})")
 

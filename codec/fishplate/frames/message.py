@@ -24,8 +24,12 @@ class Problem(NamedTuple):
     path: Path
     bit: int
     kind: str
-    message: str
     error: DecodeError
+
+    @property
+    def message(self) -> str:
+        """The sentence that says what is wrong."""
+        return self.error.reason
 
     def tree(self) -> Tree:
         """Return the problem as plain data."""

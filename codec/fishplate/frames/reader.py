@@ -23,7 +23,7 @@ from fishplate.standard import registry
 from fishplate.standard.vocabulary import TO_TRAIN, Field
 
 if TYPE_CHECKING:
-    from collections.abc import Mapping, Sequence
+    from collections.abc import Callable, Mapping, Sequence
 
     from fishplate.engine.runtime import Codec
     from fishplate.standard import Registry
@@ -40,7 +40,7 @@ HEADS = {"to-train": 23, "to-track": 21}
 class FrameReader:
     """One frame being read: `n` holds its low `left` bits that are still to be read."""
 
-    __slots__ = ("codec", "cut", "left", "message", "n", "size", "strict")
+    __slots__ = ("codec", "cut", "left", "message", "n", "problems", "size", "strict")
 
     def __init__(self, message: Message, codec: Codec, n: int, *, strict: bool) -> None:
         self.message = message
@@ -48,14 +48,15 @@ class FrameReader:
         self.n = n
         self.size = self.left = message.size
         self.strict = strict
+        self.problems: list[Problem] = []
         self.cut = False
 
     def trouble(self, error: DecodeError) -> None:
         """Raise an error, or note it as a problem when reading leniently."""
         if self.strict:
             raise error
-        problem = Problem(error.path, error.bit or 0, error.kind, error.reason, error)
-        self.message.problems = [*self.message.problems, problem]
+        self.problems.append(Problem(error.path, error.bit or 0, error.kind, error))
+        self.message.problems = self.problems
 
     def rest(self) -> Tree:
         """Take all bits that are left, unexplained."""
@@ -171,11 +172,17 @@ class FrameReader:
         self.left = left
         number = self._peek(8)
         nodes = self.registry.packets[self._key(number)].nodes
-        error = self.locate(nodes, self._here, length, self._path)
-        self._length_trouble(
-            f"L_PACKET is {length}, but the layout of packet {number} goes on: "
-            f"{path_text(error.path[2:])} has no bits left"
-        )
+        here, path = self._here, self._path
+
+        def reason() -> str:
+            error = self.locate(nodes, here, length, path)
+            return (
+                f"L_PACKET is {length}, but the layout of packet {number} goes on: "
+                f"{path_text(error.path[2:])} has no bits left"
+            )
+
+        # Walking a long packet takes many times as long as failing to read it.
+        self._length_trouble(reason)
         return self._kept(length)
 
     def _too_long(self, tree: Tree, part: int, extra: int, left: int) -> None:
@@ -189,7 +196,7 @@ class FrameReader:
             f"takes {length - extra} bits: {extra} too many"
         )
 
-    def _length_trouble(self, reason: str) -> None:
+    def _length_trouble(self, reason: str | Callable[[], str]) -> None:
         bit = self._here + HEADS[self.message.direction or TO_TRAIN] - LENGTH_BITS
         self.trouble(LengthMismatch(reason, path=(*self._path, "L_PACKET"), bit=bit))
 

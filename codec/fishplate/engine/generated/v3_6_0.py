@@ -114,6 +114,8 @@ def read_to_train_3(n: int, p: int) -> tuple[Tree, int]:
         e2["speed_steps"] = s2
         while c2:
             c2 -= 1
+            if p > 1024:
+                n &= (1 << p) - 1
             p -= 14
             w9 = n >> p & 16383
             e4: Tree = {"V_NVKVINT": w9 >> 7, "M_NVKVINT": w9 & 127}
@@ -129,6 +131,8 @@ def read_to_train_3(n: int, p: int) -> tuple[Tree, int]:
         t0["kv_sets"] = s1
         while c1:
             c1 -= 1
+            if p > 1024:
+                n &= (1 << p) - 1
             p -= 2
             w12 = n >> p & 3
             q2 = w12
@@ -152,6 +156,8 @@ def read_to_train_3(n: int, p: int) -> tuple[Tree, int]:
             e5["speed_steps"] = s3
             while c3:
                 c3 -= 1
+                if p > 1024:
+                    n &= (1 << p) - 1
                 p -= 14
                 w17 = n >> p & 16383
                 e7: Tree = {"V_NVKVINT": w17 >> 7, "M_NVKVINT": w17 & 127}
@@ -997,6 +1003,8 @@ def read_to_train_27(n: int, p: int) -> tuple[Tree, int]:
     t0["steps"] = s0
     while c0:
         c0 -= 1
+        if p > 1024:
+            n &= (1 << p) - 1
         p -= 28
         w2 = n >> p & 268435455
         c2 = w2 & 31
@@ -1485,6 +1493,8 @@ def read_to_train_51(n: int, p: int) -> tuple[Tree, int]:
         t0["areas"] = s0
         while c0:
             c0 -= 1
+            if p > 1024:
+                n &= (1 << p) - 1
             p -= 36
             w4 = n >> p & 68719476735
             c2 = w4 & 31
@@ -2430,6 +2440,8 @@ def read_to_train_79(n: int, p: int) -> tuple[Tree, int]:
     t0["positions"] = s0
     while c0:
         c0 -= 1
+        if p > 1024:
+            n &= (1 << p) - 1
         p -= 1
         w4 = n >> p & 1
         q1 = w4
