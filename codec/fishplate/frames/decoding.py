@@ -16,12 +16,15 @@ from fishplate.errors import (
 )
 from fishplate.frames import quick
 from fishplate.frames.message import Message
-from fishplate.frames.reader import (
+from fishplate.frames.reader import FrameReader
+from fishplate.frames.sizes import (
     END_FLAG,
+    FIRST_TO_TRACK,
     HEADS,
-    LENGTH_MASK,
+    LONGEST_PACKET,
+    LONGEST_PADDING,
+    MESSAGE_START,
     SHORTEST_PACKET,
-    FrameReader,
 )
 from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN
 from fishplate.versions import (
@@ -36,16 +39,6 @@ if TYPE_CHECKING:
     from fishplate.bits import Data
 
 MEDIA = ("balise", "loop", "radio")
-
-TELEGRAM_START_BITS = 9
-"""Q_UPDOWN, M_VERSION and Q_MEDIA: enough to tell a telegram from a loop message."""
-
-MESSAGE_START_BITS = 18
-"""NID_MESSAGE and L_MESSAGE, which every radio message of every version begins with."""
-
-LONGEST_PADDING = 7
-FIRST_TO_TRACK = 128
-"""Every issue numbers its radio messages to the trackside above this, to the train below."""
 
 
 def decode(
@@ -89,9 +82,9 @@ def decode(
 
 def _radio_or_telegram(n: int, size: int) -> str | None:
     """Tell the medium from the first bits and the length; None when they do not say."""
-    if size < MESSAGE_START_BITS:
+    if size < MESSAGE_START:
         return None
-    start = n >> size - MESSAGE_START_BITS
+    start = n >> size - MESSAGE_START
     if start >> 10 in _telegram_starts():
         return "loop" if start >> 9 & 1 else "balise"
     return "radio" if (start & 1023) << 3 == size else None
@@ -123,7 +116,7 @@ def _hops_to_the_end(telegram: Message) -> bool:
         word = n >> left - head & (1 << head) - 1
         if word >> head - 8 == END_FLAG:
             return True
-        left -= max(head, word & LENGTH_MASK)
+        left -= max(head, word & LONGEST_PACKET)
     return left >= SHORTEST_PACKET and n >> left - 8 & 255 == END_FLAG
 
 
@@ -182,12 +175,12 @@ def _radio(
     message.version_from = "caller" if version else "assumed"
     if direction is None:
         message.direction = direction = _direction_of(reader.codec, number)
-    if size >= MESSAGE_START_BITS:
-        promised = (n >> size - MESSAGE_START_BITS & 1023) << 3
+    if size >= MESSAGE_START:
+        promised = (n >> size - MESSAGE_START & 1023) << 3
         if promised != size:
             return _radio_misfit(reader, number, promised)
     read = reader.codec.read_message[direction].get(number)
-    if read is None or layouts is None or size < MESSAGE_START_BITS:
+    if read is None or layouts is None or size < MESSAGE_START:
         return _radio_misfit(reader, number, size)
     try:
         message.header, reader.left = read(n, size)
@@ -202,7 +195,7 @@ def _radio_misfit(reader: FrameReader, number: int, promised: int) -> Message:
     message = reader.message
     size = message.size
     direction = message.direction or TO_TRAIN
-    if size < MESSAGE_START_BITS:
+    if size < MESSAGE_START:
         nodes = reader.message_nodes(number)
         reader.trouble(reader.locate(nodes, 0, size, ("header",)))
         message.content = reader.rest()
@@ -215,7 +208,7 @@ def _radio_misfit(reader: FrameReader, number: int, promised: int) -> Message:
                 bit=SHORTEST_PACKET,
             )
         )
-        extra = min(size - promised, size - MESSAGE_START_BITS)
+        extra = min(size - promised, size - MESSAGE_START)
         message.surplus = reader.surplus(extra)
     read = reader.codec.read_message[direction].get(number)
     if read is None:
@@ -275,7 +268,7 @@ def _no_more(reader: FrameReader, width: int, reason: str) -> Truncated:
 
 def _keep_from_start(reader: FrameReader, number: int) -> None:
     """Keep a radio message as its number, its length and unexplained content."""
-    reader.left = reader.size - MESSAGE_START_BITS
+    reader.left = reader.size - MESSAGE_START
     length = reader.n >> reader.left & 1023
     reader.message.header = {"NID_MESSAGE": number, "L_MESSAGE": length}
     reader.message.content = reader.rest()

@@ -14,9 +14,16 @@ from fishplate.engine.runtime import MISFITS, Codec, codec
 from fishplate.engine.spell import Spelling, code_of
 from fishplate.errors import EncodeError, Path
 from fishplate.frames import quick
-from fishplate.frames.decoding import FIRST_TO_TRACK
 from fishplate.frames.message import Message, Tree
-from fishplate.frames.reader import END_FLAG, HEADS
+from fishplate.frames.sizes import (
+    END_FLAG,
+    FIRST_TO_TRACK,
+    HEADS,
+    LONGEST_MESSAGE,
+    LONGEST_PACKET,
+    MESSAGE_START,
+    TELEGRAM_SIZES,
+)
 from fishplate.standard import registry
 from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN
 from fishplate.versions import DEFAULT_VERSION, closest_layouts
@@ -26,18 +33,11 @@ if TYPE_CHECKING:
 
     from fishplate.standard.vocabulary import Node
 
-TELEGRAM_SIZES = (210, 830)
-"""User bits of a short and a long balise telegram (SUBSET-036 4.3.1.2)."""
-
 KEYS = quick.KEYS | {"filler", "surplus", "content", "problems"}
 """What a tree may hold at its top."""
 
 BESIDE = frozenset({"content", "surplus"})
 """Keys of a packet that are not its layout's."""
-
-LONGEST_PACKET = 8191
-LONGEST_MESSAGE = 1023
-MESSAGE_START_BITS = 18
 
 
 def encode_bits(
@@ -193,8 +193,8 @@ class _Writer:
                 expected=f"at most {LONGEST_MESSAGE} bytes",
                 got=length,
             )
-        if self.size >= MESSAGE_START_BITS:
-            shift = self.size - MESSAGE_START_BITS
+        if self.size >= MESSAGE_START:
+            shift = self.size - MESSAGE_START
             self.value = self.value & ~(LONGEST_MESSAGE << shift) | length << shift
         if "surplus" in tree:
             self._add(*read_blob(tree["surplus"], ("surplus",)))

@@ -11,18 +11,19 @@ from typing import TYPE_CHECKING, NamedTuple
 from fishplate.bits import blob
 from fishplate.engine.runtime import MISFITS, codec
 from fishplate.frames.message import Message, Tree
-from fishplate.frames.reader import HEADS
+from fishplate.frames.sizes import (
+    HEADS,
+    LONGEST_MESSAGE,
+    LONGEST_PACKET,
+    LONGEST_PADDING,
+    MESSAGE_START,
+)
 from fishplate.versions import DEFAULT_VERSION
 
 if TYPE_CHECKING:
     from collections.abc import Mapping
 
     from fishplate.engine.runtime import Reader, Writer
-
-LONGEST_PADDING = 7
-LENGTH_MASK = 8191
-LONGEST_MESSAGE = 1023
-MESSAGE_START_BITS = 18
 
 KEYS = frozenset({"medium", "direction", "version", "issue", "header", "packets", "padding"})
 
@@ -65,9 +66,9 @@ WAYS = _ways()
 
 def read_radio(n: int, size: int, direction: str | None) -> Message | None:
     """Read a radio message of `size` bits, or return None."""
-    if size < MESSAGE_START_BITS:
+    if size < MESSAGE_START:
         return None
-    start = n >> size - MESSAGE_START_BITS
+    start = n >> size - MESSAGE_START
     way = WAYS.get(start >> 10)
     if way is None or (start & 1023) << 3 != size or direction not in (None, way[0]):
         return None
@@ -77,7 +78,7 @@ def read_radio(n: int, size: int, direction: str | None) -> Message | None:
         header, left = read(n, size)
         while left > LONGEST_PADDING:
             word = n >> left - head
-            length = word & LENGTH_MASK
+            length = word & LONGEST_PACKET
             if length < head:
                 return None
             left -= length
@@ -114,7 +115,7 @@ def write_radio(tree: Tree) -> tuple[int, int] | None:
         value, size = write(header)
         for packet in tree["packets"]:
             part, width = writers[packet["NID_PACKET"]](packet)
-            if width > LENGTH_MASK or packet.get("L_PACKET", width) != width:
+            if width > LONGEST_PACKET or packet.get("L_PACKET", width) != width:
                 return None
             value = value << width | width << width - head | part
             size += width
@@ -131,4 +132,4 @@ def write_radio(tree: Tree) -> tuple[int, int] | None:
             return None
     except MISFITS:
         return None
-    return value | length << size - MESSAGE_START_BITS, size
+    return value | length << size - MESSAGE_START, size

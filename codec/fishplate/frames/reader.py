@@ -19,6 +19,7 @@ from fishplate.errors import (
     path_text,
 )
 from fishplate.frames.message import Message, Problem, Tree
+from fishplate.frames.sizes import END_FLAG, HEADS, LENGTH_BITS, LONGEST_PACKET, SHORTEST_PACKET
 from fishplate.standard import registry
 from fishplate.standard.vocabulary import TO_TRAIN, Field
 
@@ -28,13 +29,6 @@ if TYPE_CHECKING:
     from fishplate.engine.runtime import Codec
     from fishplate.standard import Registry
     from fishplate.standard.vocabulary import Node
-
-END_FLAG = 255
-SHORTEST_PACKET = 8
-LENGTH_BITS = 13
-LENGTH_MASK = (1 << LENGTH_BITS) - 1
-HEADS = {"to-train": 23, "to-track": 21}
-"""Width of NID_PACKET, Q_DIR (to the train only) and L_PACKET, by direction."""
 
 
 class FrameReader:
@@ -98,7 +92,7 @@ class FrameReader:
         while left >= SHORTEST_PACKET:
             if left >= head:
                 word = n >> left - head
-                length = word & LENGTH_MASK
+                length = word & LONGEST_PACKET
                 number = word >> head - 8 & 255
                 reader = readers.get(number)
                 if reader and head <= length <= left and number not in unmeasured:
@@ -128,7 +122,7 @@ class FrameReader:
         if self.left < head:
             self._cut(self.locate(self._head_nodes(), self._here, self.left, self._path))
             return False
-        length = self._peek(head) & LENGTH_MASK
+        length = self._peek(head) & LONGEST_PACKET
         if length > self.left:
             missing = length - self.left
             reason = f"L_PACKET is {length}, {missing} bits are missing"
@@ -210,7 +204,7 @@ class FrameReader:
         packet: Tree = {"NID_PACKET": word >> width - 8}
         if direction == TO_TRAIN:
             packet["Q_DIR"] = word >> width - 10 & 3
-        packet["L_PACKET"] = word >> content & LENGTH_MASK
+        packet["L_PACKET"] = word >> content & LONGEST_PACKET
         packet["content"] = blob(word & (1 << content) - 1, content)
         return packet
 

@@ -11,7 +11,7 @@ from fishplate.engine.runtime import codec
 from fishplate.engine.walk import Cursor, Row, Walk
 from fishplate.errors import DecodeError, Path, Truncated
 from fishplate.frames.decoding import decode
-from fishplate.frames.reader import HEADS
+from fishplate.frames.sizes import HEADS
 from fishplate.meaning import explain
 from fishplate.standard import Registry, registry
 from fishplate.standard.vocabulary import TO_TRAIN, Field, Opaque

@@ -8,8 +8,8 @@ from typing import TYPE_CHECKING, Annotated, Any, Literal
 from pydantic import BeforeValidator, ValidationError, create_model
 
 from fishplate.errors import EncodeError, Path
-from fishplate.frames.decoding import FIRST_TO_TRACK
 from fishplate.frames.encoding import KEYS
+from fishplate.frames.sizes import FIRST_TO_TRACK
 from fishplate.models.schema import (
     content_packet_schema,
     message_schema,
