@@ -26,8 +26,10 @@ if TYPE_CHECKING:
 
 STDIN = "-"
 LITERAL = re.compile(
-    r"\s*(?:0b[01\s]*[01]|base64:.*|(?:0[xX])?[0-9A-Fa-f\s]*[0-9A-Fa-f])\s*", re.DOTALL
+    r"\s*(?:0b[01\s]*[01]|base64:.*|0[xX].+|[0-9A-Fa-f\s]*[0-9A-Fa-f])\s*", re.DOTALL
 )
+TREE_SUFFIXES = frozenset({".yaml", ".yml"})
+"""Files that hold authored trees and never frames."""
 NEARLY_HEX = re.compile(r"\s*(?:0[xXbB])?[0-9A-Fa-f]{4}[^./\\]*")
 VERSION = re.compile(r"\d+\.\d+")
 SHOWN = 60
@@ -173,6 +175,8 @@ def read_frames(inputs: Sequence[str], given: Given, complaints: Complaints) -> 
 def _frames_of(text: str, given: Given) -> Iterator[Frame]:
     if text == STDIN:
         yield from read_stream(stdin(), "standard input", form=given.form, medium=given.medium)
+    elif is_file(text) and Path(text).suffix.lower() in TREE_SUFFIXES:
+        yield Frame(source=text, problem=DecodeError("holds trees, which `encode` reads"))
     elif is_file(text):
         yield from _with_progress(text, given)
     else:
