@@ -58,6 +58,8 @@ def read_bits(data: object, size: int | None = None) -> tuple[int, int]:
 
 
 def _cut(value: int, width: int, size: int) -> tuple[int, int]:
+    if type(size) is not int:
+        raise TypeError(f"bits is a whole number, not {size!r}")
     if not 0 <= size <= width:
         raise DecodeError(f"{size} bits are claimed, {width} are there", bit=width)
     if width - size >= BYTE:

@@ -8,6 +8,7 @@ step of the Q_SCALE that governs them: 0 is 0.1 m, 1 is 1 m, 2 is 10 m (SUBSET-0
 from __future__ import annotations
 
 import re
+from collections import Counter
 from decimal import Decimal
 from fractions import Fraction
 from functools import cache
@@ -59,9 +60,11 @@ UNITS: Mapping[str, Mapping[str, Fraction]] = MappingProxyType(
 )
 """Units a person may write for each declared unit, and how many of the declared one they are."""
 
-NUMBER = re.compile(r"(?P<number>[+-]?\d+(?:\.\d+)?)\s*(?P<unit>.*)", re.DOTALL)
-IDENTITY = re.compile(r"(\d+)\s*/\s*(\d+)")
-VERSION = re.compile(r"(\d+)\.(\d+)")
+NUMBER = re.compile(r"(?P<number>[+-]?[0-9]+(?:\.[0-9]+)?)\s*(?P<unit>.*)", re.DOTALL)
+IDENTITY = re.compile(r"([0-9]+)\s*/\s*([0-9]+)")
+VERSION = re.compile(r"([0-9]+)\.([0-9]+)")
+LEADING_WORDS = re.compile(r"[^,(]+(?=,| \()")
+QUANTITY_AT_END = re.compile(r"\D+ (\d+ \w+)")
 NO_BIT = "none"
 NO_DIGITS = "no digits"
 JOIN = " + "
@@ -136,7 +139,8 @@ def _explain_digits(variable: Variable, code: int) -> Meaning:
     found = _codes_of(variable, code)
     if found is not None:
         return Meaning(found.label, "spare" if found.kind == "spare" else "special")
-    return Meaning(f"{code:0{variable.bits // 4}X}".rstrip("F") or NO_DIGITS, "text")
+    digits = f"{code:0{variable.bits // 4}X}".rstrip("F") or NO_DIGITS
+    return Meaning(digits, "text" if digits.isdecimal() or digits == NO_DIGITS else "spare")
 
 
 def _explain_bits(variable: Variable, code: int) -> Meaning:
@@ -182,6 +186,8 @@ def parse(variable: Variable, given: object, scale: int | None = None) -> int | 
 def _parse_number(variable: Variable, text: str, match: re.Match[str], scale: int | None) -> int:
     factors = UNITS[variable.unit]
     unit = match["unit"].strip()
+    if unit and not variable.unit:
+        raise _error(variable, text, f"{text!r} is not a number")
     factor = {name.casefold(): each for name, each in factors.items()}.get(unit.casefold())
     if factor is None:
         names = " or ".join(factors)
@@ -233,20 +239,28 @@ def _labels(variable: Variable) -> Iterator[tuple[str, int]]:
 
 @cache
 def _label_table(variable: Variable) -> dict[str, int]:
-    return {label.casefold(): code for label, code in _labels(variable)}
+    """Return the code of every label, and of every short form that only one label has.
+
+    Short forms are what stands before a comma or a bracket ("now" for "now, on receipt"), and
+    the quantity at the end of a label that begins with words. Nothing else may be left out: a
+    "no" or "not" somewhere in a label turns its meaning round.
+    """
+    labels = [(label.casefold(), code) for label, code in _labels(variable)]
+    shorts = [(short, code) for label, code in labels for short in _short_forms(label)]
+    counts = Counter(short for short, _ in shorts)
+    table = {short: code for short, code in shorts if counts[short] == 1}
+    return table | dict(labels)
+
+
+def _short_forms(label: str) -> Iterator[str]:
+    if match := LEADING_WORDS.match(label):
+        yield match[0]
+    if match := QUANTITY_AT_END.fullmatch(label):
+        yield match[1]
 
 
 def _by_label(variable: Variable, text: str) -> int | None:
-    """Find a label: the whole, or the only one that holds the text as whole words."""
-    table = _label_table(variable)
-    wanted = text.casefold()
-    if wanted in table:
-        return table[wanted]
-    if not wanted or wanted[0] in "+-.0123456789":
-        return None
-    words = re.compile(rf"(?<!\w){re.escape(wanted)}(?!\w)")
-    found = [code for label, code in table.items() if words.search(label)]
-    return found[0] if len(found) == 1 else None
+    return _label_table(variable).get(text.casefold())
 
 
 def _no_such_label(variable: Variable, text: str) -> str:

@@ -2,6 +2,7 @@
 
 from __future__ import annotations
 
+import re
 from functools import cache
 
 from fishplate.engine.runtime import MODULES, codec
@@ -9,6 +10,10 @@ from fishplate.standard import registry
 
 DEFAULT_VERSION = "2.1"
 """The version that is assumed where neither the frame nor the caller says one."""
+
+
+NAME = re.compile(r"[0-7]\.(?:[0-9]|1[0-5])")
+"""How a version is written: X of 3 bits, Y of 4 bits."""
 
 
 def version_text(code: int) -> str:
@@ -32,9 +37,12 @@ def is_declared_invalid(code: int) -> bool:
 def closest_layouts(version: str) -> str | None:
     """Return the version whose layouts read `version`: itself, else the latest of the same X.
 
-    Versions that differ in Y only are compatible (SUBSET-026 3.17.3); None when none fits.
+    Versions that differ in Y only are compatible (SUBSET-026 3.17.3); None when none fits, or
+    when the text is no version at all.
     """
     if version in MODULES:
         return version
+    if not NAME.fullmatch(version):
+        return None
     same = [each for each in MODULES if each.partition(".")[0] == version.partition(".")[0]]
     return max(same, key=lambda each: int(each.partition(".")[2]), default=None)

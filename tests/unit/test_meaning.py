@@ -127,9 +127,11 @@ WRITTEN = [
     ("D_REF", -20, 1, -20),
     ("M_MODE", "On Sight", None, 1),
     ("M_MODE", "shunting", None, 3),  # whole label before the longer one that holds it
-    ("M_MODE", "passive", None, 15),
     ("M_LEVEL", "level NTC", None, 1),
-    ("M_LEVEL", "NTC", None, 1),
+    ("D_LEVELTR", "now", None, 32767),  # what stands before the comma
+    ("Q_NEWCOUNTRY", "other country or region", None, 1),
+    ("NC_CDTRAIN", "80 mm", None, 0),  # the quantity at the end of the label
+    ("NC_CDTRAIN", "180 mm", None, 5),
     ("M_AXLELOADCAT", "d2", None, 7),
     ("NC_TRAIN", [], None, 0),
     ("NC_TRAIN", "none", None, 0),
@@ -177,7 +179,9 @@ REFUSED = [
     ("V_STATIC", "120 mph", None, ("'mph'", "km/h")),
     ("V_STATIC", "120 m", None, ("'m'", "km/h")),
     ("T_EMA", "5 m", None, ("'m'", "min")),
-    ("M_MCOUNT", "5 m", None, ("'m'",)),
+    ("M_MCOUNT", "5 m", None, ("'5 m' is not a number",)),
+    ("NID_BG", "16/257", None, ("'16/257' is not a number",)),
+    ("V_STATIC", "\uff1120 km/h", None, ("is not a number",)),  # a fullwidth digit
     # scales
     ("D_GRADIENT", "5 m", None, ("Q_SCALE",)),
     ("D_GRADIENT", "5 m", 3, ("Q_SCALE",)),
@@ -188,6 +192,19 @@ REFUSED = [
     ("M_MODE", "", None, ("full supervision",)),
     ("M_AXLELOADCAT", "D", None, ("D2", "D3", "D4", "D4XL")),
     ("M_LEVEL", "spare", None, ("level 0",)),
+    ("M_LEVEL", "NTC", None, ("level NTC (see NID_NTC)",)),
+    # part of a label may mean its opposite: nothing but the short forms above may be left out
+    ("NID_TSR", "revocable", None, ("non revocable",)),
+    ("Q_LINKREACTION", "reaction", None, ("no reaction",)),
+    ("T_MAR", "on", None, ("no request on this criterion",)),
+    ("T_CYCRQST", "repetition", None, ("no repetition",)),
+    ("Q_TEXT", "protected", None, ("level crossing not protected",)),
+    ("M_VOLTAGE", "fitted", None, ("line not fitted with a traction system",)),
+    ("M_LOC", "at balise groups", None, ("not at balise groups",)),
+    ("Q_LENGTH", "integrity information", None, ("no integrity information",)),
+    ("M_MODE", "leading", None, ("non leading",)),
+    ("V_RELEASEDP", "on", None, ("release speed calculated on board",)),
+    ("M_TRACKCOND", "powerless section", None, ("lower pantograph", "main power switch")),
     ("NC_TRAIN", ["freight train"], None, ("freight train braked in P", "braked in G")),
     ("NC_TRAIN", ["tram"], None, ("passenger train",)),
     ("NC_TRAIN", [4], None, ("label",)),
@@ -307,7 +324,7 @@ def check_variable(name: str, most: int) -> None:
                 continue
             if variable.coding == "latin1":
                 continue  # characters are never written one by one
-            assert meaning.kind != "spare" or variable.coding == "bitset"
+            assert meaning.kind != "spare" or variable.coding in ("bitset", "digits")
             again = parse(variable, meaning.text, scale)
             if variable.coding == "digits":
                 assert isinstance(again, str)
@@ -324,3 +341,22 @@ def test_a_meaning_is_read_back_as_its_code(name: str) -> None:
 @pytest.mark.parametrize("name", VARIABLES)
 def test_meanings_of_wider_variables_are_read_back(name: str) -> None:
     check_variable(name, 1 << 13)
+
+
+@pytest.mark.parametrize("name", VARIABLES)
+def test_no_part_of_a_label_is_read_as_a_label(name: str) -> None:
+    """Leaving words out never gives a code, but for the short forms that are documented."""
+    variable = VARIABLES[name]
+    labels = {each.label.casefold() for each in variable.codes}
+    for codes in variable.codes:
+        words = codes.label.split(" ")
+        for start in range(len(words)):
+            for end in range(start + 1, len(words) + 1):
+                part = " ".join(words[start:end])
+                short = start == 0 and (
+                    words[end - 1].endswith(",") or "(" in "".join(words[end : end + 1])
+                )
+                if part.casefold() in labels or short or part[0].isdigit() or part[-1].isdigit():
+                    continue
+                with pytest.raises(EncodeError):
+                    parse(variable, part if variable.coding != "bitset" else [part])

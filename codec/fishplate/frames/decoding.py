@@ -29,6 +29,7 @@ from fishplate.frames.sizes import (
 from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN
 from fishplate.versions import (
     DEFAULT_VERSION,
+    NAME,
     closest_layouts,
     defined_codes,
     is_declared_invalid,
@@ -37,8 +38,10 @@ from fishplate.versions import (
 
 if TYPE_CHECKING:
     from fishplate.bits import Data
+    from fishplate.errors import Path
 
 MEDIA = ("balise", "loop", "radio")
+NOTHING_SAID = (None, None, None)
 
 
 def decode(
@@ -57,10 +60,8 @@ def decode(
     `version` ("2.1") are found from the bits where they are not given. Strict decoding raises
     the first `DecodeError`; otherwise the message holds all that is readable, plus `problems`.
     """
-    if medium is not None and medium not in MEDIA:
-        raise ValueError(f"medium is one of {', '.join(MEDIA)}, not {medium!r}")
-    if direction is not None and direction not in (TO_TRAIN, TO_TRACK):
-        raise ValueError(f"direction is {TO_TRAIN} or {TO_TRACK}, not {direction!r}")
+    if (medium, direction, version) != NOTHING_SAID:
+        _check_said(medium, direction, version)
     if type(data) is bytes and bits is None:
         n, size = int.from_bytes(data), len(data) * 8
     else:
@@ -78,6 +79,16 @@ def decode(
     if medium == "radio":
         return _radio(n, size, direction, version, strict=strict)
     return _telegram(n, size, medium, version, strict=strict)
+
+
+def _check_said(medium: object, direction: object, version: object) -> None:
+    """Raise `ValueError` for a medium, direction or version that is none."""
+    if medium is not None and medium not in MEDIA:
+        raise ValueError(f"medium is one of {', '.join(MEDIA)}, not {medium!r}")
+    if direction is not None and direction not in (TO_TRAIN, TO_TRACK):
+        raise ValueError(f"direction is {TO_TRAIN} or {TO_TRACK}, not {direction!r}")
+    if version is not None and not (isinstance(version, str) and NAME.fullmatch(version)):
+        raise ValueError(f"version is written as '2.1', not {version!r}")
 
 
 def _radio_or_telegram(n: int, size: int) -> str | None:
@@ -125,8 +136,8 @@ def _ambiguous(n: int, size: int, *, strict: bool) -> Message:
     reader = FrameReader(message, codec(DEFAULT_VERSION), n, strict=strict)
     reader.trouble(
         Ambiguous(
-            "the bits do not say what they are: no telegram that reaches its end flag, "
-            f"no radio message whose L_MESSAGE is {size / 8:g} bytes; give the medium",
+            "the bits do not say what they are: no telegram that reaches its end flag, and no "
+            f"radio message, since no L_MESSAGE says {size} bits; give the medium",
             bit=0,
         )
     )
@@ -146,9 +157,8 @@ def _telegram(n: int, size: int, medium: str, version: str | None, *, strict: bo
         message.content = reader.rest()
         return message
     if version is None:
-        code = message.header["M_VERSION"]
-        layouts = _layouts(message, version_text(code))
-        _say_if_newer(reader, code)
+        layouts = _layouts(message, version_text(message.header["M_VERSION"]))
+        _say_if_newer(reader, ("header", "M_VERSION"), bit=1)
     message.version_from = "caller" if version else "frame"
     if layouts is None:
         reader.trouble(_unknown_version(message, bit=1))
@@ -173,6 +183,7 @@ def _radio(
     layouts = _layouts(message, version or DEFAULT_VERSION)
     reader = FrameReader(message, layouts or codec(DEFAULT_VERSION), n, strict=strict)
     message.version_from = "caller" if version else "assumed"
+    _say_if_newer(reader, ("header",), bit=0)
     if direction is None:
         message.direction = direction = _direction_of(reader.codec, number)
     if size >= MESSAGE_START:
@@ -293,17 +304,18 @@ def _layouts(message: Message, version: str) -> Codec | None:
     return layouts
 
 
-def _say_if_newer(reader: FrameReader, code: int) -> None:
-    if code in defined_codes() or closest_layouts(version_text(code)) is None:
+def _say_if_newer(reader: FrameReader, path: Path, bit: int) -> None:
+    version = reader.message.version
+    closest = closest_layouts(version)
+    if closest is None or version in codec(closest).versions.values():
         return
-    closest = closest_layouts(version_text(code))
     reader.trouble(
         Unknown(
-            f"system version {version_text(code)} is not known; "
+            f"system version {version} is not known; "
             f"read with the layouts of {closest}, which has the same X",
             kind="newer-version",
-            path=("header", "M_VERSION"),
-            bit=1,
+            path=path,
+            bit=bit,
         )
     )
 

@@ -24,7 +24,7 @@ from fishplate.frames.sizes import (
     MESSAGE_START,
     TELEGRAM_SIZES,
 )
-from fishplate.standard import registry
+from fishplate.standard import known_versions, registry
 from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN
 from fishplate.versions import DEFAULT_VERSION, closest_layouts
 
@@ -56,8 +56,10 @@ def encode_bits(
         raise EncodeError(f"expected a message or a tree, got {type(tree).__name__}")
     if not tree.keys() <= KEYS:
         _refuse_keys(tree)
-    medium = tree.get("medium") or _medium_of(tree.get("header"))
-    writer = _Writer(tree, _codec_of(tree.get("version")), force=force)
+    medium = tree.get("medium")
+    if medium is None:
+        medium = _medium_of(tree.get("header"))
+    writer = _Writer(tree, _codec_of(tree), force=force)
     if medium is None:
         if set(tree) - {"problems", "content"}:
             raise EncodeError("expected balise, loop or radio", path=("medium",), expected="medium")
@@ -82,9 +84,26 @@ def _medium_of(header: object) -> str | None:
     return None
 
 
-def _codec_of(version: object) -> Codec:
-    closest = closest_layouts(str(version)) if version else None
-    return codec(closest or DEFAULT_VERSION)
+def _codec_of(tree: Tree) -> Codec:
+    version = tree.get("version", DEFAULT_VERSION)
+    closest = closest_layouts(version) if isinstance(version, str) else None
+    # A frame that no layout explains may be of any version: all but its start is content.
+    if closest is None and not ("content" in tree and isinstance(version, str)):
+        raise EncodeError(
+            f"there are no layouts for system version {version!r}",
+            path=("version",),
+            expected=", ".join(known_versions()),
+            got=version,
+        )
+    layouts = codec(closest or DEFAULT_VERSION)
+    if tree.get("issue", layouts.issue) != layouts.issue:
+        raise EncodeError(
+            f"version {version} is laid out as in issue {layouts.issue}",
+            path=("issue",),
+            expected=layouts.issue,
+            got=tree["issue"],
+        )
+    return layouts
 
 
 def _refuse_keys(tree: Tree) -> None:
@@ -115,8 +134,15 @@ class _Writer:
         if header is None and "content" in tree:
             return read_blob(tree["content"], ("content",))
         number: Any = header.get("NID_MESSAGE") if isinstance(header, dict) else None
+        if isinstance(header, dict) and type(number) is not int:
+            raise EncodeError(
+                f"expected the number of a message, got {number!r}",
+                path=("header", "NID_MESSAGE"),
+                expected="the number of a message",
+                got=number,
+            )
         direction = tree.get("direction") or self._direction_of(number)
-        if direction not in HEADS:
+        if not isinstance(direction, str) or direction not in HEADS:
             raise EncodeError(
                 f"expected {TO_TRAIN} or {TO_TRACK}, got {direction!r}",
                 path=("direction",),
@@ -173,7 +199,8 @@ class _Writer:
             self._add(*read_blob(tree["padding"], ("padding",)))
             if self.size % 8 and not self.force:
                 raise EncodeError(
-                    f"does not complete a byte: the message takes {self.size} bits",
+                    f"does not complete a byte: with it the message takes {self.size} bits; "
+                    "leave it out to have it computed",
                     path=("padding",),
                     expected="whole bytes",
                     got=tree["padding"],

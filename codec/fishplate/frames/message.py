@@ -68,7 +68,10 @@ class Message:
         self.packets: list[Tree] = []
 
     def tree(self) -> Tree:
-        """Return the message as plain data (the public form, also that of JSON and YAML)."""
+        """Return the message as plain data (the public form, also that of JSON and YAML).
+
+        Header and packets are those of the message, not copies: changing one changes the other.
+        """
         tree: Tree = {}
         for name in ("medium", "direction", "version", "issue", "header"):
             value = getattr(self, name)

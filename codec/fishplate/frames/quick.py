@@ -109,6 +109,7 @@ def write_radio(tree: Tree) -> tuple[int, int] | None:
             or tree.get("medium", "radio") != "radio"
             or tree.get("direction", way[0]) != way[0]
             or tree.get("version", DEFAULT_VERSION) != DEFAULT_VERSION
+            or tree.get("issue", way[6]) != way[6]
         ):
             return None
         _, head, _, write, _, writers, _ = way

@@ -52,7 +52,7 @@ def walk(
     bits: int | None = None,
     strict: bool = True,
 ) -> Iterator[FieldRow]:
-    """Yield the field rows of one frame; arguments as for `decode`.
+    """Return an iterator over the field rows of one frame; arguments as for `decode`.
 
     The rows cover every bit once. On broken input strict walking yields what stands before the
     trouble and then raises it; lenient walking goes on, with rows for bits that no layout
@@ -61,8 +61,7 @@ def walk(
     message = decode(
         data, medium=medium, direction=direction, version=version, bits=bits, strict=False
     )
-    value, size = read_bits(data, bits)
-    yield from walk_message(message, value, size, strict=strict)
+    return walk_message(message, *read_bits(data, bits), strict=strict)
 
 
 def walk_message(message: Message, value: int, size: int, *, strict: bool) -> Iterator[FieldRow]:

@@ -144,7 +144,8 @@ def codes_of(tree: object) -> dict[str, Any]:
 
 
 def _model_for(tree: dict[str, Any]) -> type[Scope]:
-    version = closest_layouts(str(tree.get("version", DEFAULT_VERSION))) or DEFAULT_VERSION
+    given = tree.get("version", DEFAULT_VERSION)
+    version = (closest_layouts(given) if isinstance(given, str) else None) or DEFAULT_VERSION
     header = tree.get("header")
     if not isinstance(header, dict):
         found = [f"; {each} is not part of a tree" for each in tree if each not in KEYS]
@@ -157,6 +158,9 @@ def _model_for(tree: dict[str, Any]) -> type[Scope]:
         return telegram_model(version)
     number = header.get("NID_MESSAGE")
     direction = tree.get("direction")
+    if direction is not None and direction not in (TO_TRAIN, TO_TRACK):
+        reason = f"expected {TO_TRAIN} or {TO_TRACK}, got {direction!r}"
+        raise EncodeError(reason, path=("direction",), got=direction)
     try:
         return message_model(number, direction, version)
     except (KeyError, TypeError):
@@ -182,7 +186,8 @@ def _encode_error(error: ValidationError) -> EncodeError:
     errors = []
     for each in error.errors(include_url=False):
         path: Path = each["loc"]
-        errors.append(EncodeError(each["msg"], path=path, expected="", got=each["input"]))
+        expected = each.get("ctx", {}).get("expected", "")
+        errors.append(EncodeError(each["msg"], path=path, expected=expected, got=each["input"]))
     first, *others = errors
     first.others = tuple(others)
     return first

@@ -55,10 +55,10 @@ _outer: ContextVar[Mapping[str, object] | None] = ContextVar("_outer", default=N
 """The codes of the enclosing scopes, which conditions may look at."""
 
 
-def custom_error(reason: str) -> PydanticCustomError:
+def custom_error(reason: str, expected: str = "") -> PydanticCustomError:
     """Return an error that pydantic shows with our sentence."""
     # Braces would be taken for placeholders of a template.
-    return PydanticCustomError("fishplate", "{reason}", {"reason": reason})
+    return PydanticCustomError("fishplate", "{reason}", {"reason": reason, "expected": expected})
 
 
 class Scope(BaseModel):
@@ -181,10 +181,27 @@ def _details(key: str, reason: str, value: object) -> InitErrorDetails:
 def _copied(error: Any, keys: Sequence[str]) -> InitErrorDetails:
     """Carry an error of pydantic over; its own sentences are kept."""
     reason = error["msg"]
-    if error["type"] == "extra_forbidden":
-        near = get_close_matches(str(error["loc"][-1]), keys, n=1)
-        reason = "not part of this layout" + (f"; did you mean {near[0]}?" if near else "")
-    return InitErrorDetails(type=custom_error(reason), loc=error["loc"], input=error["input"])
+    context = error.get("ctx", {})
+    match error["type"]:
+        case "extra_forbidden":
+            near = get_close_matches(str(error["loc"][-1]), keys, n=1)
+            reason = "not part of this layout" + (f"; did you mean {near[0]}?" if near else "")
+        case "list_type":
+            reason = f"expected a list, got {error['input']!r}"
+        case "too_short" | "too_long":
+            limit = context.get("min_length", context.get("max_length"))
+            word = "at least" if error["type"] == "too_short" else "at most"
+            reason = f"expected {word} {limit} elements, got {context['actual_length']}"
+        case "model_type" | "dict_type" | "model_attributes_type":
+            reason = f"expected a mapping, got {error['input']!r}"
+        case "literal_error":
+            reason = f"expected {context['expected']}, got {error['input']!r}"
+        case "invalid_key":
+            reason = "expected a key that is text"
+        case "missing":
+            reason = "missing"
+    details = custom_error(reason, context.get("expected", ""))
+    return InitErrorDetails(type=details, loc=error["loc"], input=error["input"])
 
 
 def _as_pydantic(function: Callable[[Any], Any]) -> BeforeValidator:
@@ -192,7 +209,7 @@ def _as_pydantic(function: Callable[[Any], Any]) -> BeforeValidator:
         try:
             return function(value)
         except EncodeError as error:
-            raise custom_error(error.reason) from None
+            raise custom_error(error.reason, error.expected) from None
 
     return BeforeValidator(validate)
 
