@@ -6,6 +6,7 @@ Unfolded, each way through is a run of known width, read or written in one piece
 
 from __future__ import annotations
 
+from collections import Counter
 from dataclasses import dataclass, replace
 from typing import TYPE_CHECKING
 
@@ -14,7 +15,7 @@ from fishplate.engine.walk import holds
 from fishplate.standard.vocabulary import Condition, Field, Node, When
 
 if TYPE_CHECKING:
-    from collections.abc import Mapping, Sequence
+    from collections.abc import Iterator, Mapping, Sequence
 
     from fishplate.standard.vocabulary import Variable
 
@@ -46,10 +47,20 @@ class Unfolded:
 
     def width(self, variables: Mapping[str, Variable]) -> int:
         """Return the width of the widest way through, in bits."""
+        return max(self._widths(variables))
+
+    def usual_width(self, variables: Mapping[str, Variable]) -> int:
+        """Return the width that most ways have, the narrower of two that stand equal."""
+        counts = Counter(self._widths(variables))
+        return max(counts, key=lambda width: (counts[width], -width))
+
+    def _widths(self, variables: Mapping[str, Variable]) -> Iterator[int]:
         own = sum(variables[each.variable].bits for each in self.fields)
         if self.true is None or self.false is None:
-            return own
-        return own + max(self.true.width(variables), self.false.width(variables))
+            yield own
+            return
+        for branch in (self.true, self.false):
+            yield from (own + width for width in branch._widths(variables))  # noqa: SLF001  same class
 
 
 def unfold(nodes: Sequence[Node], variables: Mapping[str, Variable]) -> Unfolded | None:

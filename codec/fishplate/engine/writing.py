@@ -7,15 +7,17 @@ caller lets the walk find the place. L_PACKET and L_MESSAGE are left 0 for the c
 
 from __future__ import annotations
 
-from dataclasses import dataclass
+from dataclasses import dataclass, replace
 from typing import TYPE_CHECKING
 
 from fishplate.engine.branches import Unfolded, unfold
 from fishplate.engine.source import Source, chunks, condition_text, condition_variables
 from fishplate.standard.vocabulary import (
     COUNT,
+    Condition,
     Field,
     Group,
+    Ne,
     Node,
     Opaque,
     Repeat,
@@ -39,6 +41,8 @@ class _Entry:
     variable: Variable
     expression: str
     local: str = ""
+    in_range: bool = False
+    """True where a condition has compared the value with a code; shifting it shows its type."""
 
 
 class WriterSource(Source):
@@ -174,8 +178,10 @@ class WriterSource(Source):
         if unfolded and not self._grows(node.nodes):
             unfolded = None
         if unfolded:
-            self._way(unfolded, [], element)
+            usual = unfolded.usual_width(self.variables)
+            self._way(unfolded, [], element, usual)
             self.depth -= 1
+            self.line(f"{self.b} += {usual} * {count}")
             self.width = outer
             return
         apart = self._grows(node.nodes)
@@ -196,8 +202,11 @@ class WriterSource(Source):
             self.line(f"{self.b} += {width} * {count}")
         self.width = outer
 
-    def _way(self, way: Unfolded, entries: list[_Entry], element: str) -> None:
-        """Write one way through an unfolded element as one run."""
+    def _way(self, way: Unfolded, entries: list[_Entry], element: str, usual: int) -> None:
+        """Write one way through an unfolded element as one run.
+
+        The loop adds the usual width for every element; other ways put that right.
+        """
         entries = list(entries)
         for field in way.fields:
             variable = self.variables[field.variable]
@@ -207,22 +216,23 @@ class WriterSource(Source):
                 self.scope[field.variable] = local
             entries.append(_Entry(variable, local, local))
         if way.condition and way.true and way.false:
-            name = way.condition.variable
-            bits = self.variables[name].bits
-            self.line(f"if {condition_text(way.condition, self.scope[name], bits)}:")
+            local = self.scope[way.condition.variable]
+            # Not the shorter test of one bit for truth: any text is true.
+            self.line(f"if {condition_text(way.condition, local, bits=0)}:")
             self.depth += 1
-            self._way(way.true, entries, element)
+            self._way(way.true, _compared(entries, way.condition), element, usual)
             self.depth -= 1
             self.line("else:")
             self.depth += 1
-            self._way(way.false, entries, element)
+            self._way(way.false, entries, element, usual)
             self.depth -= 1
             return
-        checks = " | ".join(_check(each) for each in entries)
+        checks = " | ".join(_check(each) for each in entries if not each.in_range)
         self._misfit(f"{checks} or len({element}) != {len(entries)}")
         width = sum(each.variable.bits for each in entries)
         self.line(f"{self.v} = {self.v} << {width}{_word(entries, width)}")
-        self.line(f"{self.b} += {width}")
+        if width != usual:
+            self.line(f"{self.b} += {width - usual}")
 
     def _grows(self, nodes: Sequence[Node]) -> bool:
         return not all(isinstance(each, Field) for each in nodes)
@@ -257,6 +267,14 @@ class WriterSource(Source):
             else:
                 self.line(f"{self.v} = {self.v} << {width}{word}")
             self.width += width
+
+
+def _compared(entries: Sequence[_Entry], condition: Condition) -> list[_Entry]:
+    """Return the entries as they are known where the condition holds."""
+    if isinstance(condition, Ne):
+        return list(entries)
+    name = condition.variable
+    return [replace(each, in_range=each.variable.name == name) for each in entries]
 
 
 def _looked_up(entry: _Entry) -> str:

@@ -456,16 +456,16 @@ def write_to_train_5(t: Tree) -> tuple[int, int]:
     for e0 in s0[1:]:
         x9 = e0["D_LINK"]
         x10 = e0["Q_NEWCOUNTRY"]
-        if x10:
+        if x10 == 1:
             x11 = e0["NID_C"]
             x12 = e0["NID_BG"]
             x13 = e0["Q_LINKORIENTATION"]
             x14 = e0["Q_LINKREACTION"]
             x15 = e0["Q_LOCACC"]
-            if x9 >> 15 | x10 >> 1 | x11 >> 10 | x12 >> 14 | x13 >> 1 | x14 >> 2 | x15 >> 6 or len(e0) != 7:
+            if x9 >> 15 | x11 >> 10 | x12 >> 14 | x13 >> 1 | x14 >> 2 | x15 >> 6 or len(e0) != 7:
                 raise Misfit
             v = v << 49 | x9 << 34 | x10 << 33 | x11 << 23 | x12 << 9 | x13 << 8 | x14 << 6 | x15
-            b += 49
+            b += 10
         else:
             x16 = e0["NID_BG"]
             x17 = e0["Q_LINKORIENTATION"]
@@ -474,7 +474,7 @@ def write_to_train_5(t: Tree) -> tuple[int, int]:
             if x9 >> 15 | x10 >> 1 | x16 >> 14 | x17 >> 1 | x18 >> 2 | x19 >> 6 or len(e0) != 6:
                 raise Misfit
             v = v << 39 | x9 << 24 | x10 << 23 | x16 << 9 | x17 << 8 | x18 << 6 | x19
-            b += 39
+    b += 39 * c0
     if len(t) != 4 + ("L_PACKET" in t):
         raise Misfit
     return v, b + 69
@@ -595,18 +595,18 @@ def write_to_train_12(t: Tree) -> tuple[int, int]:
     for e0 in s0:
         x5 = e0["L_SECTION"]
         x6 = e0["Q_SECTIONTIMER"]
-        if x6:
+        if x6 == 1:
             x7 = e0["T_SECTIONTIMER"]
             x8 = e0["D_SECTIONTIMERSTOPLOC"]
-            if x5 >> 15 | x6 >> 1 | x7 >> 10 | x8 >> 15 or len(e0) != 4:
+            if x5 >> 15 | x7 >> 10 | x8 >> 15 or len(e0) != 4:
                 raise Misfit
             v = v << 41 | x5 << 26 | x6 << 25 | x7 << 15 | x8
-            b += 41
+            b += 25
         else:
             if x5 >> 15 | x6 >> 1 or len(e0) != 2:
                 raise Misfit
             v = v << 16 | x5 << 1 | x6
-            b += 16
+    b += 16 * c0
     x9 = t["L_ENDSECTION"]
     x10 = t["Q_SECTIONTIMER"]
     if x9 >> 15 | x10 >> 1:
@@ -748,21 +748,21 @@ def write_to_train_13(t: Tree) -> tuple[int, int]:
     v = v << 34 | x7 << 20 | x8 << 5 | c0
     for e0 in s0[1:]:
         x9 = e0["Q_NEWCOUNTRY"]
-        if x9:
+        if x9 == 1:
             x10 = e0["NID_C"]
             x11 = e0["NID_BG"]
             x12 = e0["D_SR"]
-            if x9 >> 1 | x10 >> 10 | x11 >> 14 | x12 >> 15 or len(e0) != 4:
+            if x10 >> 10 | x11 >> 14 | x12 >> 15 or len(e0) != 4:
                 raise Misfit
             v = v << 40 | x9 << 39 | x10 << 29 | x11 << 15 | x12
-            b += 40
+            b += 10
         else:
             x13 = e0["NID_BG"]
             x14 = e0["D_SR"]
             if x9 >> 1 | x13 >> 14 | x14 >> 15 or len(e0) != 3:
                 raise Misfit
             v = v << 30 | x9 << 29 | x13 << 15 | x14
-            b += 30
+    b += 30 * c0
     if len(t) != k0 + ("L_PACKET" in t):
         raise Misfit
     return v, b + 75
@@ -847,18 +847,18 @@ def write_to_train_15(t: Tree) -> tuple[int, int]:
     for e0 in s0:
         x4 = e0["L_SECTION"]
         x5 = e0["Q_SECTIONTIMER"]
-        if x5:
+        if x5 == 1:
             x6 = e0["T_SECTIONTIMER"]
             x7 = e0["D_SECTIONTIMERSTOPLOC"]
-            if x4 >> 15 | x5 >> 1 | x6 >> 10 | x7 >> 15 or len(e0) != 4:
+            if x4 >> 15 | x6 >> 10 | x7 >> 15 or len(e0) != 4:
                 raise Misfit
             v = v << 41 | x4 << 26 | x5 << 25 | x6 << 15 | x7
-            b += 41
+            b += 25
         else:
             if x4 >> 15 | x5 >> 1 or len(e0) != 2:
                 raise Misfit
             v = v << 16 | x4 << 1 | x5
-            b += 16
+    b += 16 * c0
     x8 = t["L_ENDSECTION"]
     x9 = t["Q_SECTIONTIMER"]
     if x8 >> 15 | x9 >> 1:
@@ -1050,24 +1050,23 @@ def write_to_train_27(t: Tree) -> tuple[int, int]:
         if x5 == 0:
             x6 = e1["NC_CDDIFF"]
             x7 = e1["V_DIFF"]
-            if x5 >> 2 | x6 >> 4 | x7 >> 7 or len(e1) != 3:
+            if x6 >> 4 | x7 >> 7 or len(e1) != 3:
                 raise Misfit
             v = v << 13 | x5 << 11 | x6 << 7 | x7
-            b += 13
         else:
             if 1 <= x5 <= 2:
                 x8 = e1["NC_DIFF"]
                 x9 = e1["V_DIFF"]
-                if x5 >> 2 | x8 >> 4 | x9 >> 7 or len(e1) != 3:
+                if x8 >> 4 | x9 >> 7 or len(e1) != 3:
                     raise Misfit
                 v = v << 13 | x5 << 11 | x8 << 7 | x9
-                b += 13
             else:
                 x10 = e1["V_DIFF"]
                 if x5 >> 2 | x10 >> 7 or len(e1) != 2:
                     raise Misfit
                 v = v << 9 | x5 << 7 | x10
-                b += 9
+                b += -4
+    b += 13 * c1
     if len(e0) != 4:
         raise Misfit
     if c0 >> 5:
@@ -1090,24 +1089,23 @@ def write_to_train_27(t: Tree) -> tuple[int, int]:
             if x14 == 0:
                 x15 = e2["NC_CDDIFF"]
                 x16 = e2["V_DIFF"]
-                if x14 >> 2 | x15 >> 4 | x16 >> 7 or len(e2) != 3:
+                if x15 >> 4 | x16 >> 7 or len(e2) != 3:
                     raise Misfit
                 v0 = v0 << 13 | x14 << 11 | x15 << 7 | x16
-                b0 += 13
             else:
                 if 1 <= x14 <= 2:
                     x17 = e2["NC_DIFF"]
                     x18 = e2["V_DIFF"]
-                    if x14 >> 2 | x17 >> 4 | x18 >> 7 or len(e2) != 3:
+                    if x17 >> 4 | x18 >> 7 or len(e2) != 3:
                         raise Misfit
                     v0 = v0 << 13 | x14 << 11 | x17 << 7 | x18
-                    b0 += 13
                 else:
                     x19 = e2["V_DIFF"]
                     if x14 >> 2 | x19 >> 7 or len(e2) != 2:
                         raise Misfit
                     v0 = v0 << 9 | x14 << 7 | x19
-                    b0 += 9
+                    b0 += -4
+        b0 += 13 * c2
         if len(e0) != 4:
             raise Misfit
         v = v << b0 + 28 | v0
@@ -1238,16 +1236,16 @@ def write_to_train_41(t: Tree) -> tuple[int, int]:
         if x6 == 1:
             x7 = e0["NID_NTC"]
             x8 = e0["L_ACKLEVELTR"]
-            if x6 >> 3 | x7 >> 8 | x8 >> 15 or len(e0) != 3:
+            if x7 >> 8 | x8 >> 15 or len(e0) != 3:
                 raise Misfit
             v = v << 26 | x6 << 23 | x7 << 15 | x8
-            b += 26
+            b += 8
         else:
             x9 = e0["L_ACKLEVELTR"]
             if x6 >> 3 | x9 >> 15 or len(e0) != 2:
                 raise Misfit
             v = v << 18 | x6 << 15 | x9
-            b += 18
+    b += 18 * c0
     if len(t) != 5 + ("L_PACKET" in t):
         raise Misfit
     return v, b + 63
@@ -1400,15 +1398,15 @@ def write_to_train_46(t: Tree) -> tuple[int, int]:
         x3 = e0["M_LEVELTR"]
         if x3 == 1:
             x4 = e0["NID_NTC"]
-            if x3 >> 3 | x4 >> 8 or len(e0) != 2:
+            if x4 >> 8 or len(e0) != 2:
                 raise Misfit
             v = v << 11 | x3 << 8 | x4
-            b += 11
+            b += 8
         else:
             if x3 >> 3 or len(e0) != 1:
                 raise Misfit
             v = v << 3 | x3
-            b += 3
+    b += 3 * c0
     if len(t) != 3 + ("L_PACKET" in t):
         raise Misfit
     return v, b + 31
@@ -1449,19 +1447,19 @@ def write_to_train_49(t: Tree) -> tuple[int, int]:
     v = 49 << 20 | x0 << 18 | c0
     for e0 in s0:
         x1 = e0["Q_NEWCOUNTRY"]
-        if x1:
+        if x1 == 1:
             x2 = e0["NID_C"]
             x3 = e0["NID_BG"]
-            if x1 >> 1 | x2 >> 10 | x3 >> 14 or len(e0) != 3:
+            if x2 >> 10 | x3 >> 14 or len(e0) != 3:
                 raise Misfit
             v = v << 25 | x1 << 24 | x2 << 14 | x3
-            b += 25
+            b += 10
         else:
             x4 = e0["NID_BG"]
             if x1 >> 1 | x4 >> 14 or len(e0) != 2:
                 raise Misfit
             v = v << 15 | x1 << 14 | x4
-            b += 15
+    b += 15 * c0
     if len(t) != 3 + ("L_PACKET" in t):
         raise Misfit
     return v, b + 28
@@ -1743,19 +1741,19 @@ def write_to_train_63(t: Tree) -> tuple[int, int]:
     v = 63 << 20 | x0 << 18 | c0
     for e0 in s0:
         x1 = e0["Q_NEWCOUNTRY"]
-        if x1:
+        if x1 == 1:
             x2 = e0["NID_C"]
             x3 = e0["NID_BG"]
-            if x1 >> 1 | x2 >> 10 | x3 >> 14 or len(e0) != 3:
+            if x2 >> 10 | x3 >> 14 or len(e0) != 3:
                 raise Misfit
             v = v << 25 | x1 << 24 | x2 << 14 | x3
-            b += 25
+            b += 10
         else:
             x4 = e0["NID_BG"]
             if x1 >> 1 | x4 >> 14 or len(e0) != 2:
                 raise Misfit
             v = v << 15 | x1 << 14 | x4
-            b += 15
+    b += 15 * c0
     if len(t) != 3 + ("L_PACKET" in t):
         raise Misfit
     return v, b + 28
@@ -2119,36 +2117,36 @@ def write_to_train_70(t: Tree) -> tuple[int, int]:
             x11 = e0["Q_SUITABILITY"]
             if x11 == 0:
                 x12 = e0["M_LINEGAUGE"]
-                if x10 >> 15 | x11 >> 2 | x12 >> 8 or len(e0) != 3:
+                if x10 >> 15 | x12 >> 8 or len(e0) != 3:
                     raise Misfit
                 v = v << 25 | x10 << 10 | x11 << 8 | x12
-                b += 25
+                b += 8
             else:
                 if x11 == 1:
                     x13 = e0["M_AXLELOADCAT"]
-                    if x10 >> 15 | x11 >> 2 | x13 >> 7 or len(e0) != 3:
+                    if x10 >> 15 | x13 >> 7 or len(e0) != 3:
                         raise Misfit
                     v = v << 24 | x10 << 9 | x11 << 7 | x13
-                    b += 24
+                    b += 7
                 else:
                     if x11 == 2:
                         x14 = e0["M_VOLTAGE"]
                         if x14:
                             x15 = e0["NID_CTRACTION"]
-                            if x10 >> 15 | x11 >> 2 | x14 >> 4 | x15 >> 10 or len(e0) != 4:
+                            if x10 >> 15 | x14 >> 4 | x15 >> 10 or len(e0) != 4:
                                 raise Misfit
                             v = v << 31 | x10 << 16 | x11 << 14 | x14 << 10 | x15
-                            b += 31
+                            b += 14
                         else:
-                            if x10 >> 15 | x11 >> 2 | x14 >> 4 or len(e0) != 3:
+                            if x10 >> 15 | x14 >> 4 or len(e0) != 3:
                                 raise Misfit
                             v = v << 21 | x10 << 6 | x11 << 4 | x14
-                            b += 21
+                            b += 4
                     else:
                         if x10 >> 15 | x11 >> 2 or len(e0) != 2:
                             raise Misfit
                         v = v << 17 | x10 << 2 | x11
-                        b += 17
+        b += 17 * c0
         b += 22
         k0 += 1
     if len(t) != k0 + ("L_PACKET" in t):
@@ -3344,12 +3342,12 @@ def write_to_track_11(t: Tree) -> tuple[int, int]:
             if x8 >> 4 | x9 >> 10 or len(e0) != 2:
                 raise Misfit
             v = v << 14 | x8 << 10 | x9
-            b += 14
+            b += 10
         else:
             if x8 >> 4 or len(e0) != 1:
                 raise Misfit
             v = v << 4 | x8
-            b += 4
+    b += 4 * c0
     s1 = t["national_systems"]
     c1 = len(s1)
     if not c1 and not isinstance(s1, (list, tuple)):
