@@ -5,6 +5,8 @@ Layouts: SUBSET-026 issue 3.6.0, 7.4.2 and 8.4.2, the bits written by hand in ``
 
 from __future__ import annotations
 
+from decimal import Decimal
+
 import pytest
 
 import fishplate
@@ -85,3 +87,36 @@ def test_rows_of_radio_numbers_are_integers() -> None:
     walked = rows(balise(packet(42, body), END))
     row = next(each for each in walked if each.variable == "NID_RADIO")
     assert (row.raw, row.width, row.meaning) == (0x0049123456FFFFFF, 64, "0049123456")
+
+
+def test_rows_carry_physical_values() -> None:
+    """Steps of 5 km/h (7.5.1.157), of 10 m by Q_SCALE 2 (7.5.1.129), 255 no gradient (7.5.1.37)."""
+    data = fishplate.encode(
+        {
+            "header": {"NID_MESSAGE": 24, "T_TRAIN": 5, "M_ACK": 0, "NID_LRBG": 5},
+            "packets": [
+                {
+                    "NID_PACKET": 65,
+                    "Q_DIR": 1,
+                    "Q_SCALE": 2,
+                    "NID_TSR": 200,
+                    "D_TSR": 120,
+                    "L_TSR": 30,
+                    "Q_FRONT": 0,
+                    "V_TSR": 8,
+                },
+                {
+                    "NID_PACKET": 21,
+                    "Q_DIR": 1,
+                    "Q_SCALE": 1,
+                    "gradients": [{"D_GRADIENT": 0, "Q_GDIR": 1, "G_A": 255}],
+                },
+            ],
+        }
+    )
+    found = {row.path[-1]: (row.value, row.unit) for row in fishplate.walk(data)}
+    assert found["D_TSR"] == (Decimal(1200), "m")
+    assert found["V_TSR"] == (Decimal(40), "km/h")
+    assert found["T_TRAIN"] == (Decimal("0.05"), "s")
+    assert found["G_A"] == (None, "")
+    assert found["Q_FRONT"] == (None, "")

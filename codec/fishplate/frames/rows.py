@@ -12,17 +12,21 @@ from fishplate.engine.walk import Cursor, Row, Walk
 from fishplate.errors import DecodeError, Path, Truncated
 from fishplate.frames.decoding import decode
 from fishplate.frames.sizes import HEADS
-from fishplate.meaning import explain
+from fishplate.meaning import Meaning, explain
 from fishplate.standard import Registry, registry
 from fishplate.standard.vocabulary import TO_TRAIN, Field, Opaque
 from fishplate.versions import DEFAULT_VERSION, closest_layouts
 
 if TYPE_CHECKING:
     from collections.abc import Iterator, Sequence
+    from decimal import Decimal
 
     from fishplate.bits import Data
     from fishplate.frames.message import Message
     from fishplate.standard.vocabulary import Node
+
+
+NOT_EXPLAINED = "not explained"
 
 
 @dataclass(frozen=True, slots=True)
@@ -31,7 +35,8 @@ class FieldRow:
 
     `offset` and `width` are in bits from the start of the frame. `raw` is the code (D_REF
     signed), a text for X_TEXT, hex for bits that no layout explains (`variable` is None then).
-    `scale` is the code of the governing Q_SCALE, `meaning` what people read.
+    `scale` is the code of the governing Q_SCALE, `meaning` what people read; `value` is the
+    physical value in `unit` where the code is a quantity, None for labels and special meanings.
     """
 
     path: Path
@@ -41,6 +46,8 @@ class FieldRow:
     raw: int | str
     meaning: str
     scale: int | None = None
+    value: Decimal | None = None
+    unit: str = ""
 
 
 def walk(
@@ -75,8 +82,8 @@ def walk_message(message: Message, value: int, size: int, *, strict: bool) -> It
 
 
 @lru_cache(maxsize=4096)
-def _meaning(version: str, name: str, raw: int | str, scale: int | None) -> str:
-    return explain(registry(version).variables[name], raw, scale).text
+def _meaning(version: str, name: str, raw: int | str, scale: int | None) -> Meaning:
+    return explain(registry(version).variables[name], raw, scale)
 
 
 class _Frame:
@@ -91,9 +98,11 @@ class _Frame:
         self.unmeasured = codec(self.version).unmeasured[self._direction]
 
     def field_row(self, row: Row) -> FieldRow:
-        name = row.variable
-        meaning = _meaning(self.version, name, row.raw, row.scale) if name else "not explained"
-        return FieldRow(row.path, name, row.offset, row.width, row.raw, meaning, row.scale)
+        place = (row.path, row.variable, row.offset, row.width, row.raw)
+        if row.variable is None:
+            return FieldRow(*place, NOT_EXPLAINED)
+        meaning = _meaning(self.version, row.variable, row.raw, row.scale)
+        return FieldRow(*place, meaning.text, row.scale, meaning.value, meaning.unit)
 
     def _cursor(self, start: int, size: int) -> Cursor:
         return Cursor(self.value >> self.size - start - size & (1 << size) - 1, size, start)
