@@ -191,6 +191,8 @@ def _parse_number(variable: Variable, text: str, match: re.Match[str], scale: in
     factor = {name.casefold(): each for name, each in factors.items()}.get(unit.casefold())
     if factor is None:
         names = " or ".join(factors)
+        if unit.startswith(","):
+            raise _error(variable, text, f"{text!r}: write decimals with a point")
         reason = f"{text!r} is in {unit!r}, expected {names}" if unit else f"{text!r} has no unit"
         hint = "" if unit else f": write {text} {next(iter(factors))}, or the code as a number"
         raise _error(variable, text, reason + hint)
@@ -250,6 +252,14 @@ def _label_table(variable: Variable) -> dict[str, int]:
     counts = Counter(short for short, _ in shorts)
     table = {short: code for short, code in shorts if counts[short] == 1}
     return table | dict(labels)
+
+
+def accepted_labels(variable: Variable) -> list[str]:
+    """Return every label of a variable as people may write it, short forms included."""
+    table = _label_table(variable)
+    whole = [label for label, _ in _labels(variable)]
+    shorts = [short for label in whole for short in _short_forms(label)]
+    return whole + [each for each in shorts if each.casefold() in table and each not in whole]
 
 
 def _short_forms(label: str) -> Iterator[str]:

@@ -14,6 +14,7 @@ from typing import Any
 
 import jsonschema
 import pytest
+import yaml
 
 import fishplate
 from fishplate.errors import path_text
@@ -241,9 +242,8 @@ def test_unknown_packets_are_authored_as_content() -> None:
 def documents() -> list[tuple[str, dict[str, Any]]]:
     found = []
     for path in sorted((DEMO / "line").glob("*.yaml")):
-        for authored in read_yaml(path.read_text(encoding="utf-8")):
-            tree, _ = split_context(authored.tree)
-            found.append((f"{path.stem} line {authored.line}", tree))
+        trees = read_yaml(path.read_text(encoding="utf-8"))
+        found += [(f"{path.stem} line {each.line}", each.tree) for each in trees]
     return found
 
 
@@ -263,7 +263,8 @@ def test_the_demo_satisfies_models_and_schema() -> None:
         validator = validators.setdefault(schema["title"], jsonschema.Draft202012Validator(schema))
         errors = [each.message for each in validator.iter_errors(tree)]
         assert not errors, (name, errors[:2])
-        codes = codes_of(tree)
+        content, _ = split_context(tree)
+        codes = codes_of(content)
         assert not list(validator.iter_errors(codes)), name
         assert codes_of(codes) == codes, name
 
@@ -371,3 +372,47 @@ def errors_in(model: Any, tree: dict[str, Any]) -> list[tuple[str | int, ...]]:
     with pytest.raises(ValueError, match="validation error") as caught:
         model.model_validate(tree)
     return [each["loc"] for each in caught.value.errors()]  # type: ignore[attr-defined]  # pydantic's
+
+
+def test_the_schema_takes_the_demo_as_an_ordinary_yaml_reader_sees_it() -> None:
+    """An editor takes 2.1 for a number and knows nothing of our loader."""
+    validator = jsonschema.Draft202012Validator(json_schema("frame"))
+    for path in sorted((DEMO / "line").glob("*.yaml")):
+        tree = next(iter(yaml.safe_load_all(path.read_text(encoding="utf-8"))))
+        assert validator.is_valid(tree), path.name
+
+
+def test_short_forms_of_labels_are_in_the_schema() -> None:
+    validator = jsonschema.Draft202012Validator(json_schema("packet", "to-train", 41))
+    tree = {
+        "NID_PACKET": 41,
+        "Q_DIR": "nominal",
+        "Q_SCALE": "1 m",
+        "D_LEVELTR": "now",
+        "levels": [{"M_LEVELTR": "level NTC", "NID_NTC": 3, "L_ACKLEVELTR": "100 m"}],
+    }
+    assert validator.is_valid(tree)
+    assert packet_model(41).model_validate(tree).tree()["levels"][0]["M_LEVELTR"] == 1
+    del tree["levels"][0]["NID_NTC"]
+    assert not validator.is_valid(tree)
+
+
+@pytest.mark.parametrize(
+    ("tree", "path", "said"),
+    [
+        ({**AUTHORITY, "medum": "radio"}, "medum", "did you mean medium?"),
+        ({"medium": "euroloop", "header": {"Q_UPDOWN": 1}}, "medium", "balise, loop or radio"),
+        (authority(L_ENDSECTION="1,2 km"), "packets[0].L_ENDSECTION", "with a point"),
+    ],
+)
+def test_mistakes_are_explained(tree: dict[str, Any], path: str, said: str) -> None:
+    assert said in errors_of(tree)[path]
+
+
+@pytest.mark.parametrize("version", ["1.0", "3.0"])
+def test_packets_need_layouts_of_the_version_announced(version: str) -> None:
+    tree = next(each for _, each in documents() if each["medium"] == "balise")
+    tree, _ = split_context(tree)
+    tree["header"] = {**tree["header"], "M_VERSION": version}
+    with pytest.raises(fishplate.EncodeError, match=f"no layouts for system version {version}"):
+        fishplate.encode(tree)

@@ -26,7 +26,7 @@ from fishplate.frames.sizes import (
 )
 from fishplate.standard import known_versions, registry
 from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN
-from fishplate.versions import DEFAULT_VERSION, closest_layouts
+from fishplate.versions import DEFAULT_VERSION, closest_layouts, version_text
 
 if TYPE_CHECKING:
     from collections.abc import Sequence
@@ -237,6 +237,7 @@ class _Writer:
         except MISFITS:
             nodes = registry(self.codec.version).headers[medium].nodes
             raise self._misfit(nodes, header, ("header",)) from None
+        self._check_version(header["M_VERSION"])
         last = self.packets(TO_TRAIN)
         if "content" in tree:
             self._add(*read_blob(tree["content"], ("content",)))
@@ -253,6 +254,17 @@ class _Writer:
                 got=self.size,
             )
         return self.value, self.size
+
+    def _check_version(self, code: int) -> None:
+        """Refuse packets under a version whose layouts are not known."""
+        version = version_text(code)
+        if self.tree.get("packets") and closest_layouts(version) is None:
+            raise EncodeError(
+                f"there are no layouts for system version {version}",
+                path=("header", "M_VERSION"),
+                expected=", ".join(known_versions()),
+                got=code,
+            )
 
     def _fill(self, medium: str, length: int | None) -> None:
         if length is None and medium == "balise":

@@ -156,6 +156,9 @@ def _model_for(tree: dict[str, Any]) -> type[Scope]:
         return loop_model(version)
     if medium == "balise" or (medium is None and "NID_BG" in header and "Q_UPDOWN" in header):
         return telegram_model(version)
+    if medium not in (None, "radio"):
+        reason = f"expected balise, loop or radio, got {medium!r}"
+        raise EncodeError(reason, path=("medium",), expected="balise, loop or radio", got=medium)
     number = header.get("NID_MESSAGE")
     direction = tree.get("direction")
     if direction is not None and direction not in (TO_TRAIN, TO_TRACK):

@@ -1,7 +1,8 @@
 """JSON Schema (2020-12) of packets, messages, telegrams and loop messages, from the layouts.
 
-The schema is for authored input: codes as integers, quantities with their unit, labels written
-in full. It asks for a conditional field exactly when its condition holds.
+The schema is for authored input: codes as integers, quantities with their unit, labels in full
+or in their short form; time and note may stand beside a frame. It asks for a conditional field
+exactly when its condition holds.
 """
 
 from __future__ import annotations
@@ -10,7 +11,7 @@ from dataclasses import dataclass
 from typing import TYPE_CHECKING, Any
 
 from fishplate.engine.spell import COMPUTED, all_keys
-from fishplate.meaning import UNITS
+from fishplate.meaning import UNITS, accepted_labels, parse
 from fishplate.standard import registry as registry_of
 from fishplate.standard.vocabulary import (
     COUNT,
@@ -52,7 +53,7 @@ BITS_SCHEMA: Schema = {
 def variable_schema(variable: Variable) -> Schema:
     """Return the schema of one variable: its codes, quantities and labels."""
     about = f"{variable.title} (SUBSET-026 {variable.clause}, {variable.bits} bits)"
-    labels = [each.label for each in variable.codes if each.kind in {"value", "special"}]
+    labels = [] if variable.coding == "bitset" else accepted_labels(variable)
     if variable.coding == "digits":
         most = variable.bits // 4
         choices: list[Schema] = [{"type": "string", "pattern": f"^[0-9A-F]{{0,{most}}}$"}]
@@ -76,7 +77,8 @@ def _texts(variable: Variable) -> list[Schema]:
     if variable.coding == "group-identity":
         return [{"type": "string", "pattern": "^[0-9]+ ?/ ?[0-9]+$"}]
     if variable.coding == "version":
-        return [{"type": "string", "pattern": r"^[0-9]+\.[0-9]+$"}]
+        # Ordinary YAML and JSON take 2.1 for a number.
+        return [{"type": "string", "pattern": r"^[0-9]+\.[0-9]+$"}, {"type": "number"}]
     if variable.unit or variable.resolution:
         units = "|".join(UNITS[variable.unit])
         sign = "-?" if variable.coding == "signed" else ""
@@ -188,7 +190,7 @@ def _condition_schema(registry: Registry, condition: Condition) -> Schema:
     variable = registry.variables[condition.variable]
     codes = condition.codes if isinstance(condition, In) else (condition.code,)
     spellings: list[int | str] = list(codes)
-    spellings += [each.label for each in variable.codes if each.first in codes]
+    spellings += [each for each in accepted_labels(variable) if parse(variable, each) in codes]
     test: Schema = {"enum": spellings}
     if isinstance(condition, Ne):
         test = {"not": test}
@@ -238,12 +240,14 @@ def _frame(registry: Registry, medium: str, direction: str, header: Schema, titl
         "properties": {
             "medium": {"const": medium},
             "direction": {"const": direction},
-            "version": {"type": "string"},
+            "version": {"type": ["string", "number"]},
             "issue": {"type": "string"},
             "header": header,
             "packets": {"type": "array", "items": {"anyOf": packets}},
             **dict.fromkeys(rests, BITS_SCHEMA),
             "problems": {"type": "array"},
+            "time": {"type": ["string", "number"]},
+            "note": {"type": "string"},
         },
         "required": ["medium", "header"],
         "additionalProperties": False,

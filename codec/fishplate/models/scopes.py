@@ -84,7 +84,7 @@ class Scope(BaseModel):
         try:
             result = handler(value)
         except ValidationError as error:
-            keys = all_keys(cls.nodes)
+            keys = list(cls.model_fields)
             errors += [_copied(each, keys) for each in error.errors(include_url=False)]
         finally:
             _outer.reset(outer_token)
