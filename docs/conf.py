@@ -9,7 +9,9 @@ author = "the fishplate authors"
 release = version = fishplate.__version__
 language = "en_GB"
 
-extensions = ["myst_parser"]
+extensions = ["myst_parser", "sphinx.ext.autodoc"]
+autodoc_typehints = "none"  # signatures stay readable; the words are in the docstrings
+autodoc_member_order = "bysource"
 myst_enable_extensions = ["colon_fence", "deflist"]
 myst_heading_anchors = 3
 exclude_patterns = ["_build"]
