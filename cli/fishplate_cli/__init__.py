@@ -4,14 +4,21 @@ from __future__ import annotations
 
 import sys
 
-import fishplate
+INTERRUPTED = 130
 
 
 def main() -> None:
-    """Run the command line; `--version` is answered before anything else is imported."""
-    if sys.argv[1:2] == ["--version"]:
-        sys.stdout.write(f"fishplate {fishplate.__version__}\n")
-        return
-    from fishplate_cli.app import run  # noqa: PLC0415  loads typer
+    """Run the command line, guarded from the first statement on."""
+    try:
+        from fishplate_cli.process import run  # noqa: PLC0415  an interrupt may come here already
 
-    sys.exit(run(sys.argv[1:]))
+        code = run(sys.argv[1:])
+    except KeyboardInterrupt:
+        code = INTERRUPTED
+        if sys.stderr is not None:
+            try:
+                sys.stderr.write("fishplate: interrupted\n")
+            except OSError:
+                # Nobody can be told; the exit code says it.
+                code = INTERRUPTED
+    sys.exit(code)

@@ -7,7 +7,6 @@ could not be written, 130 an interrupt, 141 that whoever reads the output wants 
 
 from __future__ import annotations
 
-import os
 import sys
 from contextlib import contextmanager
 from importlib import import_module
@@ -17,6 +16,7 @@ import typer
 from typer.core import TyperGroup
 
 import fishplate
+from fishplate_cli.process import Ended, outside_failures
 from fishplate_cli.words import CAUTION, EXAMPLES, OVERVIEW, SHORT
 
 if TYPE_CHECKING:
@@ -26,11 +26,6 @@ COMMANDS = ("decode", "encode", "fields", "list", "about")
 MODULES = {"list": "listing"}
 """Where a command is defined, when the module does not bear its name."""
 
-OWN_FAILURE = 70
-NOT_WRITTEN = 74
-INTERRUPTED = 130
-NO_READER = 141
-DEBUG = "FISHPLATE_DEBUG"
 SETTINGS = {"help_option_names": ["--help", "-h"]}
 
 
@@ -55,9 +50,23 @@ class Commands(TyperGroup):
         )(module.command)
         return typer.main.get_command(alone)
 
+    def make_context(self, *arguments: Any, **more: Any) -> Any:  # noqa: D102
+        with _ending():
+            return super().make_context(*arguments, **more)
+
     def invoke(self, ctx: Any) -> Any:  # noqa: D102
-        with _failures_in_one_line():
+        with _ending():
             return super().invoke(ctx)
+
+
+@contextmanager
+def _ending() -> Iterator[None]:
+    """End the command as typer does, whatever happens to it from outside."""
+    try:
+        with outside_failures():
+            yield
+    except Ended as end:
+        raise typer.Exit(end.code) from None
 
 
 app = typer.Typer(
@@ -88,67 +97,3 @@ def fishplate_command(
     ] = False,
 ) -> None:
     """Do what comes before every command: nothing."""
-
-
-def run(arguments: list[str]) -> int:
-    """Run the command line with these arguments; return the exit code."""
-    if sys.stdout is None:
-        return NOT_WRITTEN
-    _set_up(sys.stdout)
-    try:
-        code = _called(arguments)
-        sys.stdout.flush()
-    except BrokenPipeError:
-        return _without_reader()
-    except Exception as error:
-        if os.environ.get(DEBUG):
-            raise
-        kind = type(error).__name__
-        text = " ".join(str(error).split())[:200]
-        sys.stderr.write(
-            f"fishplate: this is a fault of fishplate, please report it: {kind}: {text} "
-            f"({DEBUG}=1 shows where)\n"
-        )
-        return OWN_FAILURE
-    return code
-
-
-def _called(arguments: list[str]) -> int:
-    try:
-        app(args=arguments, prog_name="fishplate")
-    except SystemExit as end:
-        return end.code if isinstance(end.code, int) else 0
-    return 0
-
-
-def _set_up(stream: Any) -> None:
-    """Write UTF-8 to files and pipes, and what the terminal cannot show as escapes."""
-    if hasattr(stream, "reconfigure"):
-        encoding = None if stream.isatty() else "utf-8"
-        stream.reconfigure(encoding=encoding, errors="backslashreplace")
-
-
-@contextmanager
-def _failures_in_one_line() -> Iterator[None]:
-    """Turn what the world outside does to a running command into one line and an exit code."""
-    try:
-        yield
-    except BrokenPipeError:
-        raise typer.Exit(_without_reader()) from None
-    except KeyboardInterrupt:
-        sys.stderr.write("fishplate: interrupted\n")
-        raise typer.Exit(INTERRUPTED) from None
-    except OSError as error:
-        sys.stderr.write(f"fishplate: {error.strerror or error}\n")
-        raise typer.Exit(NOT_WRITTEN) from None
-
-
-def _without_reader() -> int:
-    """Give standard output somewhere to go, so that nothing complains at the very end."""
-    try:
-        nowhere = os.open(os.devnull, os.O_WRONLY)
-        os.dup2(nowhere, sys.stdout.fileno())
-    except (OSError, ValueError):
-        # No file behind standard output: then nothing can complain either.
-        return NO_READER
-    return NO_READER

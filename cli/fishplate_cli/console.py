@@ -11,6 +11,8 @@ from typing import TYPE_CHECKING
 
 import typer
 
+from fishplate.captures import time_text
+
 if TYPE_CHECKING:
     from fishplate.captures import Frame
     from fishplate.errors import FishplateError
@@ -57,6 +59,18 @@ def visible(text: str) -> str:
     )
 
 
+def counted(number: int, word: str) -> str:
+    """Return a number with the word for what it counts: 1 bit, 2 bits."""
+    return f"{number} {word}" if number == 1 else f"{number} {word}s"
+
+
+def shown_time(frame: Frame) -> str:
+    """Return the time of a frame for people, nothing where there is none."""
+    if frame.time is None:
+        return ""
+    return visible(frame.time if isinstance(frame.time, str) else time_text(frame.time))
+
+
 class Complaints:
     """Says on standard error what could not be done, and remembers that there was something."""
 
@@ -67,6 +81,10 @@ class Complaints:
         """Name one place and what is wrong there."""
         self.count += 1
         sys.stderr.write(f"{visible(place)}: {visible(str(reason))}\n")
+
+    def note(self, place: str, text: str) -> None:
+        """Say something that changes no exit code."""
+        sys.stderr.write(f"{visible(place)}: {visible(text)}\n")
 
     def about_frame(self, frame: Frame, problem: FishplateError | None = None) -> None:
         """Name a frame that could not be read."""

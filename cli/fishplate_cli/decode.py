@@ -10,6 +10,8 @@ from typing import TYPE_CHECKING, Annotated, Any
 
 import typer
 
+from fishplate.captures import time_text
+from fishplate.versions import DEFAULT_VERSION
 from fishplate_cli.console import Complaints, coloured, width, write
 from fishplate_cli.inputs import (
     DirectionOption,
@@ -104,9 +106,23 @@ def context(frame: Frame, message: Message, *, full: bool) -> dict[str, Any]:
         beside["note"] = frame.note
     if full:
         beside["bits"] = frame.bits
+        given = _given(frame, message)
+        if given:
+            beside["given"] = given
         if message.medium == "radio" and message.version_from == "assumed":
             beside["assumed"] = ["version"]
     return beside
+
+
+def _given(frame: Frame, message: Message) -> dict[str, str]:
+    """Return what the capture said of a frame and its tree does not say, or says otherwise."""
+    given = {}
+    if frame.direction and frame.direction != message.direction:
+        given["direction"] = frame.direction
+    said = message.medium == "radio" and frame.version == message.version != DEFAULT_VERSION
+    if frame.version and not said:
+        given["version"] = frame.version
+    return given
 
 
 def _dump(tree: dict[str, Any], indent: int | None = None) -> str:
@@ -115,7 +131,7 @@ def _dump(tree: dict[str, Any], indent: int | None = None) -> str:
     if not isinstance(time, Decimal):
         return json.dumps(tree, ensure_ascii=False, indent=indent)
     text = json.dumps({**tree, "time": None}, ensure_ascii=False, indent=indent)
-    return text.replace('"time": null', f'"time": {time}', 1)
+    return text.replace('"time": null', f'"time": {time_text(time)}', 1)
 
 
 def _jsonl(decoded: Decoded) -> None:
@@ -124,13 +140,14 @@ def _jsonl(decoded: Decoded) -> None:
 
 
 def _json(decoded: Decoded) -> None:
-    """Write the tree of one frame, or the list of several."""
+    """Write the tree of one frame, or the list of several or of none."""
     texts = (
         _dump(context(frame, message, full=False) | message.tree(), indent=2)
         for frame, message in decoded
     )
     first = next(texts, None)
     if first is None:
+        write("[]")
         return
     second = next(texts, None)
     if second is None:

@@ -21,6 +21,7 @@ from fishplate.standard.vocabulary import (
     Variable,
     When,
 )
+from fishplate_cli.console import counted
 from fishplate_cli.lookup import carriers, condition_text, users
 
 if TYPE_CHECKING:
@@ -28,7 +29,8 @@ if TYPE_CHECKING:
 
     from fishplate.standard import Registry
     from fishplate.standard.vocabulary import Codes, Node
-    from fishplate_cli.lookup import Found
+    from fishplate_cli.console import counted
+from fishplate_cli.lookup import Found
 
 GAP = "  "
 BITS = 6
@@ -68,7 +70,7 @@ class Description:
             case Header():
                 yield f"header of a {found.medium} {_unit(found)}"
                 yield from self._fact("clause", found.clause)
-                yield from self._fact("length", f"{found.bits} bits")
+                yield from self._fact("length", counted(found.bits, "bit"))
                 yield from self._layout(found.nodes)
 
     def _fact(self, name: str, text: str) -> Iterator[str]:
@@ -78,12 +80,14 @@ class Description:
     def _variable(self, variable: Variable) -> Iterator[str]:
         yield from wrap(f"{variable.name}: {variable.title}", self.width, subsequent_indent=GAP)
         yield from self._fact("clause", variable.clause)
-        yield from self._fact("coding", f"{variable.bits} bits, {CODINGS[variable.coding]}")
+        yield from self._fact(
+            "coding", f"{counted(variable.bits, 'bit')}, {CODINGS[variable.coding]}"
+        )
         if variable.unit:
-            step = "0.1, 1 or 10 (the governing Q_SCALE says which)"
-            if variable.resolution != SCALED:
-                step = variable.resolution or "1"
-            yield from self._fact("step", f"{step} {variable.unit}")
+            step = f"{variable.resolution or 1} {variable.unit}"
+            if variable.resolution == SCALED:
+                step = f"0.1, 1 or 10 {variable.unit}, as the governing Q_SCALE says"
+            yield from self._fact("step", step)
         if variable.plain:
             yield from self._fact("numbers", f"codes {variable.plain[0]} to {variable.plain[1]}")
         if variable.formerly:
@@ -212,7 +216,7 @@ def _title(found: Packet | RadioMessage | Header) -> str:
 
 def _length(book: Registry, nodes: Sequence[Node]) -> str:
     bits, fixed = _size(book, nodes)
-    return f"{bits} bits" if fixed else f"{bits} bits or more"
+    return counted(bits, "bit") if fixed else f"{bits} bits or more"
 
 
 def _size(book: Registry, nodes: Iterable[Node]) -> tuple[int, bool]:

@@ -2,36 +2,29 @@
 
 from __future__ import annotations
 
-import io
 import sys
 from decimal import Decimal
 from enum import StrEnum
-from pathlib import Path
-from typing import IO, TYPE_CHECKING, Annotated, Any, cast
+from itertools import chain
+from typing import TYPE_CHECKING, Annotated, Any
 
 import typer
 
 from fishplate.authoring import author_bits
 from fishplate.bits import to_bytes, to_hex
-from fishplate.captures import Frame, capture_line
-from fishplate.captures.lines import read_lines
+from fishplate.captures import Frame, capture_line, measures_itself
 from fishplate.errors import EncodeError
 from fishplate.frames import decode
-from fishplate.trees import (
-    Authored,
-    NumberText,
-    parse_json,
-    read_json,
-    read_json_lines,
-    read_yaml,
-    split_context,
-)
-from fishplate.versions import DEFAULT_VERSION
+from fishplate.trees import NumberText, split_context
+from fishplate.versions import DEFAULT_VERSION, NAME
+from fishplate_cli.authored import TreeForm, is_typed, read_trees
 from fishplate_cli.console import Complaints, shortened, visible, write
-from fishplate_cli.inputs import STDIN, is_file, stdin
+from fishplate_cli.inputs import STDIN, check_once, is_file
 
 if TYPE_CHECKING:
     from collections.abc import Iterable, Iterator
+
+    from fishplate.trees import Authored
 
 HELP = """\
 Write trees (JSON, JSON Lines or YAML; codes or meanings) as frames.
@@ -39,11 +32,11 @@ Write trees (JSON, JSON Lines or YAML; codes or meanings) as frames.
 Without --length a balise telegram is filled with ones to 210 or 830 bits, the shorter that holds
 it. Time, note and bits beside a tree are not encoded; capture writes time and note again."""
 
-LONGEST_LINE = 1 << 20
-"""Bytes of the longest line with a tree on it: trees are many times longer than their frames."""
-
-JSON_STARTS = ("{", "[")
-SUFFIXES = {".json": "json", ".jsonl": "jsonl", ".ndjson": "jsonl", ".yaml": "yaml", ".yml": "yaml"}
+DIRECTIONS = ("to-train", "to-track")
+NOT_SEPARABLE = (
+    "not written: among several frames as raw bits, only radio messages of the length that their "
+    "L_MESSAGE says can be told apart again"
+)
 
 
 class As(StrEnum):
@@ -53,14 +46,6 @@ class As(StrEnum):
     BITS = "bits"
     BIN = "bin"
     CAPTURE = "capture"
-
-
-class TreeForm(StrEnum):
-    """The forms trees come in."""
-
-    JSON = "json"
-    JSONL = "jsonl"
-    YAML = "yaml"
 
 
 def command(
@@ -96,14 +81,38 @@ def command(
     ] = None,
 ) -> None:
     """Encode trees."""
+    check_once(inputs)
     for text in inputs:
-        if text != STDIN and not text.lstrip().startswith(JSON_STARTS) and not is_file(text):
+        if text != STDIN and not is_typed(text) and not is_file(text):
             raise typer.BadParameter(f"{visible(shortened(text))!r} is no file, and no JSON tree")
     complaints = Complaints()
-    for text in inputs:
-        for frame in _frames(text, form, complaints, length=length, force=force):
-            _put(frame, view)
+    frames: Iterator[Frame] = chain.from_iterable(
+        _frames(text, form, complaints, length=length, force=force) for text in inputs
+    )
+    if view is As.BIN:
+        frames = _separable(frames, complaints)
+    for frame in frames:
+        _put(frame, view)
     complaints.end()
+
+
+def _separable(frames: Iterable[Frame], complaints: Complaints) -> Iterator[Frame]:
+    """Yield the only frame, or of several those that raw bits can be split into again."""
+    held: Frame | None = None
+    several = False
+    for frame in frames:
+        if held is None and not several and not measures_itself(frame):
+            held = frame
+            continue
+        several = True
+        for each in filter(None, (held, frame)):
+            if measures_itself(each):
+                yield each
+            else:
+                complaints.say(each.source, NOT_SEPARABLE)
+        held = None
+    if held is not None:
+        yield held
 
 
 def _put(frame: Frame, view: As) -> None:
@@ -125,13 +134,13 @@ def _frames(
     name = "standard input" if text == STDIN else text if is_file(text) else "typed tree"
     found = False
     try:
-        for authored in _trees(text, form):
+        for authored in read_trees(text, form):
             found = True
             place = _place(name, authored)
             try:
                 if authored.problem:
                     raise authored.problem
-                yield _encoded(authored.tree, length=length, force=force)
+                yield _encoded(authored.tree, place, length=length, force=force)
             except EncodeError as error:
                 for each in (error, *error.others):
                     complaints.say(place, each)
@@ -147,7 +156,7 @@ def _place(name: str, authored: Authored) -> str:
     return f"{name} tree {authored.document}"
 
 
-def _encoded(authored: dict[str, Any], *, length: int | None, force: bool) -> Frame:
+def _encoded(authored: dict[str, Any], place: str, *, length: int | None, force: bool) -> Frame:
     tree, beside = split_context(authored)
     value, bits = author_bits(tree, length=length, force=force)
     data = to_bytes(value, bits)
@@ -157,20 +166,41 @@ def _encoded(authored: dict[str, Any], *, length: int | None, force: bool) -> Fr
         medium, direction = found.medium, found.direction
     version = tree.get("version")
     stated = medium == "radio" and version not in (None, DEFAULT_VERSION)
+    given = _given(beside.get("given"))
     return Frame(
         data,
         bits,
         _time(beside.get("time")),
         medium,
-        direction,
-        str(version) if stated else None,
+        given.get("direction", direction),
+        given.get("version", str(version) if stated else None),
         _note(beside.get("note")),
+        source=place,
     )
+
+
+def _given(given: object) -> dict[str, str]:
+    """Return what a capture said of the frame, as `decode --as jsonl` keeps it."""
+    if given is None:
+        return {}
+    if not isinstance(given, dict) or not given.keys() <= {"direction", "version"}:
+        raise EncodeError("expected direction or version", path=("given",), got=given)
+    if given.get("direction", DIRECTIONS[0]) not in DIRECTIONS:
+        reason = f"expected {' or '.join(DIRECTIONS)}"
+        raise EncodeError(reason, path=("given", "direction"), got=given["direction"])
+    if not NAME.fullmatch(str(given.get("version", DEFAULT_VERSION))):
+        reason = f"expected a version such as {DEFAULT_VERSION}"
+        raise EncodeError(reason, path=("given", "version"), got=given["version"])
+    return {name: str(value) for name, value in given.items()}
 
 
 def _time(given: object) -> str | int | Decimal | None:
     if isinstance(given, NumberText):
-        return Decimal(given)
+        try:
+            return Decimal(given)
+        except ArithmeticError:
+            reason = f"{shortened(given)} is no number that can be held"
+            raise EncodeError(reason, path=("time",), got=given) from None
     if isinstance(given, bool) or not isinstance(given, (str, int, type(None))):
         raise EncodeError("expected text or seconds", path=("time",), got=given)
     return given
@@ -180,66 +210,3 @@ def _note(given: object) -> str:
     if not isinstance(given, (str, type(None))):
         raise EncodeError("expected text", path=("note",), got=given)
     return given or ""
-
-
-def _trees(text: str, form: TreeForm | None) -> Iterator[Authored]:
-    if text == STDIN:
-        yield from _from_stream(stdin(), form)
-    elif is_file(text):
-        suffix = Path(text).suffix.lower()
-        known = TreeForm(SUFFIXES[suffix]) if suffix in SUFFIXES else None
-        with Path(text).open("rb") as stream:
-            yield from _from_stream(stream, form or known)
-    else:
-        yield from read_json(text)
-
-
-def _from_stream(stream: IO[bytes], form: TreeForm | None) -> Iterator[Authored]:
-    if form is None:
-        form, stream = _sniffed(stream)
-    if form is TreeForm.JSONL:
-        yield from read_json_lines(_numbered(stream))
-        return
-    try:
-        text = stream.read().decode("utf-8-sig")
-    except UnicodeDecodeError as error:
-        problem = EncodeError(f"byte {error.start + 1} of the file is not UTF-8")
-        yield Authored(1, 0, None, problem)
-        return
-    yield from read_yaml(text) if form is TreeForm.YAML else read_json(text)
-
-
-def _sniffed(stream: IO[bytes]) -> tuple[TreeForm, IO[bytes]]:
-    """Tell the form by the first line that holds anything; return the stream unread."""
-    start = b""
-    while (line := stream.readline(LONGEST_LINE)) and not line.strip():
-        start += line
-    again = cast("IO[bytes]", _Again(start + line, stream))
-    text = line.decode(errors="replace").removeprefix("\ufeff").lstrip()
-    if not text.startswith(JSON_STARTS):
-        return TreeForm.YAML, again
-    try:
-        whole = isinstance(parse_json(text), dict)
-    except EncodeError:
-        return TreeForm.JSON, again
-    return TreeForm.JSONL if whole else TreeForm.JSON, again
-
-
-class _Again:
-    """A stream whose beginning has been looked at already."""
-
-    def __init__(self, start: bytes, stream: IO[bytes]) -> None:
-        self.start = io.BytesIO(start)
-        self.stream = stream
-
-    def readline(self, size: int = -1) -> bytes:
-        return self.start.readline(size) or self.stream.readline(size)
-
-    def read(self) -> bytes:
-        return self.start.read() + self.stream.read()
-
-
-def _numbered(stream: IO[bytes]) -> Iterable[tuple[int, str, EncodeError | None]]:
-    for line in read_lines(stream, LONGEST_LINE):
-        problem = EncodeError(line.problem.reason) if line.problem else None
-        yield line.number, line.text, problem

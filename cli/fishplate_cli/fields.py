@@ -11,7 +11,16 @@ import typer
 
 from fishplate.errors import path_text
 from fishplate.frames.rows import walk_message
-from fishplate_cli.console import USUAL, Complaints, coloured, style, visible, width, write
+from fishplate_cli.console import (
+    USUAL,
+    Complaints,
+    coloured,
+    shown_time,
+    style,
+    visible,
+    width,
+    write,
+)
 from fishplate_cli.inputs import (
     DirectionOption,
     FormOption,
@@ -38,6 +47,9 @@ without gap: bits that no layout explains have a row without variable."""
 
 LONGEST_PLACE = 40
 LONGEST_RAW = 20
+NARROWEST_MEANING = 18
+NUMBERS = "   bit  bits  "
+GAP = "  "
 
 
 class As(StrEnum):
@@ -96,44 +108,58 @@ def table(frame: Frame, message: Message, rows: list[FieldRow]) -> Iterator[str]
     """Yield the rows of one frame as a table."""
     book = book_of(message)
     first, second = heading(message, book)
-    time = "" if frame.time is None else f"  {visible(str(frame.time))}"
-    title = f"frame {frame.index}{time}  {first}"
-    yield style(title, "bold", colour=coloured())
-    yield from wrap(f"  {second}", width(), subsequent_indent="    ")
-    places = [
-        f"  {path_text(row.path[2:])}" if _in_packet(row) else path_text(row.path) for row in rows
-    ]
-    raws = [_raw(row) for row in rows]
-    place_width = min(max(map(len, places), default=0), LONGEST_PLACE)
-    raw_width = min(max(map(len, raws), default=0), LONGEST_RAW)
     columns = max(width(), USUAL)
-    head = f"   bit  bits  {'field':<{place_width}}  {'raw':>{raw_width}}  meaning"
+    title = "  ".join(filter(None, (f"frame {frame.index}", shown_time(frame), first)))
+    for each in wrap(title, columns, subsequent_indent="    "):
+        yield style(each, "bold", colour=coloured())
+    yield from wrap(f"  {second}", width(), subsequent_indent="    ")
+    cells = [(_place(row), _raw(row)) for row in rows]
+    raw_width = min(max(len("raw"), *(len(raw) for _, raw in cells), 0), LONGEST_RAW)
+    room = columns - len(NUMBERS) - len(GAP) - raw_width - len(GAP) - NARROWEST_MEANING
+    place_width = min(max((len(place) for place, _ in cells), default=0), LONGEST_PLACE, room)
+    head = f"{NUMBERS}{'field':<{place_width}}{GAP}{'raw':>{raw_width}}{GAP}meaning"
     if rows:
         yield style(head, "faint", colour=coloured())
-    for row, place, raw in zip(rows, places, raws, strict=True):
+    for row, (place, raw) in zip(rows, cells, strict=True):
         if _in_packet(row) and row.path[1:] == (row.path[1], "NID_PACKET"):
             title = packet_title(message.packets[int(row.path[1])], message.direction or "", book)
             yield from wrap(f"  packets[{row.path[1]}]: {title}", columns, subsequent_indent="    ")
-        start = f"{row.offset:>6}  {row.width:>4}  {place:<{place_width}}  {raw:>{raw_width}}  "
-        said = unexplained(str(row.raw), row.width) if row.variable is None else row.meaning
-        yield from _wrapped(
-            start, "" if isinstance(row.raw, str) and row.variable else said, columns
-        )
+        start = f"{row.offset:>6}  {row.width:>4}  {place:<{place_width}}"
+        if len(place) > place_width:
+            # A long place has a line of its own.
+            yield start
+            start = " " * (len(start) - len(place) + place_width)
+        start = f"{start}  {raw:>{raw_width}}  " if raw else f"{start}  "
+        yield from _wrapped(start, _said(row), columns)
 
 
 def _in_packet(row: FieldRow) -> bool:
     return row.path[0] == "packets"
 
 
+def _place(row: FieldRow) -> str:
+    return f"  {path_text(row.path[2:])}" if _in_packet(row) else path_text(row.path)
+
+
+def _is_text(row: FieldRow) -> bool:
+    return row.variable is not None and isinstance(row.raw, str)
+
+
 def _raw(row: FieldRow) -> str:
+    """Return the code; a text takes the place of code and meaning, and is no code."""
     if row.variable is None:
         return "-"
-    return quoted(row.raw) if isinstance(row.raw, str) else str(row.raw)
+    return "" if _is_text(row) else str(row.raw)
+
+
+def _said(row: FieldRow) -> str:
+    if row.variable is None:
+        return unexplained(str(row.raw), row.width)
+    return quoted(str(row.raw)) if _is_text(row) else row.meaning
 
 
 def _wrapped(start: str, text: str, columns: int) -> Iterator[str]:
-    space = max(columns - len(start), LONGEST_RAW)
-    lines = wrap(visible(text), space) or [""]
+    lines = wrap(visible(text), max(columns - len(start), 1)) or [""]
     yield (start + lines[0]).rstrip()
     for line in lines[1:]:
         yield " " * len(start) + line

@@ -19,7 +19,7 @@ from fishplate.frames import decode
 from fishplate_cli.console import Complaints, Progress, shortened, visible
 
 if TYPE_CHECKING:
-    from collections.abc import Iterator, Sequence
+    from collections.abc import Collection, Iterator, Sequence
 
     from fishplate.captures import Form
     from fishplate.frames import Message
@@ -33,6 +33,8 @@ TREE_SUFFIXES = frozenset({".yaml", ".yml"})
 NEARLY_HEX = re.compile(r"\s*(?:0[xXbB])?[0-9A-Fa-f]{4}[^./\\]*")
 VERSION = re.compile(r"\d+\.\d+")
 SHOWN = 60
+NAMED = 8
+"""Keys and columns that are named where a file has some that mean nothing."""
 BYTE = 8
 
 
@@ -115,13 +117,20 @@ class Given:
         self.form: Form | None = form.value if form else None
 
     def decode(self, frame: Frame) -> Message:
-        """Decode a frame leniently."""
+        """Decode a frame leniently; telegrams say their version themselves."""
+        medium = frame.medium or self.medium
+        version = frame.version or self.version
+        if version is not None and medium is None:
+            medium = self._decoded(frame, None, None).medium
+        return self._decoded(frame, medium, version if medium == "radio" else None)
+
+    def _decoded(self, frame: Frame, medium: str | None, version: str | None) -> Message:
         whole = len(frame.data) * BYTE == frame.bits
         return decode(
             frame.data,
-            medium=frame.medium or self.medium,
+            medium=medium,
             direction=frame.direction or self.direction,
-            version=frame.version or self.version,
+            version=version,
             bits=None if whole else frame.bits,
             strict=False,
         )
@@ -136,8 +145,15 @@ def is_file(text: str) -> bool:
     return True
 
 
+def check_once(inputs: Sequence[str]) -> None:
+    """Raise wrong usage where standard input is to be read more than once."""
+    if list(inputs).count(STDIN) > 1:
+        raise typer.BadParameter("standard input can be read only once")
+
+
 def check_frames(inputs: Sequence[str]) -> None:
     """Raise wrong usage for an argument that is neither file nor frame."""
+    check_once(inputs)
     for text in inputs:
         if text != STDIN and not is_file(text) and not LITERAL.fullmatch(text):
             raise typer.BadParameter(_neither(text))
@@ -161,15 +177,26 @@ def read_frames(inputs: Sequence[str], given: Given, complaints: Complaints) -> 
     check_frames(inputs)
     index = 0
     for text in inputs:
+        passed_over: dict[str, None] = {}
+        name = "standard input" if text == STDIN else shortened(text)
         try:
             for frame in _frames_of(text, given):
-                if frame.problem:
-                    complaints.about_frame(frame)
+                for problem in filter(None, (frame.problem, frame.flaw)):
+                    complaints.about_frame(frame, problem)
+                if frame.passed_over and len(passed_over) <= NAMED:
+                    passed_over.update(dict.fromkeys(frame.passed_over))
                 yield frame if frame.index == index else replace(frame, index=index)
                 index += 1
         except (DecodeError, OSError) as error:
             reason = error.strerror if isinstance(error, OSError) else error
-            complaints.say("standard input" if text == STDIN else shortened(text), reason)
+            complaints.say(name, reason or error)
+        if passed_over:
+            complaints.note(name, f"passed over, no part of a capture: {_listed(passed_over)}")
+
+
+def _listed(names: Collection[str]) -> str:
+    shown = [shortened(each) for each in names][:NAMED]
+    return ", ".join(shown) + (" and more" if len(names) > NAMED else "")
 
 
 def _frames_of(text: str, given: Given) -> Iterator[Frame]:

@@ -4,7 +4,7 @@ from __future__ import annotations
 
 from typing import TYPE_CHECKING
 
-from fishplate_cli.console import Complaints, coloured, style, visible, write
+from fishplate_cli.console import Complaints, coloured, counted, shown_time, style, write
 from fishplate_cli.inputs import (
     DirectionOption,
     FormOption,
@@ -52,7 +52,7 @@ def command(
             write(f"{frame.index:>4}  {'-':<{time_width}}  {mark}")
             continue
         message = given.decode(frame)
-        time = "-" if frame.time is None else visible(str(frame.time))
+        time = shown_time(frame) or "-"
         time_width = max(time_width, len(time))
         write(f"{frame.index:>4}  {time:<{time_width}}  {line(frame, message, colour=colour)}")
         complaints.about_message(frame, message)
@@ -71,7 +71,7 @@ def line(frame: Frame, message: Message, *, colour: bool) -> str:
         case "balise" if header:
             what = f"balise {header['N_PIG'] + 1}/{header['N_TOTAL'] + 1}"
         case None:
-            what = f"{frame.bits} bits"
+            what = counted(frame.bits, "bit")
         case _:
             what = message.medium
     numbers = [each["NID_PACKET"] for each in message.packets if each["NID_PACKET"] != END_FLAG]

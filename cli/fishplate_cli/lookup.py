@@ -92,6 +92,8 @@ def _named(book: Registry, words: str) -> list[Found]:
     renamed = [each for each in book.variables.values() if upper in each.formerly]
     if renamed:
         return list(renamed)
+    if words.lower() in ("header", "headers"):
+        return list(book.headers.values())
     if words.lower() in HEADER_WORDS:
         return [book.headers[HEADER_WORDS[words.lower()]]]
     wanted = words.lower()

@@ -8,7 +8,7 @@ from typing import TYPE_CHECKING, NamedTuple
 from fishplate.errors import path_text
 from fishplate.frames.rows import walk_message
 from fishplate.standard.vocabulary import COUNT
-from fishplate_cli.console import style, visible
+from fishplate_cli.console import shown_time, style, visible
 from fishplate_cli.wording import (
     SPARE,
     book_of,
@@ -84,8 +84,9 @@ class View:
 
     def _head(self, frame: Frame, message: Message, book: Registry) -> Iterator[str]:
         first, second = heading(message, book)
-        time = "" if frame.time is None else f"  {visible(str(frame.time))}"
-        yield style(f"frame {frame.index}{time}  {first}", "bold", colour=self.colour)
+        title = GAP.join(filter(None, (f"frame {frame.index}", shown_time(frame), first)))
+        for line in wrap(title, self.width, subsequent_indent=GAP * 2):
+            yield style(line, "bold", colour=self.colour)
         yield from wrap(second, self.width, initial_indent=GAP, subsequent_indent=GAP * 2)
         if frame.note:
             note = f"note: {visible(frame.note)}"

@@ -7,10 +7,11 @@ from functools import lru_cache
 from types import MappingProxyType
 from typing import TYPE_CHECKING, Any
 
+from fishplate.bits import BYTE
 from fishplate.meaning import explain
 from fishplate.standard import registry
-from fishplate.versions import DEFAULT_VERSION, closest_layouts
-from fishplate_cli.console import visible
+from fishplate.versions import DEFAULT_VERSION, closest_layouts, version_text
+from fishplate_cli.console import counted, visible
 
 if TYPE_CHECKING:
     from fishplate.frames import FieldRow, Message
@@ -20,12 +21,18 @@ if TYPE_CHECKING:
 WAYS = MappingProxyType({"to-train": "to train", "to-track": "to track"})
 IN_HEADING = MappingProxyType(
     {
-        "radio": frozenset({"NID_MESSAGE", "L_MESSAGE"}),
-        "balise": frozenset({"M_VERSION", "Q_MEDIA", "N_PIG", "N_TOTAL", "NID_C", "NID_BG"}),
-        "loop": frozenset({"M_VERSION", "Q_MEDIA", "NID_C", "NID_LOOP"}),
+        "radio": frozenset({"NID_MESSAGE"}),
+        "balise": frozenset({"N_PIG", "N_TOTAL", "NID_C", "NID_BG"}),
+        "loop": frozenset({"NID_C", "NID_LOOP"}),
     }
 )
-"""Variables of the header that the heading of a frame says already."""
+"""Variables of the header that the heading of a frame is written from."""
+
+UP_LINK = 1
+"""Q_UPDOWN of what is sent to trains (SUBSET-026 7.5.1.142)."""
+
+Q_MEDIA = MappingProxyType({"balise": 0, "loop": 1})
+"""Q_MEDIA by what the heading calls the medium (SUBSET-026 7.5.1.119)."""
 
 CODED = frozenset({"special", "spare", "value"})
 SPARE = "!"
@@ -46,7 +53,8 @@ def said(variable: Variable, raw: int | str, scale: int | None = None) -> str:
         return quoted(raw)
     meaning = explain(variable, raw, scale)
     text = meaning.text
-    if meaning.kind in CODED and variable.bits > 1 and "(" not in text:
+    hidden = meaning.kind in CODED and variable.coding != "digits"
+    if hidden and variable.bits > 1 and "(" not in text:
         text = f"{text} ({raw})"
     return f"{SPARE} {text}" if meaning.kind == "spare" else text
 
@@ -62,9 +70,9 @@ def unexplained(raw: str, bits: int) -> str:
         return "none"
     value = int(raw, 16) >> -bits % 8
     if value == 0:
-        return f"{bits} bits, all 0"
+        return f"{counted(bits, 'bit')}, all 0"
     if value == (1 << bits) - 1:
-        return f"{bits} bits, all 1"
+        return f"{counted(bits, 'bit')}, all 1"
     return f"{bits} bits, {raw[:SHOWN_HEX]}{'…' if len(raw) > SHOWN_HEX else ''}"
 
 
@@ -78,7 +86,7 @@ def row_text(row: FieldRow, book: Registry) -> str:
 def heading(message: Message, book: Registry) -> tuple[str, str]:
     """Return what came which way, and what it is."""
     way = WAYS.get(message.direction or "", "")
-    first = "  ".join(filter(None, (message.medium, way, f"{message.size} bits")))
+    first = "  ".join(filter(None, (message.medium, way, counted(message.size, "bit"))))
     version = ""
     if message.version and message.medium:
         assumed = " (assumed)" if message.version_from == "assumed" else ""
@@ -109,10 +117,21 @@ def message_name(message: Message, book: Registry) -> str:
 
 
 def in_heading(row: FieldRow, message: Message, book: Registry) -> bool:
-    """Tell whether the heading says a field of the header already; never for spare codes."""
-    if row.variable not in IN_HEADING.get(message.medium or "", ()):
-        return False
-    return not row_text(row, book).startswith(SPARE)
+    """Tell whether the heading says the same as a field of the header; never for spare codes."""
+    return _agrees(row, message) and not row_text(row, book).startswith(SPARE)
+
+
+def _agrees(row: FieldRow, message: Message) -> bool:
+    match row.variable:
+        case "M_VERSION" if message.medium != "radio":
+            return version_text(int(row.raw)) == message.version
+        case "Q_MEDIA":
+            return row.raw == Q_MEDIA.get(message.medium or "")
+        case "Q_UPDOWN":
+            return row.raw == UP_LINK and message.direction == "to-train"
+        case "L_MESSAGE":
+            return int(row.raw) * BYTE == message.size
+    return row.variable in IN_HEADING.get(message.medium or "", ())
 
 
 def packet_title(packet: dict[str, Any], direction: str, book: Registry) -> str:
@@ -121,9 +140,11 @@ def packet_title(packet: dict[str, Any], direction: str, book: Registry) -> str:
     found = book.packets.get((direction, number))
     known = []
     if "Q_DIR" in packet:
-        known.append(said(book.variables["Q_DIR"], packet["Q_DIR"]).partition(" (")[0])
+        meaning = explain(book.variables["Q_DIR"], packet["Q_DIR"])
+        spare = f"{SPARE} Q_DIR {packet['Q_DIR']} is spare"
+        known.append(spare if meaning.kind == "spare" else meaning.text)
     if "L_PACKET" in packet:
-        known.append(f"{packet['L_PACKET']} bits")
+        known.append(counted(packet["L_PACKET"], "bit"))
     name = found.name if found else "not known"
     return f"packet {number}, {name}" + (f" ({', '.join(known)})" if known else "")
 

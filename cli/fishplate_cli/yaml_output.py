@@ -7,6 +7,8 @@ from typing import Any
 
 import yaml
 
+from fishplate.captures import time_text
+
 COLUMNS = 100
 
 
@@ -18,7 +20,7 @@ class Dumper(yaml.SafeDumper):
 
 
 def _decimal(dumper: Dumper, number: Decimal) -> yaml.ScalarNode:
-    return dumper.represent_scalar("tag:yaml.org,2002:float", str(number))
+    return dumper.represent_scalar("tag:yaml.org,2002:float", time_text(number))
 
 
 Dumper.add_representer(Decimal, _decimal)

@@ -33,6 +33,8 @@ if TYPE_CHECKING:
         (["message", "3"], ["message 3 to-train,"]),
         (["balise"], ["header of a balise telegram"]),
         (["loop"], ["header of a loop message"]),
+        (["header"], ["header of a balise telegram", "header of a loop message"]),
+        (["header", "loop"], ["header of a loop message"]),
     ],
 )
 def test_words_find_things(
@@ -51,6 +53,13 @@ def test_a_variable_is_described(fishplate: Callable[..., Any]) -> None:
     # 7.5.1.157: 7 bits, 5 km/h a step, 121 to 127 spare; packets 12 and 15 (7.4.2.3, 7.4.2.4).
     for said in ("7.5.1.157", "7 bits", "5 km/h", "121 to 127  spare", "packet 12 ", "packet 15 "):
         assert said in out
+
+
+def test_steps_and_single_bits_read_well(fishplate: Callable[..., Any]) -> None:
+    # 7.5.1.45: the step is that of Q_SCALE (7.5.1.129); 7.5.1.142: one bit.
+    out = fishplate("about", "L_ENDSECTION").out
+    assert "step        0.1, 1 or 10 m, as the governing Q_SCALE says\n" in out
+    assert "coding      1 bit, unsigned\n" in fishplate("about", "Q_UPDOWN").out
 
 
 def test_a_packet_is_described(fishplate: Callable[..., Any]) -> None:

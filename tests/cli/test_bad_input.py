@@ -2,6 +2,7 @@
 
 from __future__ import annotations
 
+import json
 import random
 from typing import TYPE_CHECKING, Any
 
@@ -39,6 +40,12 @@ FILES: dict[str, bytes] = {
     "surrogate.jsonl": b'{"data": "0g", "note": "\\ud800"}\n',
     "quote.csv": b'data,note\n"00\n' + b"x" * 300_000 + b"\n",
     "head.csv": b"a,b\n1,2\n",
+    "mac.csv": b"time,data\r1,9B0280011996C008E0C0\r",
+    "mac.txt": b"9B0280011996C008E0C0\r9B0280011996C008E0C0\r",
+    "twice.csv": b"data,data\n00,00\n",
+    "escape.yaml": b'a: "\\UFFFFFFFF"\n',
+    "tag.yaml": b"Q_DIR: !!bool x\n",
+    "number.yaml": b"a: " + b"9" * 5_000 + b"\n",
     "bomb.yaml": b"a: &a [x,x,x,x,x,x,x,x,x,x]\n"
     + b"".join(
         b"%c: &%c [%s]\n" % (i, i, b",".join([b"*%c" % (i - 1)] * 9)) for i in range(98, 110)
@@ -75,6 +82,8 @@ def test_no_standard_input_is_a_surprise(
     assert ended.code == 3
     assert "standard input" in ended.err
     assert "Traceback" not in ended.err
+    for word in ("Decimal(", "literal for", "Exceeds the limit", "tag:yaml", "recursion"):
+        assert word not in ended.err
 
 
 @pytest.mark.parametrize("command", COMMANDS, ids=" ".join)
@@ -98,6 +107,49 @@ def test_folders_and_missing_arguments_are_wrong_usage(
     assert fishplate(*command, folder / "dangling").code == 2
     assert fishplate(*command).code == 2
     assert fishplate(*command, "--as", "nothing", "-").code == 2
+
+
+@pytest.mark.parametrize("command", COMMANDS, ids=" ".join)
+def test_standard_input_is_read_once(fishplate: Callable[..., Any], command: list[str]) -> None:
+    ended = fishplate(*command, "-", "-", given="00\n")
+    assert ended.code == 2
+    assert "standard input can be read only once" in ended.err
+
+
+def test_a_bad_first_line_does_not_decide_the_form(
+    fishplate: Callable[..., Any], frame: str
+) -> None:
+    for first in ("oops", "# comment", "{oops"):
+        given = f'{first}\n{{"data": "{frame}"}}\n{{"data": "{frame}"}}\n'
+        ended = fishplate("list", "-", given=given)
+        assert ended.code == 3
+        assert sum("LRBG 16/257" in line for line in ended.out.splitlines()) == 2
+        assert ended.err.startswith("standard input line 1: ")
+        assert len(ended.err.splitlines()) == 1
+
+
+def test_a_flaw_is_named_and_the_frame_is_read(fishplate: Callable[..., Any], frame: str) -> None:
+    # The last bits of vector 01 are padding: 0, but for what is put there.
+    data = f"{frame[:-2]}07"
+    record = {"medium": "radio", "data": data, "bits": len(frame) * 4 - 3}
+    ended = fishplate("list", "--from", "jsonl", "-", given=json.dumps(record))
+    assert ended.code == 3
+    assert "LRBG 16/257" in ended.out
+    assert "standard input line 1: bits behind the" in ended.err
+
+
+def test_what_is_passed_over_is_said_once_a_file(
+    fishplate: Callable[..., Any], frame: str, tmp_path: Path
+) -> None:
+    path = tmp_path / "more.jsonl"
+    record = {"data": frame, "signal": 1, "\x1b": 2}
+    path.write_text(f"{json.dumps(record)}\n" * 3)
+    ended = fishplate("list", path, "-", given="data,signal\n00,1\n".replace("00", frame))
+    assert ended.code == 0
+    assert ended.err.splitlines() == [
+        f"{path}: passed over, no part of a capture: signal, \\x1b",
+        "standard input: passed over, no part of a capture: signal",
+    ]
 
 
 def test_bad_lines_do_not_end_the_run(fishplate: Callable[..., Any], frame: str) -> None:

@@ -65,7 +65,7 @@ def test_what_was_decoded_is_given_back(fishplate: Callable[..., Any], name: str
     assert decoded.code == (3 if unreadable else 0)
 
 
-@pytest.mark.parametrize("time", ["12", "12.50", "0.10", "-3", '"06:15"'])
+@pytest.mark.parametrize("time", ["12", "12.50", "0.10", "-3", "0.00000010", '"06:15"'])
 @pytest.mark.parametrize("view", ["jsonl", "json", "yaml"])
 def test_times_keep_their_digits(
     fishplate: Callable[..., Any], frame: str, time: str, view: str
@@ -117,6 +117,81 @@ def test_spare_codes_are_marked(
     frame = fishplate("encode", json.dumps(tree)).out.strip()
     out = fishplate("decode", frame).out
     assert any("V_EMA" in line and "! spare (121)" in line for line in out.splitlines())
+
+
+def test_stray_nibbles_of_a_number_are_marked(
+    fishplate: Callable[..., Any], vectors: dict[str, dict[str, Any]]
+) -> None:
+    tree = json.loads(json.dumps(vectors["11"]["tree"]))
+    (packet,) = (each for each in tree["packets"] if each["NID_PACKET"] == 42)
+    # A to E are not used: SUBSET-026 7.5.1.95.
+    packet["NID_RADIO"] = "A" + packet["NID_RADIO"][1:]
+    frame = fishplate("encode", json.dumps(tree)).out.strip()
+    out = fishplate("decode", frame).out
+    assert any("NID_RADIO" in line and "! A" in line for line in out.splitlines())
+
+
+def test_the_header_is_shown_where_it_says_otherwise(
+    fishplate: Callable[..., Any], vectors: dict[str, dict[str, Any]]
+) -> None:
+    telegram = vectors["02"]
+    bits = "".join(f"{byte:08b}" for byte in bytes.fromhex(telegram["hex"]))
+    plain = fishplate("decode", "--from", "jsonl", "-", given=capture(telegram)).out
+    for name in ("Q_UPDOWN", "M_VERSION", "Q_MEDIA"):
+        assert name not in plain
+    # 8.4.2.1: Q_UPDOWN is bit 0, M_VERSION bits 1 to 7, Q_MEDIA bit 8.
+    for bit, said in ((0, "Q_UPDOWN down link"), (8, "Q_MEDIA loop")):
+        turned = bits[:bit] + "01"[bits[bit] == "0"] + bits[bit + 1 :]
+        data = int(turned, 2).to_bytes(len(bits) // 8).hex()
+        given = capture(telegram, data=data)
+        out = fishplate("decode", "--from", "jsonl", "-", given=given).out
+        assert said in out
+
+
+def test_a_version_is_told_to_radio_messages_only(
+    fishplate: Callable[..., Any], vectors: dict[str, dict[str, Any]], frame: str
+) -> None:
+    telegram = vectors["02"]
+    for more in ({"medium": "balise"}, {"medium": None}):
+        given = capture(telegram, **more)
+        ended = fishplate("decode", "--version", "2.0", "--from", "jsonl", "-", given=given)
+        assert ended.code == 0
+        assert "system version 2.1" in ended.out
+    assert "system version 2.0\n" in fishplate("decode", "--version", "2.0", frame).out
+
+
+@pytest.mark.parametrize(
+    ("number", "direction"), [("01", "to-train"), ("02", "to-train"), ("02", "to-track")]
+)
+@pytest.mark.parametrize("said", [{"version": "2.0"}, {"version": "2.1"}, {}])
+def test_what_a_capture_says_of_a_frame_comes_back(
+    fishplate: Callable[..., Any],
+    vectors: dict[str, dict[str, Any]],
+    number: str,
+    said: dict[str, str],
+    direction: str,
+) -> None:
+    vector = vectors[number]
+    record = {"medium": vector["medium"], "direction": direction, **said}
+    record |= {"data": vector["hex"].replace(" ", ""), "bits": vector["bits"]}
+    line = json.dumps(record) + "\n"
+    decoded = fishplate("decode", "--as", "jsonl", "--from", "jsonl", "-", given=line)
+    again = fishplate("encode", "--as", "capture", "-", given=decoded.out)
+    assert again.out == line
+
+
+def test_nothing_decoded_is_an_empty_list(fishplate: Callable[..., Any]) -> None:
+    ended = fishplate("decode", "--as", "json", "-", given="zz\n")
+    assert (ended.code, ended.out) == (3, "[]\n")
+
+
+def test_a_spare_direction_of_a_packet_is_named(fishplate: Callable[..., Any]) -> None:
+    # Telegram header of 8.4.2.1 with the identity 0/0, then packet 127 of 23 bits with the
+    # spare Q_DIR 3 (7.5.1.103) and the end flag.
+    bits = f"1{33:07b}0{0:03b}{0:03b}{0:02b}{0:08b}{0:010b}{0:014b}1"
+    bits += f"{127:08b}{3:02b}{23:013b}{255:08b}"
+    out = fishplate("decode", f"0b{bits}").out
+    assert "packet 127, not known (! Q_DIR 3 is spare, 23 bits)" in out
 
 
 def test_given_direction_and_medium_are_used(

@@ -102,6 +102,11 @@ def test_all_errors_are_named_and_the_rest_is_done(
         ('{"header": {"NID_MESSAGE": 39}, "time": [1]}', "header"),
         ("a: !!python/object:os.system {}", "not YAML"),
         ("a: &a [*a]", "within itself"),
+        ("Q_DIR: !!bool x", "tag !!bool is not taken, write the value alone (line 1"),
+        ("!!map x", "tag !!map is not taken"),
+        ("a: ! x", "tag ! is not taken"),
+        ('{"header": {"NID_MESSAGE": 1e999}, "time": NaN}', "NaN is not a JSON number"),
+        ('oops\n{"header": {"NID_MESSAGE": 39}}\n', "say --from jsonl"),
     ],
 )
 def test_broken_trees_are_named(fishplate: Callable[..., Any], text: str, said: str) -> None:
@@ -111,9 +116,94 @@ def test_broken_trees_are_named(fishplate: Callable[..., Any], text: str, said: 
     assert said in ended.err
 
 
+@pytest.mark.parametrize(
+    ("beside", "said"),
+    [
+        ({"time": [1]}, "time: "),
+        ({"given": 1}, "given: "),
+        ({"given": {"medium": "radio"}}, "given: expected direction or version"),
+        ({"given": {"direction": "up"}}, "given.direction: "),
+        ({"given": {"version": "two"}}, "given.version: "),
+    ],
+)
+def test_what_stands_beside_a_tree_is_checked(
+    fishplate: Callable[..., Any], vectors: Vectors, beside: dict[str, Any], said: str
+) -> None:
+    ended = fishplate("encode", "--as", "capture", json.dumps(vectors["01"]["tree"] | beside))
+    assert (ended.code, ended.out) == (3, "")
+    assert said in ended.err
+
+
+def test_a_time_that_no_number_holds_is_named(
+    fishplate: Callable[..., Any], vectors: Vectors
+) -> None:
+    text = json.dumps(vectors["01"]["tree"] | {"time": 0})
+    text = text.replace('"time": 0', '"time": 1e99999999999999999999')
+    ended = fishplate("encode", "--as", "capture", text)
+    assert (ended.code, ended.out) == (3, "")
+    assert "time: 1e99999999999999999999 is no number that can be held" in ended.err
+
+
+@pytest.mark.parametrize("first", ["oops", "# comment", '{"header": oops', "{"])
+def test_a_bad_first_line_does_not_decide_the_form(
+    fishplate: Callable[..., Any], vectors: Vectors, first: str
+) -> None:
+    trees = [vectors[number]["tree"] for number in ("01", "02")]
+    wanted = [vectors[number]["hex"].replace(" ", "") for number in ("01", "02")]
+    lines = "".join(json.dumps(tree) + "\n" for tree in trees)
+    ended = fishplate("encode", "-", given=f"{first}\n{lines}")
+    assert ended.code == 3
+    assert ended.out.split() == wanted
+    assert ended.err.startswith("standard input line 1: not JSON")
+
+
+def test_lines_of_json_within_other_forms_do_not_mislead(
+    fishplate: Callable[..., Any], vectors: Vectors
+) -> None:
+    line = json.dumps(vectors["01"]["tree"])
+    wanted = vectors["01"]["hex"].replace(" ", "")
+    header, rest = line.split(' "packets": ')
+    texts = {
+        f"---\n{line}\n---\n{line}\n": 2,
+        f"# comment\n{line}\n": 1,
+        f"[\n{line},\n{line}\n]\n": 2,
+        f'{header}\n"packets":\n{rest}\n': 1,
+    }
+    for text, count in texts.items():
+        ended = fishplate("encode", "-", given=text)
+        assert (ended.code, ended.out.split()) == (0, [wanted] * count), text
+
+
+def test_raw_bits_hold_only_what_can_be_split(
+    fishplate: Callable[..., Any], vectors: Vectors
+) -> None:
+    radio, telegram = (json.dumps(vectors[number]["tree"]) for number in ("01", "02"))
+    message = bytes.fromhex(vectors["01"]["hex"])
+    assert fishplate("encode", "--as", "bin", radio, radio).raw == message * 2
+    for order in ([telegram, radio], [radio, telegram], [telegram, telegram, radio]):
+        ended = fishplate("encode", "--as", "bin", *order)
+        assert (ended.code, ended.raw) == (3, message)
+        said = ended.err.splitlines()
+        assert len(said) == order.count(telegram)
+        assert all("tree 1: not written: among several frames" in line for line in said)
+
+
 def test_plain_yaml_words_stay_text(fishplate: Callable[..., Any], vectors: Vectors) -> None:
     # 0049123 without quotes is a telephone number, not an octal one (vector 11, packet 42).
     text = yaml.safe_dump(vectors["11"]["tree"]).replace("'0049123'", "0049123")
     assert "'0049123'" not in text
     ended = fishplate("encode", "--from", "yaml", "-", given=text)
     assert ended.out.strip() == vectors["11"]["hex"].replace(" ", "")
+
+
+@pytest.mark.parametrize("name", ["tree.json", "tree.yaml", "tree.jsonl"])
+def test_true_and_false_are_no_codes(
+    fishplate: Callable[..., Any], tmp_path: Path, name: str
+) -> None:
+    tree = {"header": {"NID_MESSAGE": 24, "T_TRAIN": 5, "M_ACK": True, "NID_LRBG": 5}}
+    path = tmp_path / name
+    path.write_text(json.dumps({**tree, "packets": []}) + "\n", encoding="utf-8")
+    ended = fishplate("encode", path)
+    assert ended.code == 3
+    assert not ended.out
+    assert "header.M_ACK: true and false are no codes" in ended.err

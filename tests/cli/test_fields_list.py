@@ -4,6 +4,7 @@ from __future__ import annotations
 
 import json
 from itertools import accumulate
+from pathlib import Path
 from typing import TYPE_CHECKING, Any
 
 import pytest
@@ -11,6 +12,7 @@ import pytest
 if TYPE_CHECKING:
     from collections.abc import Callable
 
+DEMO = Path(__file__).resolve().parents[2] / "fixtures" / "demo"
 NUMBERS = [f"{number:02}" for number in range(1, 25)]
 
 
@@ -47,6 +49,26 @@ def test_text_has_a_line_a_field(fishplate: Callable[..., Any], frame: str) -> N
     assert max(map(len, lines)) <= 80
     # T_EMA of packet 15 in message 3: 75 + 8 + 2 + 13 + 2 + 7 bits before it.
     assert any(line.split()[:4] == ["107", "10", "T_EMA", "1023"] for line in lines)
+
+
+@pytest.mark.parametrize("name", ["run.jsonl", "faulty.jsonl"])
+def test_text_keeps_to_the_width(fishplate: Callable[..., Any], name: str) -> None:
+    lines = fishplate("fields", DEMO / name).out.splitlines()
+    assert max(map(len, lines)) <= 80
+
+
+def test_a_text_is_shown_whole(
+    fishplate: Callable[..., Any], vectors: dict[str, dict[str, Any]]
+) -> None:
+    tree = json.loads(json.dumps(vectors["10"]["tree"]))
+    text = " ".join(["sound horn"] * 20)
+    tree["packets"][0]["X_TEXT"] = text
+    del tree["packets"][0]["L_PACKET"]
+    del tree["filler"]
+    frame = fishplate("encode", "--length", "2600", json.dumps(tree)).out.strip()
+    out = fishplate("fields", "--medium", "balise", frame).out
+    assert text in " ".join(out.split())
+    assert max(map(len, out.splitlines())) <= 80
 
 
 def test_list_has_a_line_a_frame(

@@ -11,6 +11,7 @@ from pathlib import Path
 import pytest
 
 CALL = "import fishplate_cli; fishplate_cli.main()"
+WRITING = (["--version"], ["--help"], ["list", "--help"], ["list", "-"])
 CAPTURE = Path(__file__).resolve().parents[2] / "fixtures" / "demo" / "run.jsonl"
 
 
@@ -20,6 +21,20 @@ def command(*arguments: object) -> list[str]:
 
 def ended(*arguments: object) -> subprocess.CompletedProcess[str]:
     return subprocess.run(command(*arguments), capture_output=True, encoding="utf-8", check=False)
+
+
+def in_shell(
+    arguments: list[str], stream: str, given: str = ""
+) -> subprocess.CompletedProcess[str]:
+    """Call the command with a stream redirected by the shell."""
+    line = f'exec "$@" {stream}'
+    return subprocess.run(
+        ["sh", "-c", line, "sh", *command(*arguments)],
+        input=given,
+        capture_output=True,
+        encoding="utf-8",
+        check=False,
+    )
 
 
 def test_version_and_help_and_usage() -> None:
@@ -67,6 +82,82 @@ def test_an_interrupt_ends_in_one_line() -> None:
         process.stdout.read()
         assert process.stderr.read() == b"fishplate: interrupted\n"
     assert process.returncode == 130
+
+
+@pytest.mark.skipif(os.name != "posix", reason="streams are closed as POSIX shells do it")
+@pytest.mark.parametrize(
+    ("arguments", "code"),
+    [
+        (["--version"], 0),
+        (["decode", "nofile"], 2),
+        (["list", "--frobnicate"], 2),
+        (["list", "-"], 3),
+        (["decode", "-"], 3),
+    ],
+)
+@pytest.mark.parametrize("stream", ["2>&-", "2>/dev/full"])
+def test_no_exit_code_depends_on_standard_error(
+    arguments: list[str], code: int, stream: str
+) -> None:
+    if "full" in stream and not Path("/dev/full").exists():
+        pytest.skip("needs a device that is always full")
+    done = in_shell(arguments, stream, given="zz\n" * 5000)
+    assert done.returncode == code
+
+
+@pytest.mark.skipif(os.name != "posix", reason="streams are closed as POSIX shells do it")
+@pytest.mark.parametrize("arguments", WRITING)
+@pytest.mark.parametrize(
+    ("stream", "said"),
+    [
+        (">&-", "fishplate: standard output is closed\n"),
+        (">/dev/full", "fishplate: No space left on device\n"),
+    ],
+)
+def test_output_that_is_refused_is_said_in_one_line(
+    arguments: list[str], stream: str, said: str
+) -> None:
+    if "full" in stream and not Path("/dev/full").exists():
+        pytest.skip("needs a device that is always full")
+    done = in_shell(arguments, stream, given="9B0280011996C008E0C0\n")
+    assert (done.returncode, done.stderr) == (74, said)
+
+
+@pytest.mark.parametrize("arguments", WRITING)
+def test_output_without_a_reader_is_no_failure(arguments: list[str]) -> None:
+    reader, writer = os.pipe()
+    os.close(reader)
+    with os.fdopen(writer, "wb") as pipe:
+        done = subprocess.run(
+            command(*arguments),
+            input=b"9B0280011996C008E0C0\n",
+            stdout=pipe,
+            stderr=subprocess.PIPE,
+            check=False,
+        )
+    assert (done.returncode, done.stderr) == (141, b"")
+
+
+@pytest.mark.parametrize(
+    "module", ["fishplate_cli.process", "fishplate_cli.app", "typer", "fishplate_cli.decode"]
+)
+def test_an_interrupt_during_start_up_ends_in_one_line(module: str) -> None:
+    script = f"""
+import sys
+
+class Interrupt:
+    def find_spec(self, name, path=None, target=None):
+        if name == {module!r}:
+            raise KeyboardInterrupt
+
+sys.meta_path.insert(0, Interrupt())
+sys.argv = ["fishplate", "decode", "00"]
+{CALL}
+"""
+    done = subprocess.run(
+        [sys.executable, "-c", script], capture_output=True, encoding="utf-8", check=False
+    )
+    assert (done.returncode, done.stderr) == (130, "fishplate: interrupted\n")
 
 
 @pytest.mark.skipif(not Path("/dev/full").exists(), reason="needs a device that is always full")

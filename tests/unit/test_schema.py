@@ -25,7 +25,7 @@ from fishplate.models import (
     telegram_model,
 )
 from fishplate.standard import registry
-from fishplate.trees import read_yaml, split_context
+from fishplate.trees import CONTEXT, read_yaml, split_context
 from property.trees import Maker
 
 REGISTRY = registry("2.1")
@@ -193,3 +193,8 @@ def test_packets_need_layouts_of_the_version_announced(version: str) -> None:
     tree["header"] = {**tree["header"], "M_VERSION": version}
     with pytest.raises(fishplate.EncodeError, match=f"no layouts for system version {version}"):
         fishplate.encode(tree)
+
+
+def test_the_schema_knows_what_stands_beside_a_tree() -> None:
+    properties = json_schema("message", "to-train", 3)["properties"]
+    assert set(CONTEXT) <= set(properties)

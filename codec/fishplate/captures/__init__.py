@@ -6,6 +6,7 @@ The only part of the library that opens files. A line that cannot be read become
 
 from __future__ import annotations
 
+from fishplate.captures.binary import measures_itself
 from fishplate.captures.files import form_by_name, read_capture, read_literal, read_stream
 from fishplate.captures.frame import FORMS, Form, Frame, Time, capture_line, time_text
 
@@ -16,6 +17,7 @@ __all__ = [
     "Time",
     "capture_line",
     "form_by_name",
+    "measures_itself",
     "read_capture",
     "read_literal",
     "read_stream",

@@ -47,6 +47,12 @@ def binary_frames(stream: IO[bytes], medium: str | None = None) -> Iterator[Fram
         start = stream.read(1)
 
 
+def measures_itself(frame: Frame) -> bool:
+    """Tell whether raw bits that hold more than this frame can be split again behind it."""
+    whole = len(frame.data) * BYTE == frame.bits and len(frame.data) >= HEAD
+    return whole and frame.medium == "radio" and _promised(frame.data[:HEAD]) == len(frame.data)
+
+
 def _starts_a_telegram(byte: int) -> bool:
     """Tell whether Q_UPDOWN is 1 and an M_VERSION the standard defines follows."""
     return bool(byte & 128) and byte & 127 in defined_codes()

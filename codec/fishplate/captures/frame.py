@@ -19,6 +19,9 @@ Form = Literal["hex", "jsonl", "csv", "bin"]
 FORMS: tuple[Form, ...] = ("hex", "jsonl", "csv", "bin")
 """The forms a capture comes in."""
 
+MOST_ZEROS = 30
+"""Places in front of or behind the point up to which a time is written without exponent."""
+
 
 @dataclass(frozen=True, slots=True)
 class Frame:
@@ -26,7 +29,9 @@ class Frame:
 
     `index` counts frames from 0, unreadable ones included; `line` counts lines of `source` from
     1 and is 0 where there are no lines. `bits` is the true length: `data` holds whole bytes,
-    unused low bits 0. `problem` says why a frame could not be read; `data` is empty then.
+    unused low bits 0. `problem` says why a frame could not be read; `data` is empty then. `flaw`
+    says what was wrong on the line of a frame that could be read all the same. `passed_over`
+    names the keys or columns of the line that mean nothing here.
     """
 
     data: bytes = b""
@@ -40,6 +45,8 @@ class Frame:
     line: int = 0
     source: str = ""
     problem: FishplateError | None = None
+    flaw: FishplateError | None = None
+    passed_over: tuple[str, ...] = ()
 
     @property
     def place(self) -> str:
@@ -56,7 +63,11 @@ class Frame:
 
 def time_text(time: Time) -> str:
     """Write a time as JSON, numbers with the digits they were given with."""
-    return json.dumps(time, ensure_ascii=False) if isinstance(time, str) else str(time)
+    if isinstance(time, str):
+        return json.dumps(time, ensure_ascii=False)
+    if isinstance(time, Decimal) and abs(time.adjusted()) <= MOST_ZEROS:
+        return f"{time:f}"
+    return str(time)
 
 
 def capture_line(frame: Frame) -> str:

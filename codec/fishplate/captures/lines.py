@@ -2,6 +2,7 @@
 
 from __future__ import annotations
 
+import io
 from typing import IO, TYPE_CHECKING, NamedTuple
 
 from fishplate.errors import DecodeError
@@ -26,10 +27,12 @@ class Line(NamedTuple):
 
 
 def read_lines(stream: IO[bytes], limit: int = LONGEST_LINE) -> Iterator[Line]:
-    """Yield the lines of a UTF-8 stream; blank lines too."""
+    """Yield the lines of a UTF-8 stream but for empty ones, which are counted."""
     number = 0
     while line := stream.readline(limit + 1):
         number += 1
+        if line == b"\n":
+            continue
         if len(line) > limit and not line.endswith(b"\n"):
             size = len(line) + _pass_over(stream)
             reason = f"line of {size} bytes passed over, at most {limit} are read"
@@ -42,10 +45,16 @@ def read_lines(stream: IO[bytes], limit: int = LONGEST_LINE) -> Iterator[Line]:
                 return
             line = line.removeprefix(BYTE_ORDER_MARK)
         try:
-            yield Line(number, line.decode().rstrip("\r\n"))
+            text = line.decode().rstrip("\r\n")
         except UnicodeDecodeError as error:
             reason = f"byte {error.start + 1} of the line, 0x{line[error.start]:02X}, is not UTF-8"
             yield Line(number, "", DecodeError(reason))
+            continue
+        if "\r" in text:
+            reason = "a carriage return within the line: lines end with a line feed here"
+            yield Line(number, "", DecodeError(reason))
+        else:
+            yield Line(number, text)
 
 
 def _pass_over(stream: IO[bytes]) -> int:
@@ -56,3 +65,27 @@ def _pass_over(stream: IO[bytes]) -> int:
         if chunk.endswith(b"\n"):
             break
     return size
+
+
+class Replayed:
+    """A stream whose beginning has been looked at already."""
+
+    def __init__(self, start: bytes, stream: IO[bytes]) -> None:
+        self.start = io.BytesIO(start)
+        self.stream = stream
+
+    def readline(self, size: int = -1) -> bytes:
+        """Return the next line, or `size` bytes of it."""
+        line = self.start.readline(size)
+        if not line:
+            return self.stream.readline(size)
+        if line.endswith(b"\n") or len(line) == size:
+            return line
+        return line + self.stream.readline(size - len(line) if size > 0 else -1)
+
+    def read(self, size: int = -1) -> bytes:
+        """Return the bytes that follow, `size` of them where there are so many."""
+        data = self.start.read(size)
+        if len(data) == size:
+            return data
+        return data + self.stream.read(size - len(data) if size > 0 else -1)

@@ -50,6 +50,18 @@ BITS_SCHEMA: Schema = {
 }
 
 
+BESIDE: Schema = {
+    "time": {"type": ["string", "number"]},
+    "note": {"type": "string"},
+    "bits": {"type": "integer", "minimum": 0},
+    "frame": {"type": "integer", "minimum": 0},
+    "given": {"type": "object"},
+    "assumed": {"type": "array"},
+    "source": {"type": "string"},
+}
+"""What is known about a frame and may stand beside its tree."""
+
+
 def variable_schema(variable: Variable) -> Schema:
     """Return the schema of one variable: its codes, quantities and labels."""
     about = f"{variable.title} (SUBSET-026 {variable.clause}, {variable.bits} bits)"
@@ -246,8 +258,7 @@ def _frame(registry: Registry, medium: str, direction: str, header: Schema, titl
             "packets": {"type": "array", "items": {"anyOf": packets}},
             **dict.fromkeys(rests, BITS_SCHEMA),
             "problems": {"type": "array"},
-            "time": {"type": ["string", "number"]},
-            "note": {"type": "string"},
+            **BESIDE,
         },
         "required": ["medium", "header"],
         "additionalProperties": False,

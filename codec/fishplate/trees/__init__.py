@@ -8,6 +8,7 @@ key that stands twice is an error, since one of its values would be lost.
 from __future__ import annotations
 
 import json
+from functools import cache
 from typing import TYPE_CHECKING, Any, NamedTuple
 
 from fishplate.errors import EncodeError
@@ -15,8 +16,23 @@ from fishplate.errors import EncodeError
 if TYPE_CHECKING:
     from collections.abc import Iterable, Iterator
 
-CONTEXT = ("time", "note", "bits", "frame", "assumed", "source")
+    from fishplate.errors import Path
+
+CONTEXT = ("time", "note", "bits", "frame", "given", "assumed", "source")
 """Keys that may stand beside those of a tree: what is known about the frame, not its content."""
+
+TREE_KEYS = frozenset({"medium", "header", "packets", "content"})
+"""Keys of which every tree has one."""
+
+KINDS: tuple[tuple[type | tuple[type, ...], str], ...] = (
+    (type(None), "nothing"),
+    (bool, "true or false"),
+    (list, "a list"),
+    (int, "a number"),
+    (str, "text"),
+    (object, "something else"),
+)
+"""What stands where a tree should, in the words people know it by."""
 
 
 class NumberText(str):
@@ -46,14 +62,14 @@ def split_context(tree: dict[str, Any]) -> tuple[dict[str, Any], dict[str, Any]]
 def parse_json(text: str) -> Any:
     """Read JSON, numbers with a fraction as the text they are; raises `EncodeError`."""
     try:
-        return json.loads(
-            text, object_pairs_hook=_unique, parse_float=NumberText, parse_constant=_constant
-        )
+        return _decoder().decode(text)
     except json.JSONDecodeError as error:
         place = f"line {error.lineno}, character {error.colno}"
         raise EncodeError(f"not JSON: {error.msg} ({place})") from None
-    except (ValueError, RecursionError) as error:
-        raise EncodeError(f"not JSON: {error}") from None
+    except ValueError:
+        raise EncodeError("not JSON as trees use it: a number of far too many digits") from None
+    except RecursionError:
+        raise EncodeError("not JSON as trees use it: nested too deep") from None
 
 
 def read_json(text: str) -> Iterator[Authored]:
@@ -100,10 +116,35 @@ def read_yaml(text: str) -> Iterator[Authored]:
 
 def _checked(authored: Authored) -> Authored:
     if isinstance(authored.tree, dict):
-        return authored
-    kind = "nothing" if authored.tree is None else type(authored.tree).__name__
+        found = _truth_in(authored.tree, ())
+        if found is None:
+            return authored
+        reason = "true and false are no codes: write the code, or a label in quotes"
+        return authored._replace(problem=EncodeError(reason, path=found))
+    kind = next(word for types, word in KINDS if isinstance(authored.tree, types))
     problem = EncodeError(f"expected a tree (a mapping), got {kind}", got=authored.tree)
     return authored._replace(problem=problem)
+
+
+def _truth_in(value: object, path: Path) -> Path | None:
+    """Return where true or false stands in a tree, which Python would take for 1 or 0."""
+    if isinstance(value, bool):
+        return path
+    steps: Iterable[tuple[str | int, object]] = ()
+    if isinstance(value, dict):
+        steps = value.items()
+    elif isinstance(value, list):
+        steps = enumerate(value)
+    found = (_truth_in(each, (*path, step)) for step, each in steps)
+    return next((each for each in found if each is not None), None)
+
+
+@cache
+def _decoder() -> json.JSONDecoder:
+    """Build the reader of JSON once: `json.loads` would build one a line."""
+    return json.JSONDecoder(
+        object_pairs_hook=_unique, parse_float=NumberText, parse_constant=_constant
+    )
 
 
 def _unique(pairs: list[tuple[str, Any]]) -> dict[str, Any]:
@@ -111,9 +152,9 @@ def _unique(pairs: list[tuple[str, Any]]) -> dict[str, Any]:
     if len(found) != len(pairs):
         names = [key for key, _ in pairs]
         twice = next(key for key in names if names.count(key) > 1)
-        raise ValueError(f"key {twice!r} stands twice")
+        raise EncodeError(f"not JSON as trees use it: key {twice!r} stands twice")
     return found
 
 
 def _constant(name: str) -> None:
-    raise ValueError(f"{name} is not a JSON number")
+    raise EncodeError(f"not JSON: {name} is not a JSON number")

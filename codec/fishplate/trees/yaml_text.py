@@ -16,10 +16,24 @@ if TYPE_CHECKING:
 TAG = "tag:yaml.org,2002:"
 DEEPEST = 50
 MOST_NODES = 1_000_000
+MOST_DIGITS = 1000
+"""Digits of the longest number that is read as one."""
 
 
 class Loader(yaml.SafeLoader):
     """Plain scalars are texts but for null, true, false, whole decimal numbers and fractions."""
+
+    def compose_node(self, parent: yaml.Node | None, index: int) -> yaml.Node | None:
+        """Compose a node, refusing a tag: nothing in a tree needs one."""
+        event: Any = self.peek_event()  # type: ignore[no-untyped-call]
+        tag = getattr(event, "tag", None)
+        if tag is not None:
+            shown = tag.replace(TAG, "!!")
+            raise yaml.constructor.ConstructorError(
+                problem=f"tag {shown} is not taken, write the value alone",
+                problem_mark=event.start_mark,
+            )
+        return super().compose_node(parent, index)
 
     def construct_mapping(self, node: yaml.MappingNode, deep: bool = False) -> dict[Any, Any]:  # noqa: FBT001, FBT002
         """Build a mapping, refusing a key that stands twice."""
@@ -45,7 +59,12 @@ Loader.add_implicit_resolver(
 
 
 def _integer(loader: Loader, node: yaml.ScalarNode) -> int:
-    return int(loader.construct_scalar(node))
+    digits = loader.construct_scalar(node)
+    if len(digits) > MOST_DIGITS:
+        raise yaml.constructor.ConstructorError(
+            problem=f"a number of {len(digits)} characters", problem_mark=node.start_mark
+        )
+    return int(digits)
 
 
 def _fraction(loader: Loader, node: yaml.ScalarNode) -> NumberText:
@@ -72,8 +91,10 @@ def yaml_documents(text: str) -> Iterator[tuple[int, Any]]:
         raise EncodeError(f"not YAML as trees use it: {error.problem}{place}") from None
     except yaml.YAMLError as error:
         raise EncodeError(f"not YAML: {' '.join(str(error).split())}") from None
-    except (ValueError, RecursionError) as error:
-        raise EncodeError(f"not YAML: {error}") from None
+    except RecursionError:
+        raise EncodeError("not YAML as trees use it: nested too deep") from None
+    except (ValueError, OverflowError):
+        raise EncodeError("not YAML: an escape that stands for no character") from None
 
 
 def _bounded(node: yaml.Node, depth: int, sizes: dict[int, int]) -> int:
