@@ -15,6 +15,7 @@ from fishplate.bits import to_bytes, to_hex
 from fishplate.captures import Frame, capture_line, measures_itself
 from fishplate.errors import EncodeError
 from fishplate.frames import decode
+from fishplate.standard.vocabulary import DIRECTIONS
 from fishplate.trees import NumberText, split_context
 from fishplate.versions import DEFAULT_VERSION, NAME
 from fishplate_cli.authored import TreeForm, is_typed, read_trees
@@ -32,7 +33,6 @@ Write trees (JSON, JSON Lines or YAML; codes or meanings) as frames.
 Without --length a balise telegram is filled with ones to 210 or 830 bits, the shorter that holds
 it. Time, note and bits beside a tree are not encoded; capture writes time and note again."""
 
-DIRECTIONS = ("to-train", "to-track")
 NOT_SEPARABLE = (
     "not written: among several frames as raw bits, only radio messages of the length that their "
     "L_MESSAGE says can be told apart again"

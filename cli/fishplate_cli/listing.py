@@ -4,6 +4,7 @@ from __future__ import annotations
 
 from typing import TYPE_CHECKING
 
+from fishplate.frames.sizes import END_FLAG
 from fishplate_cli.console import Complaints, coloured, counted, shown_time, style, write
 from fishplate_cli.inputs import (
     DirectionOption,
@@ -15,7 +16,7 @@ from fishplate_cli.inputs import (
     check_frames,
     read_frames,
 )
-from fishplate_cli.wording import END_FLAG, book_of, message_name, reference
+from fishplate_cli.wording import book_of, message_name, reference
 
 if TYPE_CHECKING:
     from fishplate.captures import Frame

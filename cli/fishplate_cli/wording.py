@@ -38,7 +38,6 @@ CODED = frozenset({"special", "spare", "value"})
 SPARE = "!"
 SHOWN_HEX = 32
 POSITION_REPORTS = (0, 1)
-END_FLAG = 255
 
 
 def book_of(message: Message) -> Registry:

@@ -22,11 +22,7 @@ def encode(
     wrong. Raises `EncodeError`: its `path` names the first value that does not fit, its
     `others` the further ones.
     """
-    try:
-        value, size = encode_bits(source, length=length, force=force)
-    except EncodeError:
-        value, size = author_bits(source, length=length, force=force)
-    return to_bitstring(value, size)
+    return to_bitstring(*author_bits(source, length=length, force=force))
 
 
 def author_bits(

@@ -10,13 +10,13 @@ from fishplate.bits import BYTE, read_bits, read_text, to_bytes
 from fishplate.captures.frame import Frame, Time
 from fishplate.captures.lines import read_lines
 from fishplate.errors import DecodeError, FishplateError
+from fishplate.standard.vocabulary import DIRECTIONS, MEDIA
+from fishplate.trees import repeated_key
 from fishplate.versions import NAME
 
 if TYPE_CHECKING:
     from collections.abc import Iterator, Mapping
 
-MEDIA = ("balise", "loop", "radio")
-DIRECTIONS = ("to-train", "to-track")
 TEXTS: Mapping[str, tuple[str, ...]] = {
     "medium": MEDIA,
     "direction": DIRECTIONS,
@@ -134,9 +134,7 @@ def _fraction(text: str) -> Decimal:
 def _unique(pairs: list[tuple[str, Any]]) -> dict[str, Any]:
     found = dict(pairs)
     if len(found) != len(pairs):
-        names = [key for key, _ in pairs]
-        twice = next(key for key in names if names.count(key) > 1)
-        raise DecodeError(f"key {twice!r} stands twice")
+        raise DecodeError(f"key {repeated_key(pairs)!r} stands twice")
     return found
 
 

@@ -9,6 +9,7 @@ from types import MappingProxyType
 from typing import TYPE_CHECKING, Any
 
 from fishplate.errors import EncodeError
+from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN
 
 if TYPE_CHECKING:
     from collections.abc import Callable, Mapping
@@ -17,6 +18,9 @@ if TYPE_CHECKING:
     Writer = Callable[[dict[str, Any]], tuple[int, int]]
 
 Tree = dict[str, Any]
+
+FIRST_TO_TRACK = 128
+"""Every issue numbers its radio messages to the trackside above this, to the train below."""
 
 
 class Misfit(ValueError):
@@ -45,6 +49,13 @@ class Codec:
     write_header: Mapping[str, Writer]
     unmeasured: Mapping[str, Mapping[int, int]]
     versions: Mapping[int, str]
+
+    def direction_of(self, number: object) -> str:
+        """Return the direction of a radio message, of an unknown one by its number."""
+        for direction, messages in self.read_message.items():
+            if number in messages:
+                return direction
+        return TO_TRACK if isinstance(number, int) and number >= FIRST_TO_TRACK else TO_TRAIN
 
 
 MODULES: Mapping[str, str] = MappingProxyType({"2.1": "v3_6_0"})

@@ -11,7 +11,13 @@ from dataclasses import dataclass, replace
 from typing import TYPE_CHECKING
 
 from fishplate.engine.branches import Unfolded, unfold
-from fishplate.engine.source import Source, chunks, condition_text, condition_variables
+from fishplate.engine.source import (
+    Source,
+    chunks,
+    condition_text,
+    condition_variables,
+    fixed_fields,
+)
 from fishplate.standard.vocabulary import (
     COUNT,
     Condition,
@@ -174,9 +180,8 @@ class WriterSource(Source):
         self.line(f"for {element} in {rest}:")
         self.depth += 1
         self.width = 0
-        unfolded = unfold(node.nodes, self.variables)
-        if unfolded and not self._grows(node.nodes):
-            unfolded = None
+        apart = fixed_fields(node.nodes) is None
+        unfolded = unfold(node.nodes, self.variables) if apart else None
         if unfolded:
             usual = unfolded.usual_width(self.variables)
             self._way(unfolded, [], element, usual)
@@ -184,7 +189,6 @@ class WriterSource(Source):
             self.line(f"{self.b} += {usual} * {count}")
             self.width = outer
             return
-        apart = self._grows(node.nodes)
         outer_v, outer_b = self.v, self.b
         if apart:
             # An element of varying width is put together apart: small integers are fast.
@@ -234,9 +238,6 @@ class WriterSource(Source):
         if width != usual:
             self.line(f"{self.b} += {width - usual}")
 
-    def _grows(self, nodes: Sequence[Node]) -> bool:
-        return not all(isinstance(each, Field) for each in nodes)
-
     def _text(self, node: Text, source: str) -> None:
         text, count = self.local("x"), self.local("c")
         self.line(f'{text} = {source}["{node.element}"].encode("latin-1")')
@@ -254,7 +255,9 @@ class WriterSource(Source):
                 if entry.local and entry.local != entry.expression:
                     self.line(f"{entry.local} = {_looked_up(entry)}")
             checks = [_check(each) for each in chunk if each.local and _checked(each.variable)]
-            misfits, self.misfits = [" | ".join(checks)] * bool(checks) + self.misfits, []
+            misfits, self.misfits = self.misfits, []
+            if checks:
+                misfits = [" | ".join(checks), *misfits]
             if misfits:
                 self._misfit(" or ".join(misfits))
             width = sum(each.variable.bits for each in chunk)

@@ -19,14 +19,13 @@ from fishplate.frames.message import Message
 from fishplate.frames.reader import FrameReader
 from fishplate.frames.sizes import (
     END_FLAG,
-    FIRST_TO_TRACK,
     HEADS,
     LONGEST_PACKET,
     LONGEST_PADDING,
     MESSAGE_START,
     SHORTEST_PACKET,
 )
-from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN
+from fishplate.standard.vocabulary import DIRECTIONS, MEDIA, TO_TRACK, TO_TRAIN
 from fishplate.versions import (
     DEFAULT_VERSION,
     NAME,
@@ -40,7 +39,6 @@ if TYPE_CHECKING:
     from fishplate.bits import Data
     from fishplate.errors import Path
 
-MEDIA = ("balise", "loop", "radio")
 NOTHING_SAID = (None, None, None)
 
 
@@ -85,7 +83,7 @@ def _check_said(medium: object, direction: object, version: object) -> None:
     """Raise `ValueError` for a medium, direction or version that is none."""
     if medium is not None and medium not in MEDIA:
         raise ValueError(f"medium is one of {', '.join(MEDIA)}, not {medium!r}")
-    if direction is not None and direction not in (TO_TRAIN, TO_TRACK):
+    if direction is not None and direction not in DIRECTIONS:
         raise ValueError(f"direction is {TO_TRAIN} or {TO_TRACK}, not {direction!r}")
     if version is not None and not (isinstance(version, str) and NAME.fullmatch(version)):
         raise ValueError(f"version is written as '2.1', not {version!r}")
@@ -185,7 +183,7 @@ def _radio(
     message.version_from = "caller" if version else "assumed"
     _say_if_newer(reader, ("header",), bit=0)
     if direction is None:
-        message.direction = direction = _direction_of(reader.codec, number)
+        message.direction = direction = reader.codec.direction_of(number)
     if size >= MESSAGE_START:
         promised = (n >> size - MESSAGE_START & 1023) << 3
         if promised != size:
@@ -283,14 +281,6 @@ def _keep_from_start(reader: FrameReader, number: int) -> None:
     length = reader.n >> reader.left & 1023
     reader.message.header = {"NID_MESSAGE": number, "L_MESSAGE": length}
     reader.message.content = reader.rest()
-
-
-def _direction_of(layouts: Codec, number: int) -> str:
-    if number in layouts.read_message[TO_TRAIN]:
-        return TO_TRAIN
-    if number in layouts.read_message[TO_TRACK]:
-        return TO_TRACK
-    return TO_TRACK if number >= FIRST_TO_TRACK else TO_TRAIN
 
 
 def _layouts(message: Message, version: str) -> Codec | None:

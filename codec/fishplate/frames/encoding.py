@@ -17,7 +17,7 @@ from fishplate.frames import quick
 from fishplate.frames.message import Message, Tree
 from fishplate.frames.sizes import (
     END_FLAG,
-    FIRST_TO_TRACK,
+    HEAD_NAMES,
     HEADS,
     LONGEST_MESSAGE,
     LONGEST_PACKET,
@@ -141,7 +141,7 @@ class _Writer:
                 expected="the number of a message",
                 got=number,
             )
-        direction = tree.get("direction") or self._direction_of(number)
+        direction = tree.get("direction") or self.codec.direction_of(number)
         if not isinstance(direction, str) or direction not in HEADS:
             raise EncodeError(
                 f"expected {TO_TRAIN} or {TO_TRACK}, got {direction!r}",
@@ -183,12 +183,6 @@ class _Writer:
             expected="the number of a message",
             got=number,
         )
-
-    def _direction_of(self, number: object) -> str:
-        for direction, messages in self.codec.write_message.items():
-            if number in messages:
-                return direction
-        return TO_TRACK if isinstance(number, int) and number >= FIRST_TO_TRACK else TO_TRAIN
 
     def _end_radio(self, given: object) -> None:
         tree = self.tree
@@ -314,8 +308,7 @@ class _Writer:
         head = HEADS[direction]
         given = packet.get("L_PACKET")
         if "content" in packet:
-            names = ["NID_PACKET", *(["Q_DIR"] if direction == TO_TRAIN else [])]
-            part, width = self._content_packet(packet, names, path)
+            part, width = self._content_packet(packet, HEAD_NAMES[direction], path)
         else:
             nodes = self._nodes_of(number, direction, path)
             layout = {key: value for key, value in packet.items() if key not in BESIDE}
@@ -332,15 +325,15 @@ class _Writer:
         code = code_of(variable, length, (*path, "L_PACKET"))
         return part | code << width - head, width
 
-    def _content_packet(self, packet: Tree, names: list[str], path: Path) -> tuple[int, int]:
+    def _content_packet(self, packet: Tree, head: Sequence[str], path: Path) -> tuple[int, int]:
         for key in packet:
-            if key not in (*names, "L_PACKET", "content"):
+            if key not in (*head, "content"):
                 raise EncodeError(
                     "given beside content", path=(*path, key), expected="content alone"
                 )
         variables = registry(self.codec.version).variables
         pieces = []
-        for name in names:
+        for name in head[:-1]:
             if name not in packet:
                 raise EncodeError("missing", path=(*path, name), expected=name)
             code = code_of(variables[name], packet[name], (*path, name))

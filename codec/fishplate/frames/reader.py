@@ -19,7 +19,14 @@ from fishplate.errors import (
     path_text,
 )
 from fishplate.frames.message import Message, Problem, Tree
-from fishplate.frames.sizes import END_FLAG, HEADS, LENGTH_BITS, LONGEST_PACKET, SHORTEST_PACKET
+from fishplate.frames.sizes import (
+    END_FLAG,
+    HEAD_NODES,
+    HEADS,
+    LENGTH_BITS,
+    LONGEST_PACKET,
+    SHORTEST_PACKET,
+)
 from fishplate.standard import registry
 from fishplate.standard.vocabulary import TO_TRAIN, Field
 
@@ -120,7 +127,8 @@ class FrameReader:
         if number in unmeasured:
             return self._without_length(number, unmeasured[number])
         if self.left < head:
-            self._cut(self.locate(self._head_nodes(), self._here, self.left, self._path))
+            nodes = HEAD_NODES[self.message.direction or TO_TRAIN]
+            self._cut(self.locate(nodes, self._here, self.left, self._path))
             return False
         length = self._peek(head) & LONGEST_PACKET
         if length > self.left:
@@ -230,9 +238,3 @@ class FrameReader:
 
     def _key(self, number: int) -> tuple[str, int]:
         return self.message.direction or TO_TRAIN, number
-
-    def _head_nodes(self) -> list[Node]:
-        names = ["NID_PACKET", "L_PACKET"]
-        if self.message.direction == TO_TRAIN:
-            names.insert(1, "Q_DIR")
-        return [Field(each) for each in names]

@@ -11,7 +11,7 @@ from fishplate.engine.runtime import codec
 from fishplate.engine.walk import Cursor, Row, Walk
 from fishplate.errors import DecodeError, Path, Truncated
 from fishplate.frames.decoding import decode
-from fishplate.frames.sizes import HEADS
+from fishplate.frames.sizes import HEAD_NODES, HEADS
 from fishplate.meaning import Meaning, explain
 from fishplate.standard import Registry, registry
 from fishplate.standard.vocabulary import TO_TRAIN, Field, Opaque
@@ -159,10 +159,6 @@ class _Frame:
     def _direction(self) -> str:
         return self.message.direction or TO_TRAIN
 
-    def _head_nodes(self) -> list[Node]:
-        names = ["NID_PACKET", *(["Q_DIR"] if self._direction == TO_TRAIN else []), "L_PACKET"]
-        return [Field(each) for each in names]
-
     def _packet(self, cursor: Cursor, index: int) -> None:
         packet = self.message.packets[index]
         path = ("packets", index)
@@ -185,7 +181,9 @@ class _Frame:
         known = self.registry.packets.get((self._direction, packet["NID_PACKET"]))
         width = HEADS[self._direction] + packet["content"]["bits"]
         inner = self._cursor(cursor.position, width)
-        self._until_it_ends(inner, _explained(known.nodes) if known else self._head_nodes(), path)
+        self._until_it_ends(
+            inner, _explained(known.nodes) if known else HEAD_NODES[self._direction], path
+        )
         self._walk(inner).unexplained(inner.left, (*path, "content"))
         cursor.rows += inner.rows
         cursor.position += inner.position
@@ -194,7 +192,7 @@ class _Frame:
         """Add the rows of a packet up to where its bits run out, or its head where it is whole."""
         packets = self.message.packets
         path = ("packets", index)
-        nodes: Sequence[Node] = self._head_nodes()
+        nodes: Sequence[Node] = HEAD_NODES[self._direction]
         width = cursor.left
         number = self.value >> max(0, cursor.left - 8) & 255
         if index == len(packets) and number in self.unmeasured:

@@ -2,7 +2,7 @@
 
 from __future__ import annotations
 
-from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN
+from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN, Field
 
 END_FLAG = 255
 """The packet that ends a telegram or loop message (SUBSET-026 7.4.2.39)."""
@@ -17,6 +17,12 @@ LONGEST_PACKET = (1 << LENGTH_BITS) - 1
 HEADS = {TO_TRAIN: 23, TO_TRACK: 21}
 """NID_PACKET, Q_DIR (to the train only) and L_PACKET, by direction (SUBSET-026 7.4.2, 7.4.3)."""
 
+HEAD_NAMES = {TO_TRAIN: ("NID_PACKET", "Q_DIR", "L_PACKET"), TO_TRACK: ("NID_PACKET", "L_PACKET")}
+"""The variables of that head."""
+
+HEAD_NODES = {way: tuple(Field(each) for each in names) for way, names in HEAD_NAMES.items()}
+"""That head as a layout."""
+
 MESSAGE_START = 18
 """NID_MESSAGE and L_MESSAGE, with which every radio message of every version begins."""
 
@@ -25,9 +31,6 @@ LONGEST_MESSAGE = 1023
 
 LONGEST_PADDING = 7
 """More than this does not just complete the last byte (SUBSET-026 8.4.4.5)."""
-
-FIRST_TO_TRACK = 128
-"""Every issue numbers its radio messages to the trackside above this, to the train below."""
 
 TELEGRAM_SIZES = (210, 830)
 """User bits of a short and a long balise telegram (SUBSET-036 4.3.1.2)."""

@@ -7,9 +7,10 @@ from typing import TYPE_CHECKING, Annotated, Any, Literal
 
 from pydantic import BeforeValidator, ValidationError, create_model
 
+from fishplate.engine.runtime import codec
 from fishplate.errors import EncodeError, Path
 from fishplate.frames.encoding import KEYS
-from fishplate.frames.sizes import FIRST_TO_TRACK
+from fishplate.frames.sizes import HEAD_NODES
 from fishplate.models.schema import (
     content_packet_schema,
     message_schema,
@@ -18,7 +19,7 @@ from fishplate.models.schema import (
 )
 from fishplate.models.scopes import Bits, Scope, custom_error, scope_model
 from fishplate.standard import registry
-from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN, Field, Node
+from fishplate.standard.vocabulary import DIRECTIONS, TO_TRACK, TO_TRAIN, Node
 from fishplate.versions import DEFAULT_VERSION, closest_layouts
 
 if TYPE_CHECKING:
@@ -47,7 +48,7 @@ def message_model(
     """Return the model of one radio message; `KeyError` when the registry holds none."""
     layouts = registry(version)
     if direction is None:
-        direction = TO_TRAIN if (TO_TRAIN, number) in layouts.messages else TO_TRACK
+        direction = codec(version).direction_of(number)
     nodes = layouts.messages[direction, number].nodes
     schema = partial(message_schema, layouts, direction, number)
     return _frame_model(layouts, f"Message{number}", "radio", direction, nodes, schema)
@@ -120,8 +121,7 @@ def _packet_validator(direction: str, version: str) -> Callable[[Any], dict[str,
 @cache
 def content_packet_model(direction: str, version: str = DEFAULT_VERSION) -> type[Scope]:
     """Return the model of a packet that is kept as unexplained bits."""
-    names = ["NID_PACKET", *(["Q_DIR"] if direction == TO_TRAIN else []), "L_PACKET"]
-    nodes = tuple(Field(each) for each in names)
+    nodes = HEAD_NODES[direction]
     model = scope_model(registry(version), nodes, "ContentPacket", {"content": Bits})
     model.declared = partial(content_packet_schema, direction)
     return model
@@ -161,7 +161,7 @@ def _model_for(tree: dict[str, Any]) -> type[Scope]:
         raise EncodeError(reason, path=("medium",), expected="balise, loop or radio", got=medium)
     number = header.get("NID_MESSAGE")
     direction = tree.get("direction")
-    if direction is not None and direction not in (TO_TRAIN, TO_TRACK):
+    if direction is not None and direction not in DIRECTIONS:
         reason = f"expected {TO_TRAIN} or {TO_TRACK}, got {direction!r}"
         raise EncodeError(reason, path=("direction",), got=direction)
     try:
@@ -180,7 +180,7 @@ def _model_for(tree: dict[str, Any]) -> type[Scope]:
 def _other_way(number: object, direction: object) -> str:
     if not direction or not isinstance(number, int):
         return ""
-    other = TO_TRACK if number >= FIRST_TO_TRACK else TO_TRAIN
+    other = codec(DEFAULT_VERSION).direction_of(number)
     known = (other, number) in registry(DEFAULT_VERSION).messages
     return f"; it is sent {other}" if known and other != direction else ""
 

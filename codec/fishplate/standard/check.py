@@ -121,12 +121,12 @@ def _check_codes(variable: Variable, path: Path) -> None:
                 f"{variable.bits} bits",
                 path=path,
             )
-    taken: dict[int, str] = {}
+    last_taken = low - 1
     singles = [each for each in variable.codes if each.kind in {"value", "special", "spare"}]
     for codes in sorted(singles, key=lambda each: each.first):
-        if taken and codes.first <= max(taken):
+        if codes.first <= last_taken:
             raise RegistryError(f"code {codes.first} is declared twice", path=path)
-        taken[codes.last] = codes.label
+        last_taken = codes.last
 
 
 class _Layout:

@@ -33,6 +33,8 @@ SCALED: Final = "scale"
 TO_TRAIN: Final = "to-train"
 TO_TRACK: Final = "to-track"
 Direction = Literal["to-train", "to-track"]
+DIRECTIONS: Final = (TO_TRAIN, TO_TRACK)
+MEDIA: Final = ("balise", "loop", "radio")
 
 
 @dataclass(frozen=True, slots=True)

@@ -150,10 +150,14 @@ def _decoder() -> json.JSONDecoder:
 def _unique(pairs: list[tuple[str, Any]]) -> dict[str, Any]:
     found = dict(pairs)
     if len(found) != len(pairs):
-        names = [key for key, _ in pairs]
-        twice = next(key for key in names if names.count(key) > 1)
-        raise EncodeError(f"not JSON as trees use it: key {twice!r} stands twice")
+        raise EncodeError(f"not JSON as trees use it: key {repeated_key(pairs)!r} stands twice")
     return found
+
+
+def repeated_key(pairs: list[tuple[str, Any]]) -> str:
+    """Return the first key that stands twice among the pairs of a JSON object."""
+    names = [key for key, _ in pairs]
+    return next(key for key in names if names.count(key) > 1)
 
 
 def _constant(name: str) -> None:
