@@ -55,6 +55,7 @@ UNITS: Mapping[str, Mapping[str, Fraction]] = MappingProxyType(
         "byte": {"byte": Fraction(1), "bytes": Fraction(1)},
         "character": {"character": Fraction(1), "characters": Fraction(1)},
         "day": {"day": Fraction(1), "days": Fraction(1)},
+        "t": {"t": Fraction(1), "kg": Fraction(1, 1000)},
         "": {"": Fraction(1)},
     }
 )

@@ -1,8 +1,9 @@
 """The command line as whole processes: ``python tests/bench/process.py``.
 
-Three tables: start-up against an empty typer application with as many commands (taking turns), a
-capture of a thousand frames through ``fishplate decode --as jsonl``, and the memory a capture of
-50 MB takes beside one of 2 MB. Exit code 1 when a target is missed. Needs a system with `os.wait4`.
+Four tables: start-up against an empty typer application with as many commands (taking turns),
+one telegram of each system version, a capture of a thousand frames through ``fishplate decode
+--as jsonl``, and the memory a capture of 50 MB takes beside one of 2 MB. Exit code 1 when a target
+is missed. Needs a system with `os.wait4`.
 """
 
 from __future__ import annotations
@@ -34,6 +35,13 @@ EMPTY = "\n".join(
         "app()",
     ]
 )
+DECODE = "import fishplate; fishplate.decode({!r}, medium='balise')"
+LOADED = """
+import sys
+start = 'fishplate.engine.generated.'
+print(*sorted(each.removeprefix(start) for each in sys.modules if each.startswith(start)))
+"""
+HEADER_BITS = 50
 FRAMES = 1000
 START_TARGET = 1.6
 MEMORY_TARGET_MB = 50
@@ -106,6 +114,29 @@ def start_up(frame: str, rounds: int) -> bool:
     return reached
 
 
+def versions(rounds: int) -> None:
+    """Print what decoding one telegram of each system version takes, and what it loads."""
+    print(f"\n{'one telegram of version':32}{'best ms':>9}{'ratio':>8}  layouts loaded")
+    codes = {f"{code >> 4}.{code & 15}": code for code in (33, 16, 17, 32, 34, 35, 48)}
+    times: dict[str, list[float]] = {version: [] for version in codes}
+    for _ in range(rounds):
+        for version, code in codes.items():
+            times[version].append(seconds([sys.executable, "-c", DECODE.format(telegram(code))]))
+    first = min(times["2.1"])
+    for version, code in codes.items():
+        command = [sys.executable, "-c", DECODE.format(telegram(code)) + LOADED]
+        done = subprocess.run(command, capture_output=True, check=True, env=CACHED, text=True)
+        best = min(times[version])
+        print(f"{version:32}{best * 1e3:>9.0f}{best / first:>8.2f}  {done.stdout.strip()}")
+
+
+def telegram(code: int) -> str:
+    """A telegram that holds its end flag only: a header of 50 bits, then ones to 210."""
+    header = f"1{code:07b}000000000{255:08b}{905:010b}{9050:014b}1"
+    assert len(header) == HEADER_BITS
+    return f"0b{header}{'1' * (210 - HEADER_BITS)}"
+
+
 def capture(path: Path, data: bytes, frames: int) -> Path:
     """Write a capture of the benchmark's message over and over."""
     with path.open("w", encoding="ascii") as file:
@@ -160,12 +191,13 @@ def memory(folder: Path, data: bytes) -> bool:
 
 
 def main() -> int:
-    """Print all three tables."""
+    """Print all four tables."""
     parser = argparse.ArgumentParser(description=__doc__.partition("\n")[0])
     parser.add_argument("--rounds", type=int, default=8)
     rounds = parser.parse_args().rounds
     data = with_construct.encode_as_used(with_construct.from_ours(workload.TREE))
     reached = start_up(data.hex(), rounds)
+    versions(rounds)
     with tempfile.TemporaryDirectory() as name:
         folder = Path(name)
         throughput(capture(folder / "thousand.jsonl", data, FRAMES), rounds)

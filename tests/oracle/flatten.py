@@ -1,7 +1,7 @@
 """Layout trees of the registry as flat rows, to be held against the published tables.
 
-No source of its own: the tables come from SUBSET-026 issue 3.6.0, see `oracle.tables`. A condition
-is resolved to the row it looks at, so that "the Q_SECTIONTIMER of this section" and "that of the
+No source of its own: the tables come from SUBSET-026, see `oracle.editions`. A condition is
+resolved to the row it looks at, so that "the Q_SECTIONTIMER of this section" and "that of the
 end section" are told apart.
 """
 

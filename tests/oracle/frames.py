@@ -1,8 +1,8 @@
 """Random frames over the published tables, written bit by bit as text; fishplate is not used.
 
-Source: SUBSET-026 issue 3.6.0 in ``fixtures/standard/v3_6_0``. Codes are drawn from those that
-chapter 7.5 gives a meaning; with `spares` above zero, now and then any code at all. What a packet
-says is not meant to make sense on a line, only to be valid bit for bit.
+Source: SUBSET-026 in the tables of `oracle.editions`. Codes are drawn from those that chapter 7.5
+(chapter 6 for versions with X = 1) gives a meaning; with `spares` above zero, now and then any
+code at all. What a packet says is not meant to make sense on a line, only to be valid bit for bit.
 """
 
 from __future__ import annotations
@@ -11,16 +11,13 @@ import functools
 import random
 from dataclasses import dataclass, field
 
-from oracle import tables
+from oracle import editions, tables
 
 LONGEST_PACKET = 8191
 LONGEST_MESSAGE = 8 * 1023
-SYSTEM_VERSION = 33
-"""2.1: X = 2 in the 3 high bits, Y = 1 in the 4 low ones (7.5.1.79)."""
-BIT_SETS = {"NC_TRAIN", "M_LINEGAUGE", "Q_MARQSTREASON"}
 MANY = 31
 POSITION_REPORT = 136
-"""A train-to-track message (8.6.4) to carry any packet: header, then packet 0 or 1."""
+"""A message to the track (8.6.4 in all issues) to carry any packet, behind packet 0 or 1."""
 
 
 @dataclass
@@ -34,33 +31,19 @@ class Frame:
 
 
 @functools.cache
-def spare_ranges(variable: str) -> tuple[tuple[int, int], ...]:
-    """The codes of the variable that have no meaning."""
-    return tuple(
-        (int(line["code_first"]), int(line["code_last"]))
-        for line in tables.table("codes")
-        if line["variable"] == variable and line["kind"] == "spare"
-    )
+def ranges(book: tables.Tables, variable: str, kind: str) -> tuple[tuple[int, int], ...]:
+    """First and last of the codes of one kind."""
+    return tuple((first, last) for first, last, found, _ in book.codes[variable] if found == kind)
 
 
 @functools.cache
-def special_codes(variable: str) -> tuple[int, ...]:
-    """The codes of the variable that are not plain numbers."""
-    return tuple(
-        int(line["code_first"])
-        for line in tables.table("codes")
-        if line["variable"] == variable and line["kind"] == "special"
-    )
-
-
-@functools.cache
-def meaningful_bits(variable: str) -> tuple[int, ...]:
-    """The weights of the bits of a bit set that have a meaning."""
-    return tuple(
-        int(line["code_first"])
-        for line in tables.table("codes")
-        if line["variable"] == variable and line["kind"] == "bit"
-    )
+def first_code(book: tables.Tables, variable: str) -> int:
+    """The lowest code that is not spare."""
+    code = 0
+    for first, last in sorted(ranges(book, variable, "spare")):
+        if first <= code <= last:
+            code = last + 1
+    return code
 
 
 class Maker:
@@ -69,6 +52,7 @@ class Maker:
     def __init__(
         self,
         rng: random.Random,
+        edition: editions.Edition = editions.V3_6_0,
         *,
         spares: float = 0.0,
         many: float = 0.05,
@@ -79,6 +63,8 @@ class Maker:
         `extreme` 0 or 1 fills every variable with that bit instead.
         """
         self.rng = rng
+        self.edition = edition
+        self.book = edition.usable
         self.spares = spares
         self.many = many
         self.extreme = extreme
@@ -90,26 +76,26 @@ class Maker:
             return ((1 << bits) - 1) * int(self.extreme)
         if rng.random() < self.spares:
             return rng.getrandbits(bits)
-        if variable in BIT_SETS:
-            return sum(weight for weight in meaningful_bits(variable) if rng.random() < 0.5) or 1
-        if tables.coding()[variable] == "bcd_left_F_padded":
+        if self.book.coding[variable] == "bitset":
+            weights = [first for first, _ in ranges(self.book, variable, "bit")]
+            return sum(weight for weight in weights if rng.random() < 0.5) or 1
+        if self.book.coding[variable] == "bcd_left_F_padded":
             return self.digits(bits // 4)
-        special = special_codes(variable)
+        special = ranges(self.book, variable, "special")
         if special and rng.random() < 0.1:
-            return rng.choice(special)
+            return rng.choice(special)[0]
         if rng.random() < 0.1:
             return self.within(variable, bits, (0, 1, (1 << bits) - 1, (1 << bits - 1)))
         return self.within(variable, bits, ())
 
     def within(self, variable: str, bits: int, candidates: tuple[int, ...]) -> int:
         """Draw one of the candidates, or any code if there are none, that is not spare."""
-        spare = spare_ranges(variable)
+        spare = ranges(self.book, variable, "spare")
         for _ in range(8):
             code = self.rng.choice(candidates) if candidates else self.rng.getrandbits(bits)
             if not any(first <= code <= last for first, last in spare):
                 return code
-        # Every variable of the issue starts with a code that is not spare, save M_LINEGAUGE.
-        return 0
+        return first_code(self.book, variable)
 
     def digits(self, places: int) -> int:
         """Draw a decimal number in nibbles, left adjusted, the rest F."""
@@ -149,8 +135,18 @@ class Maker:
         return "".join(parts)
 
     def packet(self, direction: str, number: int) -> str:
-        """Write one packet, its L_PACKET right."""
-        rows = tables.packet_rows()[direction, number]
+        """Write one packet, its L_PACKET right; in its other form, if any, every second time."""
+        form = self.edition.usable.forms.get((direction, number))
+        if form is None or self.rng.random() < 0.5:
+            return self._packet(direction, number)
+        self.book = form
+        try:
+            return self._packet(direction, number)
+        finally:
+            self.book = self.edition.usable
+
+    def _packet(self, direction: str, number: int) -> str:
+        rows = self.book.packet_rows[direction, number]
         before = 0
         for row in rows:
             if row.variable == "L_PACKET":
@@ -176,11 +172,17 @@ class Maker:
     def telegram(self, medium: str) -> Frame:
         """Write a balise telegram or a loop message of any length."""
         header = self.fields(
-            tables.header_rows()[medium],
-            {"Q_UPDOWN": 1, "M_VERSION": SYSTEM_VERSION, "Q_MEDIA": int(medium == "loop")},
+            self.book.header_rows[medium],
+            {
+                "Q_UPDOWN": 1,
+                "M_VERSION": self.edition.version_code,
+                "Q_MEDIA": int(medium == "loop"),
+            },
         )
-        numbers = [self.rng.choice(senders_packets(medium)) for _ in range(self.rng.randint(0, 4))]
-        if medium == "balise" and self.rng.random() < 0.1:
+        sent = senders_packets(self.book, medium)
+        numbers = [self.rng.choice(sent) for _ in range(self.rng.randint(0, 4))]
+        marker = ("to-train", 0) in self.book.packet_rows
+        if marker and medium == "balise" and self.rng.random() < 0.1:
             numbers.insert(0, 0)
         frame = self.join(medium, "to-train", header, [*numbers, tables.END_FLAG], None)
         size = len(frame.text)
@@ -194,12 +196,13 @@ class Maker:
 
     def message(self, direction: str, number: int) -> Frame:
         """Write a radio message with its required packets and some of its optional ones."""
-        rows = tables.message_rows()[direction, number]
+        rows = self.book.message_rows[direction, number]
         header = self.fields(rows, {"NID_MESSAGE": number, "L_MESSAGE": 0})
-        required = [self.rng.choice(some) for some in tables.required_packets()[direction, number]]
-        optional = list(tables.optional_packets().get((direction, number), ()))
-        note = self.rng.choice(sorted({note for _, note in optional})) if optional else ""
-        extra = [packet for packet, said in optional if said == note]
+        alternatives = self.book.required_packets[direction, number]
+        required = [self.rng.choice(some) for some in alternatives]
+        optional = list(self.book.optional_packets.get((direction, number), ()))
+        sender = self.rng.choice(sorted({sender for _, sender in optional})) if optional else ""
+        extra = [packet for packet, said in optional if said == sender]
         self.rng.shuffle(extra)
         numbers = [*required, *extra[: self.rng.choice((0, 1, 2, 3, 6))]]
         many = self.many
@@ -227,40 +230,48 @@ class Maker:
 
 
 @functools.cache
-def senders_packets(medium: str) -> tuple[int, ...]:
+def senders_packets(book: tables.Tables, medium: str) -> tuple[int, ...]:
     """Packets that a balise or a loop may transmit, without packet 0 and the end flag."""
     numbers = []
-    for line in tables.table("packets"):
+    for line in book.table("packets"):
         senders = {name.lower() for name in line["transmitted_by_or_to"].split(", ")}
-        apart = int(line["packet"]) in {0, tables.END_FLAG}
-        if line["direction"] == "track-to-train" and senders & {medium, "any"} and not apart:
-            numbers.append(int(line["packet"]))
+        direction, number = tables.key_of(line, "packet")
+        apart = number in {0, tables.END_FLAG}
+        if direction == "to-train" and senders & {medium, "any"} and not apart:
+            numbers.append(number)
     return tuple(numbers)
 
 
-def random_frame(seed: int, *, spares: float = 0.0, many: float = 0.05) -> Frame:
+def random_frame(
+    seed: int,
+    edition: editions.Edition = editions.V3_6_0,
+    *,
+    spares: float = 0.0,
+    many: float = 0.05,
+) -> Frame:
     """One frame of any kind; the same seed gives the same frame."""
     # A seed is a test case here, not a secret.
     rng = random.Random(seed)  # noqa: S311
-    maker = Maker(rng, spares=spares, many=many)
-    kinds = (*(("balise", "to-train", 0),) * 3, ("loop", "to-train", 0))
+    maker = Maker(rng, edition, spares=spares, many=many)
     if rng.random() < 0.4:
-        medium, _, _ = rng.choice(kinds)
-        return maker.telegram(medium)
-    direction, number = rng.choice(sorted(tables.message_rows()))
+        return maker.telegram(rng.choice(("balise", "balise", "balise", "loop")))
+    direction, number = rng.choice(sorted(edition.usable.message_rows))
     return maker.message(direction, number)
 
 
-def message_frame(seed: int, direction: str, number: int) -> Frame:
+def message_frame(
+    seed: int, direction: str, number: int, edition: editions.Edition = editions.V3_6_0
+) -> Frame:
     """A frame of one radio message; every second seed with spare codes."""
     rng = random.Random(f"{seed} message {direction} {number}")  # noqa: S311
-    return Maker(rng, spares=0.05 * (seed % 2)).message(direction, number)
+    return Maker(rng, edition, spares=0.05 * (seed % 2)).message(direction, number)
 
 
 def frame_with(
     seed: int,
     direction: str,
     number: int,
+    edition: editions.Edition = editions.V3_6_0,
     *,
     spares: float = 0.0,
     many: float = 0.05,
@@ -268,16 +279,16 @@ def frame_with(
 ) -> Frame:
     """A frame that carries the packet: first in a telegram, or in a train position report."""
     rng = random.Random(f"{seed} {direction} {number}")  # noqa: S311
-    maker = Maker(rng, spares=spares, many=many, extreme=extreme)
+    maker = Maker(rng, edition, spares=spares, many=many, extreme=extreme)
     if direction == "to-track":
-        rows = tables.message_rows()[direction, POSITION_REPORT]
+        rows = maker.book.message_rows[direction, POSITION_REPORT]
         header = maker.fields(rows, {"NID_MESSAGE": POSITION_REPORT, "L_MESSAGE": 0})
         numbers = [number] if number in {0, 1} else [rng.choice((0, 1)), number]
         frame = maker.join("radio", direction, header, numbers, LONGEST_MESSAGE)
         return complete(frame, "0" * (-len(frame.text) % 8))
     header = maker.fields(
-        tables.header_rows()["balise"],
-        {"Q_UPDOWN": 1, "M_VERSION": SYSTEM_VERSION, "Q_MEDIA": 0},
+        maker.book.header_rows["balise"],
+        {"Q_UPDOWN": 1, "M_VERSION": edition.version_code, "Q_MEDIA": 0},
     )
     numbers = [tables.END_FLAG] if number == tables.END_FLAG else [number, tables.END_FLAG]
     return maker.join("balise", direction, header, numbers, None)

@@ -1,14 +1,14 @@
 """A naive decoder that works on a text of ``0`` and ``1`` characters.
 
-Source: the tables of SUBSET-026 issue 3.6.0 in ``fixtures/standard/v3_6_0`` and nothing else: no
-code of fishplate is used. Slow and plain on purpose. It reads valid frames only.
+Source: the tables of SUBSET-026 in ``fixtures/standard``, of the issue or version it is given, and
+nothing else: no code of fishplate is used. Slow and plain on purpose. It reads valid frames only.
 """
 
 from __future__ import annotations
 
 from typing import NamedTuple
 
-from oracle import tables
+from oracle import editions, tables
 
 PACKET_0_TO_TRAIN = ("to-train", 0)
 END = ("to-train", tables.END_FLAG)
@@ -41,8 +41,9 @@ def number(text: str, coding: str) -> int:
 class Reader:
     """A place in the text and what has been found so far."""
 
-    def __init__(self, text: str) -> None:
+    def __init__(self, text: str, book: tables.Tables) -> None:
         self.text = text
+        self.book = book
         self.at = 0
         self.found: list[Found] = []
 
@@ -51,7 +52,7 @@ class Reader:
         if row.index == tables.TEXT_INDEX:
             return self._take_text(row)
         bits = self._next(row.bits)
-        value = number(bits, tables.coding()[row.variable])
+        value = number(bits, self.book.coding[row.variable])
         self.found.append(Found(row.variable, self.at - row.bits, row.bits, value))
         return value
 
@@ -77,22 +78,51 @@ class Reader:
 
     def packet(self, direction: str) -> int:
         """Read one packet and give its number."""
+        key = (direction, int(self.text[self.at : self.at + 8], 2))
+        candidates = [self.book] if key in self.book.packet_rows else []
+        if key in self.book.forms:
+            candidates.append(self.book.forms[key])
         start, first = self.at, len(self.found)
-        identity = (direction, int(self.text[start : start + 8], 2))
-        tables.visit(tables.packet_rows()[identity], self.take)
-        if identity not in NO_LENGTH:
-            length = next(row.raw for row in self.found[first:] if row.variable == "L_PACKET")
-            self.unexplained(start + int(length))
-        return identity[1]
+        for book in candidates:
+            if self._fits(book, key, start, last=book is candidates[-1]):
+                return key[1]
+            self.at = start
+            del self.found[first:]
+        raise ValueError(f"packet {key} is in no table")
+
+    def _fits(self, book: tables.Tables, key: tables.Key, start: int, *, last: bool) -> bool:
+        """Read a packet by these tables; tell whether it ends where its L_PACKET says.
+
+        The last candidate need not: outside data follow the rows of packet 44.
+        """
+        first, own = len(self.found), self.book
+        self.book = book
+        try:
+            tables.visit(book.packet_rows[key], self.take)
+        except ValueError:
+            if last:
+                raise
+            return False
+        finally:
+            self.book = own
+        if key in NO_LENGTH:
+            return True
+        length = next(row.raw for row in self.found[first:] if row.variable == "L_PACKET")
+        end = start + int(length)
+        if last:
+            self.unexplained(end)
+        return self.at == end
 
 
-def decode(text: str, medium: str, direction: str) -> list[Found]:
+def decode(
+    text: str, medium: str, direction: str, book: tables.Tables = editions.V3_6_0.tables
+) -> list[Found]:
     """All variables of one frame in wire order."""
-    return (_radio if medium == "radio" else _telegram)(Reader(text), medium, direction)
+    return (_radio if medium == "radio" else _telegram)(Reader(text, book), medium, direction)
 
 
 def _telegram(reader: Reader, medium: str, direction: str) -> list[Found]:
-    tables.visit(tables.header_rows()[medium], reader.take)
+    tables.visit(reader.book.header_rows[medium], reader.take)
     while reader.packet(direction) != tables.END_FLAG:
         pass
     reader.unexplained(len(reader.text))
@@ -101,7 +131,7 @@ def _telegram(reader: Reader, medium: str, direction: str) -> list[Found]:
 
 def _radio(reader: Reader, _medium: str, direction: str) -> list[Found]:
     number_of_message = int(reader.text[:8], 2)
-    tables.visit(tables.message_rows()[direction, number_of_message], reader.take)
+    tables.visit(reader.book.message_rows[direction, number_of_message], reader.take)
     while len(reader.text) - reader.at >= 8:
         reader.packet(direction)
     reader.unexplained(len(reader.text))

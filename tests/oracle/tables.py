@@ -1,7 +1,8 @@
 """The published fact tables as plain rows, and the order in which a packet's rows are met.
 
-Source: SUBSET-026 issue 3.6.0, chapters 7 and 8 (European Union Agency for Railways), in the
-tables of ``fixtures/standard/v3_6_0``. Nothing of fishplate is imported here.
+Source: SUBSET-026, chapters 7 and 8 (European Union Agency for Railways), in the tables of
+``fixtures/standard``, one folder an issue; for versions with X = 1 chapter 6 too. Nothing of
+fishplate is imported here.
 """
 
 from __future__ import annotations
@@ -10,23 +11,23 @@ import csv
 import functools
 import re
 from collections.abc import Callable, Mapping
-from dataclasses import dataclass
+from dataclasses import dataclass, field
 from pathlib import Path
 
 FIXTURES = Path(__file__).resolve().parents[2] / "fixtures"
-FOLDER = FIXTURES / "standard" / "v3_6_0"
-DIRECTIONS = {"track-to-train": "to-train", "train-to-track": "to-track"}
+DIRECTIONS = {"track-to-train": "to-train", "train-to-track": "to-track", "either": "to-train"}
+"""What fishplate calls a direction; packet 255 is printed for either direction up to 3.3.0."""
+FROM = "from "
+"""How the note begins that says from whom a message may carry a packet; others are remarks."""
 TEXT_INDEX = "1..L_TEXT"
 END_FLAG = 255
 OUTSIDE_DATA = 44
 """The packet whose data follow its identifiers for as long as L_PACKET says."""
 
 
-@functools.cache
-def table(name: str) -> tuple[dict[str, str], ...]:
-    """All rows of one table."""
-    with (FOLDER / f"{name}.csv").open(encoding="utf-8", newline="") as file:
-        return tuple(csv.DictReader(file))
+Key = tuple[str, int]
+"""Direction and number of a packet or message."""
+Lines = tuple[dict[str, str], ...]
 
 
 @dataclass(frozen=True)
@@ -77,72 +78,109 @@ def terms(text: str) -> tuple[Term, ...]:
     return tuple(found)
 
 
-@functools.cache
-def packet_rows() -> Mapping[tuple[str, int], tuple[Row, ...]]:
-    """The rows of every packet by direction and number."""
-    packets: dict[tuple[str, int], list[Row]] = {}
-    for line in table("packet_fields"):
-        key = (DIRECTIONS[line["direction"]], int(line["packet"]))
-        packets.setdefault(key, []).append(
-            Row(
-                int(line["order"]),
-                line["variable"],
-                line["index"],
-                int(line["bits"]),
-                terms(line["present_when"]),
+@dataclass(frozen=True, eq=False)
+class Tables:
+    """The tables of one issue, or of one system version put together from several issues.
+
+    `lines` holds the plain rows by the name of their table. `forms` are other tables by which a
+    packet may be laid out too: where L_PACKET does not agree with the rows here, those decide.
+    """
+
+    name: str
+    lines: Mapping[str, Lines]
+    forms: Mapping[Key, Tables] = field(default_factory=dict)
+
+    def table(self, name: str) -> Lines:
+        """All rows of one table."""
+        return self.lines[name]
+
+    @functools.cached_property
+    def packet_rows(self) -> Mapping[Key, tuple[Row, ...]]:
+        """The rows of every packet by direction and number."""
+        packets: dict[Key, list[Row]] = {}
+        for line in self.table("packet_fields"):
+            packets.setdefault(key_of(line, "packet"), []).append(
+                Row(
+                    int(line["order"]),
+                    line["variable"],
+                    line["index"],
+                    int(line["bits"]),
+                    terms(line["present_when"]),
+                )
             )
-        )
-    return {key: tuple(rows) for key, rows in packets.items()}
+        return {key: tuple(rows) for key, rows in packets.items()}
+
+    @functools.cached_property
+    def message_rows(self) -> Mapping[Key, tuple[Row, ...]]:
+        """The fixed variables of every radio message."""
+        messages: dict[Key, list[Row]] = {}
+        for line in self.table("message_fields"):
+            rows = messages.setdefault(key_of(line, "message"), [])
+            if line["kind"] == "variable":
+                rows.append(Row(int(line["order"]), line["name"], "", int(line["bits"])))
+        return {key: tuple(rows) for key, rows in messages.items()}
+
+    @functools.cached_property
+    def required_packets(self) -> Mapping[Key, tuple[tuple[int, ...], ...]]:
+        """The packets that follow the fixed variables; each entry lists the alternatives."""
+        required: dict[Key, list[tuple[int, ...]]] = {}
+        for line in self.table("message_fields"):
+            entries = required.setdefault(key_of(line, "message"), [])
+            if line["kind"] == "packet":
+                entries.append(tuple(int(number) for number in line["name"].split("|")))
+        return {key: tuple(entries) for key, entries in required.items()}
+
+    @functools.cached_property
+    def optional_packets(self) -> Mapping[Key, tuple[tuple[int, str], ...]]:
+        """Packets a message may carry beyond the required ones, and from whom, if limited."""
+        optional: dict[Key, list[tuple[int, str]]] = {}
+        for line in self.table("message_optional_packets"):
+            note = line["note"]
+            sender = note.removeprefix(FROM) if note.startswith(FROM) else ""
+            optional.setdefault(key_of(line, "message"), []).append((int(line["packet"]), sender))
+        return {key: tuple(entries) for key, entries in optional.items()}
+
+    @functools.cached_property
+    def header_rows(self) -> Mapping[str, tuple[Row, ...]]:
+        """The header of a balise telegram and of a loop message."""
+        headers: dict[str, list[Row]] = {}
+        for line in self.table("telegram_headers"):
+            headers.setdefault(line["medium"], []).append(
+                Row(int(line["order"]), line["variable"], "", int(line["bits"]))
+            )
+        return {medium: tuple(rows) for medium, rows in headers.items()}
+
+    @functools.cached_property
+    def coding(self) -> Mapping[str, str]:
+        """The coding of every variable, in the words of ``variables.csv``."""
+        return {line["variable"]: line["coding"] for line in self.table("variables")}
+
+    @functools.cached_property
+    def codes(self) -> Mapping[str, tuple[tuple[int, int, str, str], ...]]:
+        """First and last code, kind and label of what has a meaning of its own, by variable."""
+        codes: dict[str, list[tuple[int, int, str, str]]] = {
+            line["variable"]: [] for line in self.table("variables")
+        }
+        for line in self.table("codes"):
+            codes[line["variable"]].append(
+                (int(line["code_first"]), int(line["code_last"]), line["kind"], line["label"])
+            )
+        return {name: tuple(sorted(rows)) for name, rows in codes.items()}
+
+
+def key_of(line: Mapping[str, str], kind: str) -> Key:
+    """Direction and number of a line that is about a ``packet`` or a ``message``."""
+    return DIRECTIONS[line["direction"]], int(line[kind])
 
 
 @functools.cache
-def message_rows() -> Mapping[tuple[str, int], tuple[Row, ...]]:
-    """The fixed variables of every radio message."""
-    messages: dict[tuple[str, int], list[Row]] = {}
-    for line in table("message_fields"):
-        key = (DIRECTIONS[line["direction"]], int(line["message"]))
-        rows = messages.setdefault(key, [])
-        if line["kind"] == "variable":
-            rows.append(Row(int(line["order"]), line["name"], "", int(line["bits"])))
-    return {key: tuple(rows) for key, rows in messages.items()}
-
-
-@functools.cache
-def required_packets() -> Mapping[tuple[str, int], tuple[tuple[int, ...], ...]]:
-    """The packets that follow the fixed variables; each entry lists the alternatives."""
-    required: dict[tuple[str, int], list[tuple[int, ...]]] = {}
-    for line in table("message_fields"):
-        entries = required.setdefault((DIRECTIONS[line["direction"]], int(line["message"])), [])
-        if line["kind"] == "packet":
-            entries.append(tuple(int(number) for number in line["name"].split("|")))
-    return {key: tuple(entries) for key, entries in required.items()}
-
-
-@functools.cache
-def optional_packets() -> Mapping[tuple[str, int], tuple[tuple[int, str], ...]]:
-    """Packets a message may carry beyond the required ones, with their note."""
-    optional: dict[tuple[str, int], list[tuple[int, str]]] = {}
-    for line in table("message_optional_packets"):
-        key = (DIRECTIONS[line["direction"]], int(line["message"]))
-        optional.setdefault(key, []).append((int(line["packet"]), line["note"]))
-    return {key: tuple(entries) for key, entries in optional.items()}
-
-
-@functools.cache
-def header_rows() -> Mapping[str, tuple[Row, ...]]:
-    """The header of a balise telegram and of a loop message."""
-    headers: dict[str, list[Row]] = {}
-    for line in table("telegram_headers"):
-        headers.setdefault(line["medium"], []).append(
-            Row(int(line["order"]), line["variable"], "", int(line["bits"]))
-        )
-    return {medium: tuple(rows) for medium, rows in headers.items()}
-
-
-@functools.cache
-def coding() -> Mapping[str, str]:
-    """The coding of every variable, in the words of ``variables.csv``."""
-    return {line["variable"]: line["coding"] for line in table("variables")}
+def published(folder: str) -> Tables:
+    """All tables of one folder of ``fixtures/standard``."""
+    lines = {}
+    for path in sorted((FIXTURES / "standard" / folder).glob("*.csv")):
+        with path.open(encoding="utf-8", newline="") as file:
+            lines[path.stem] = tuple(csv.DictReader(file))
+    return Tables(folder, lines)
 
 
 Take = Callable[[Row], int]

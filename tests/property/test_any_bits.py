@@ -17,8 +17,9 @@ import fishplate
 from bench import workload
 from fishplate.errors import FishplateError
 from fishplate.frames import encode_bits
-from property.test_frames import mutated, packed
-from property.trees import END_FLAG, Maker, seeded
+from fishplate.standard.editions import EDITIONS
+from property.reading import mutated, packed
+from property.trees import END_FLAG, USUAL, Maker, said_of, seeded
 
 if TYPE_CHECKING:
     from collections.abc import Callable, Iterator
@@ -29,7 +30,15 @@ LONGEST = 9_000
 TIMES = 20
 MEDIA = ("balise", "loop", "radio", None)
 
-Case = tuple[bytes, int, "str | None"]
+Case = tuple[bytes, int, "dict[str, Any]"]
+"""Bytes, bits, and what is said beside them."""
+
+# First bytes of telegrams: 1.0, 1.1, 2.0 to 2.3, 3.0; 1.2, 2.4, 3.1, 4.0 and 0.4.
+STARTS = (0x90, 0x91, 0xA0, 0xA1, 0xA2, 0xA3, 0xB0, 0x92, 0xA4, 0xB1, 0xC0, 0x84)
+
+
+def said(medium: str | None) -> dict[str, Any]:
+    return {"medium": medium} if medium else {}
 
 
 def noise(seed: int) -> Case:
@@ -45,17 +54,25 @@ def noise(seed: int) -> Case:
     elif kind >= 3 and size > 100:
         size -= size % 8
         value &= (1 << size) - 1
-        start, width = ((0x90, 0x91, 0xA0, 0xA1)[random.randrange(4)], 8)
+        start, width = (random.choice(STARTS), 8)
         if kind > 3:
             start, width = random.randrange(256) << 10 | min(1023, size // 8), 18
         value = value & (1 << size - width) - 1 | start << size - width
-    return packed(value, size), size, random.choice(MEDIA)
+    medium = random.choice(MEDIA)
+    beside = said(medium)
+    if not random.randrange(3):
+        edition = random.choice(EDITIONS)
+        beside |= {"issue": edition.issue}
+        # A telegram says its version itself.
+        beside |= {"version": edition.version} if medium == "radio" else {}
+    return packed(value, size), size, beside
 
 
 def damage(seed: int) -> Case:
-    """A valid frame with bits flipped, cut, inserted, added or repeated."""
-    value, size, tree = mutated(seed)
-    return packed(value, size), size, seeded(seed).choice((tree["medium"], None))
+    """A valid frame of any edition with bits flipped, cut, inserted, added or repeated."""
+    edition = EDITIONS[seed // 2 % len(EDITIONS)] if seed % 2 else USUAL
+    value, size, tree = mutated(seed, edition)
+    return packed(value, size), size, seeded(seed).choice((said_of(tree), {}))
 
 
 def telegram(packets: bytes, bits: int) -> Case:
@@ -68,7 +85,7 @@ def telegram(packets: bytes, bits: int) -> Case:
             "filler": {"bits": bits, "hex": packets.hex()},
         }
     )
-    return packed(value, size), size, "balise"
+    return packed(value, size), size, {"medium": "balise"}
 
 
 HEADER = {
@@ -89,8 +106,8 @@ def hostile() -> Iterator[Case]:
     """Frames made to cost as much as they can."""
     for size in (210, 830, 8184, LONGEST):
         for medium in MEDIA:
-            yield packed((1 << size) - 1, size), size, medium
-            yield packed(0, size), size, medium
+            yield packed((1 << size) - 1, size), size, said(medium)
+            yield packed(0, size), size, said(medium)
     for head, width in ((b"\x69\x00\x17", 23), (b"\xfe\x00\x17", 23), (b"\x69\x00\x00", 23)):
         # Four hundred packets that hold nothing but their head: known ones with a layout that
         # goes on, unknown ones, and ones whose L_PACKET does not cover its head.
@@ -115,10 +132,10 @@ def hostile() -> Iterator[Case]:
     steps = [{**each, "categories": [category] * 19} for each in nested["steps"][:32]]
     fullest = {"NID_PACKET": 27, "Q_DIR": 1, "Q_SCALE": 1, "steps": steps[:29]}
     value, size = encode_bits(tree | {"packets": [fullest, {"NID_PACKET": END_FLAG}]})
-    yield packed(value, size), size, "balise"
-    yield packed(value, size), size, None
+    yield packed(value, size), size, said("balise")
+    yield packed(value, size), size, {}
     for cut in range(1, 60):
-        yield packed(value >> cut, size - cut), size - cut, "balise"
+        yield packed(value >> cut, size - cut), size - cut, said("balise")
 
 
 def ended(run: Callable[[], object]) -> object:
@@ -131,9 +148,9 @@ def ended(run: Callable[[], object]) -> object:
 
 def check(case: Case) -> None:
     """Decode strictly and leniently, and write back what was read."""
-    data, size, medium = case
-    ended(lambda: fishplate.decode(data, bits=size, medium=medium))
-    message = fishplate.decode(data, bits=size, medium=medium, strict=False)
+    data, size, beside = case
+    ended(lambda: fishplate.decode(data, bits=size, **beside))
+    message = fishplate.decode(data, bits=size, **beside, strict=False)
     value, width = encode_bits(message)
     assert width == size
     assert packed(value, width) == data[: len(packed(value, width))] or size % 8
@@ -142,9 +159,9 @@ def check(case: Case) -> None:
 
 def check_walk(case: Case) -> None:
     """Walk strictly and leniently."""
-    data, size, medium = case
-    ended(lambda: list(fishplate.walk(data, bits=size, medium=medium)))
-    rows = list(fishplate.walk(data, bits=size, medium=medium, strict=False))
+    data, size, beside = case
+    ended(lambda: list(fishplate.walk(data, bits=size, **beside)))
+    rows = list(fishplate.walk(data, bits=size, **beside, strict=False))
     assert sum(row.width for row in rows) == size
 
 
@@ -184,13 +201,13 @@ def test_hostile_frames_end_in_a_value_or_our_error() -> None:
 
 
 def lenient(case: Case) -> None:
-    data, size, medium = case
-    fishplate.decode(data, bits=size, medium=medium, strict=False)
+    data, size, beside = case
+    fishplate.decode(data, bits=size, **beside, strict=False)
 
 
 def strict(case: Case) -> None:
-    data, size, medium = case
-    ended(lambda: fishplate.decode(data, bits=size, medium=medium))
+    data, size, beside = case
+    ended(lambda: fishplate.decode(data, bits=size, **beside))
 
 
 def seconds(run: Callable[[], object], times: int) -> float:
@@ -238,8 +255,8 @@ def allowed(case: Case, decode: Callable[[Case], None]) -> float:
     most = 1.25 * TIMES
     if decode is strict:
         return most
-    data, size, medium = case
-    message = fishplate.decode(data, bits=size, medium=medium, strict=False)
+    data, size, beside = case
+    message = fishplate.decode(data, bits=size, **beside, strict=False)
     return most + len(message.problems) / 3
 
 

@@ -1,7 +1,8 @@
 """Random trees of everything the registry declares, drawn node by node from its layouts.
 
 The trees are valid bit for bit and mean nothing: any code may stand in any variable. `random`
-may be a seeded `random.Random` or the one hypothesis hands out.
+may be a seeded `random.Random` or the one hypothesis hands out. Every edition of the standard has
+its own trees; packets that may come as another version lays them out come in both forms.
 """
 
 from __future__ import annotations
@@ -9,7 +10,11 @@ from __future__ import annotations
 from random import Random
 from typing import TYPE_CHECKING, Any
 
+from fishplate.engine.spell import Spelling
+from fishplate.engine.walk import Cursor, Walk
+from fishplate.errors import Truncated
 from fishplate.standard import registry
+from fishplate.standard.editions import EDITIONS, Edition, edition
 from fishplate.standard.vocabulary import (
     Eq,
     Field,
@@ -26,13 +31,13 @@ from fishplate.standard.vocabulary import (
 if TYPE_CHECKING:
     from collections.abc import Sequence
 
+    from fishplate.standard import Registry
     from fishplate.standard.vocabulary import Condition, Node
 
 Tree = dict[str, Any]
 
-REGISTRY = registry("2.1")
-PACKETS = sorted(REGISTRY.packets)
-MESSAGES = sorted(REGISTRY.messages)
+USUAL = EDITIONS[0]
+REGISTRY = registry(USUAL.version, USUAL.issue)
 END_FLAG = 255
 VIRTUAL_COVER = 0
 LONGEST_PACKET = 8191
@@ -58,16 +63,36 @@ def true_of(condition: Condition, codes: Tree) -> bool:
     return codes[condition.variable] in condition.codes
 
 
-class Maker:
-    """Draws trees; `most` bounds N_ITER (31 makes the largest packets)."""
+def book_of(each: Edition) -> Registry:
+    """Return the registry of an edition."""
+    return registry(each.version, each.issue)
 
-    def __init__(self, random: Random, most: int = 3) -> None:
+
+def said_of(tree: Tree) -> dict[str, str]:
+    """Return what has to be said beside the bits of a tree: nothing that they say themselves."""
+    said = {"medium": tree["medium"], "direction": tree["direction"]}
+    version, issue = tree["version"], tree["issue"]
+    if tree["medium"] == "radio" and version != USUAL.version:
+        said["version"] = version
+    usual = edition(version)
+    if usual is None or usual.issue != issue:
+        said["issue"] = issue
+    return said
+
+
+class Maker:
+    """Draws trees of one edition; `most` bounds N_ITER (31 makes the largest packets)."""
+
+    def __init__(self, random: Random, most: int = 3, edition: Edition = USUAL) -> None:
         self.random = random
         self.most = most
+        self.edition = edition
+        self.book = book_of(edition)
+        self.codes = self.book
 
     def code(self, name: str) -> int | str:
         """Draw a code: often one at the edges of the range."""
-        variable = REGISTRY.variables[name]
+        variable = self.codes.variables[name]
         bits = variable.bits
         if variable.coding == "digits":
             count = self.random.randint(0, bits // 4)
@@ -113,7 +138,7 @@ class Maker:
                     count = self._count() + isinstance(node, Series)
                     tree[node.name] = [self.scope(node.nodes, codes) for _ in range(count)]
                 case Text():
-                    most = (1 << REGISTRY.variables[node.length].bits) - 1
+                    most = (1 << self.codes.variables[node.length].bits) - 1
                     length = min(most, self.random.choice((0, 1, 5, 20, 10 * self.most, most)))
                     letters = [chr(self.random.randrange(256)) for _ in range(length)]
                     tree[node.element] = "".join(letters)
@@ -125,41 +150,75 @@ class Maker:
 
     def packet(self, direction: str, number: int) -> Tree:
         """Draw a packet without L_PACKET, which the writer computes."""
-        while True:
-            tree = self.scope(REGISTRY.packets[direction, number].nodes)
-            tree["NID_PACKET"] = number
-            tree.pop("L_PACKET", None)
-            if width_of(tree, direction) <= LONGEST_PACKET:
-                return tree
-            self.most = 1
+        form = self.book.forms.get((direction, number))
+        if form and form.only:
+            return self._packet(registry(form.version), direction, number) | {"form": form.version}
+        if form and self.random.randrange(2):
+            tree = self._packet(registry(form.version), direction, number)
+            if not self._fits_own_layout(registry(form.version), tree, direction):
+                return tree | {"form": form.version}
+        return self._packet(self.book, direction, number)
+
+    def _packet(self, book: Registry, direction: str, number: int) -> Tree:
+        self.codes = book
+        try:
+            while True:
+                tree = self.scope(book.packets[direction, number].nodes)
+                tree["NID_PACKET"] = number
+                tree.pop("L_PACKET", None)
+                if width_of(tree, direction, book) <= LONGEST_PACKET:
+                    return tree
+                self.most = 1
+        finally:
+            self.codes = self.book
+
+    def _fits_own_layout(self, book: Registry, tree: Tree, direction: str) -> bool:
+        """Tell whether the bits of another form may as well be the version's own."""
+        nodes = book.packets[direction, tree["NID_PACKET"]].nodes
+        spelling = Spelling(book.variables)
+        spelling.scope(nodes, tree, (), {})
+        value = size = 0
+        for part, bits in spelling.pieces:
+            value, size = value << bits | part, size + bits
+        cursor = Cursor(value, size)
+        own = self.book.packets[direction, tree["NID_PACKET"]].nodes
+        try:
+            Walk(self.book.variables, cursor).scope(own, (), {})
+        except Truncated:
+            return False
+        return cursor.left == 0
 
     def packets(self, direction: str, most: int = 4) -> list[Tree]:
         """Draw some packets, of any kind but the end flag."""
-        numbers = [n for way, n in PACKETS if way == direction and n != END_FLAG]
-        if direction == "to-train":
-            numbers.remove(VIRTUAL_COVER)  # it may only come first in a telegram
+        # Packet 0 to the train may only come first in a telegram.
+        special = (END_FLAG, VIRTUAL_COVER) if direction == "to-train" else ()
+        numbers = [n for way, n in sorted(self.book.packets) if way == direction]
+        numbers = [n for n in numbers if n not in special]
         count = self.random.randint(0, most)
         return [self.packet(direction, self.random.choice(numbers)) for _ in range(count)]
 
     def message(self, direction: str, number: int) -> Tree:
         """Draw a radio message."""
-        header = self.scope(REGISTRY.messages[direction, number].nodes)
+        header = self.scope(self.book.messages[direction, number].nodes)
         header["NID_MESSAGE"] = number
         header.pop("L_MESSAGE")
         packets = self.packets(direction)
-        while sum(width_of(each, direction) for each in packets) > 8 * LONGEST_MESSAGE - 1000:
+        while sum(self.width_of(each, direction) for each in packets) > 8 * LONGEST_MESSAGE - 1000:
             packets.pop()
-        return _tree("radio", direction, header, packets)
+        return self._tree("radio", direction, header, packets)
 
     def telegram(self, medium: str) -> Tree:
         """Draw a balise telegram or a loop message, with any filler behind its end flag."""
-        header = self.scope(REGISTRY.headers[medium].nodes)
-        header |= {"Q_UPDOWN": 1, "M_VERSION": 33, "Q_MEDIA": int(medium == "loop")}
+        header = self.scope(self.book.headers[medium].nodes)
+        x, _, y = self.edition.version.partition(".")
+        code = int(x) << 4 | int(y)
+        header |= {"Q_UPDOWN": 1, "M_VERSION": code, "Q_MEDIA": int(medium == "loop")}
         packets = self.packets("to-train")
-        if medium == "balise" and not self.random.randrange(5):
+        covered = ("to-train", VIRTUAL_COVER) in self.book.packets
+        if medium == "balise" and covered and not self.random.randrange(5):
             packets.insert(0, self.packet("to-train", VIRTUAL_COVER))
         packets.append({"NID_PACKET": END_FLAG})
-        tree = _tree(medium, "to-train", header, packets)
+        tree = self._tree(medium, "to-train", header, packets)
         tree["filler"] = self.blob(self.random.choice((0, 1, 8, 57)))
         return tree
 
@@ -168,18 +227,22 @@ class Maker:
         kind = self.random.randrange(5)
         if kind < 2:
             return self.telegram(("balise", "loop")[kind])
-        return self.message(*self.random.choice(MESSAGES))
+        return self.message(*self.random.choice(sorted(self.book.messages)))
 
+    def _tree(self, medium: str, direction: str, header: Tree, packets: list[Tree]) -> Tree:
+        return {
+            "medium": medium,
+            "direction": direction,
+            "version": self.edition.version,
+            "issue": self.edition.issue,
+            "header": header,
+            "packets": packets,
+        }
 
-def _tree(medium: str, direction: str, header: Tree, packets: list[Tree]) -> Tree:
-    return {
-        "medium": medium,
-        "direction": direction,
-        "version": "2.1",
-        "issue": "3.6.0",
-        "header": header,
-        "packets": packets,
-    }
+    def width_of(self, tree: Tree, direction: str) -> int:
+        """Return how many bits a packet takes, counted over the layout of its form."""
+        book = registry(tree["form"]) if "form" in tree else self.book
+        return width_of(tree, direction, book)
 
 
 def _asked(nodes: Sequence[Node]) -> dict[str, list[int]]:
@@ -196,28 +259,29 @@ def _asked(nodes: Sequence[Node]) -> dict[str, list[int]]:
     return asked
 
 
-def width_of(tree: Tree, direction: str) -> int:
+def width_of(tree: Tree, direction: str, book: Registry = REGISTRY) -> int:
     """Return how many bits a packet takes, counted over its layout."""
-    return _width(REGISTRY.packets[direction, tree["NID_PACKET"]].nodes, tree, {})
+    return _width(book, book.packets[direction, tree["NID_PACKET"]].nodes, tree, {})
 
 
-def _width(nodes: Sequence[Node], tree: Tree, outer: Tree) -> int:
+def _width(book: Registry, nodes: Sequence[Node], tree: Tree, outer: Tree) -> int:
     codes = outer | tree
     bits = 0
     for node in nodes:
         match node:
             case Field():
-                bits += REGISTRY.variables[node.variable].bits
+                bits += book.variables[node.variable].bits
                 codes[node.variable] = tree.get(node.name, 0)
             case When():
-                bits += _width(node.nodes, tree, codes) if true_of(node.condition, codes) else 0
+                if true_of(node.condition, codes):
+                    bits += _width(book, node.nodes, tree, codes)
             case Group():
-                bits += _width(node.nodes, tree[node.name], codes)
+                bits += _width(book, node.nodes, tree[node.name], codes)
             case Series() | Repeat():
-                bits += REGISTRY.variables["N_ITER"].bits
-                bits += sum(_width(node.nodes, each, codes) for each in tree[node.name])
+                bits += book.variables["N_ITER"].bits
+                bits += sum(_width(book, node.nodes, each, codes) for each in tree[node.name])
             case Text():
-                bits += REGISTRY.variables[node.length].bits + 8 * len(tree[node.element])
+                bits += book.variables[node.length].bits + 8 * len(tree[node.element])
             case Opaque():
                 bits += tree[node.name]["bits"]
     return bits

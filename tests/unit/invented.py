@@ -68,6 +68,7 @@ def header(medium: Any, bits: int, *nodes: Node) -> Header:
 
 
 BASE = Declarations(
+    layouts="invented",
     version="9.0",
     issue="invented",
     date="01/01/2031",
@@ -113,7 +114,8 @@ def without(name: str) -> Declarations:
 def again(field: str) -> Declarations:
     """Declare the first of a kind twice."""
     entries = getattr(BASE, field)
-    return dataclasses.replace(BASE, **{field: (*entries, entries[0])})
+    twice: dict[str, Any] = {field: (*entries, entries[0])}
+    return dataclasses.replace(BASE, **twice)
 
 
 def with_codes(*codes: Codes, **more: Any) -> Declarations:

@@ -338,6 +338,11 @@ CASES: dict[str, tuple[Callable[[], Declarations], tuple[str, ...], str]] = {
         P9,
         "key content is reserved",
     ),
+    "reserved name of a group": (
+        lambda: with_packet(Group("form", (FLAG,))),
+        P9,
+        "key form is reserved",
+    ),
     "empty set": (lambda: with_packet(Repeat("steps", ())), (*P9, "steps"), "no field in it"),
     "set that begins with a condition": (  # no layout of the standard does
         lambda: with_packet(FLAG, Repeat("steps", (When(Eq("Q_FLAG", 1), (Field("T_WAIT"),)),))),

@@ -1,4 +1,4 @@
-"""Layouts as data: JSON and back, every kind of node everywhere, and composing another issue."""
+"""Layouts as data: JSON and back, and every kind of node everywhere."""
 
 from __future__ import annotations
 
@@ -10,7 +10,7 @@ from typing import TYPE_CHECKING, Any
 
 import pytest
 
-from fishplate.engine.generate import module_source
+from fishplate.engine.generate import Module
 from fishplate.engine.reading import ReaderSource
 from fishplate.engine.runtime import MISFITS
 from fishplate.engine.spell import Spelling
@@ -18,10 +18,9 @@ from fishplate.engine.walk import Cursor, Walk
 from fishplate.engine.writing import WriterSource
 from fishplate.errors import EncodeError, RegistryError
 from fishplate.standard.as_json import node_from_json, node_to_json
-from fishplate.standard.build import build, registry
-from fishplate.standard.v3_6_0 import DECLARATIONS
+from fishplate.standard.build import registry
+from fishplate.standard.editions import EDITIONS
 from fishplate.standard.vocabulary import (
-    Codes,
     Condition,
     Eq,
     Field,
@@ -30,12 +29,10 @@ from fishplate.standard.vocabulary import (
     Ne,
     Node,
     Opaque,
-    Optional,
     Packet,
     Repeat,
     Series,
     Text,
-    Variable,
     When,
 )
 
@@ -43,10 +40,16 @@ if TYPE_CHECKING:
     from collections.abc import Callable, Sequence
 
 REGISTRY = registry("2.1")
+BOOKS = {each.layouts: registry(each.version, each.issue) for each in EDITIONS}
 LAYOUTS = {
-    **{f"{way} packet {number}": each for (way, number), each in REGISTRY.packets.items()},
-    **{f"{way} message {number}": each for (way, number), each in REGISTRY.messages.items()},
-    **{f"{medium} header": each for medium, each in REGISTRY.headers.items()},
+    f"{name} {what} {key}": layout
+    for name, book in BOOKS.items()
+    for what, layouts in (
+        ("packet", book.packets),
+        ("message", book.messages),
+        ("header", book.headers),
+    )
+    for key, layout in layouts.items()
 }
 
 
@@ -148,7 +151,8 @@ def check_node(node: Node, body: str, tree: dict[str, Any]) -> None:
 def compiled(nodes: Sequence[Node]) -> tuple[Callable[..., Any], Callable[..., Any]]:
     """Build the generated module of a registry that has one packet of these nodes, and run it."""
     packet = Packet(5, "to-train", "0.0", "invented", ("Any",), tuple(nodes))
-    source = module_source(dataclasses.replace(REGISTRY, packets={("to-train", 5): packet}))
+    invented = dataclasses.replace(REGISTRY, packets={("to-train", 5): packet})
+    source = Module(invented, []).source()
     names: dict[str, Any] = {}
     exec(compile(source, "generated", "exec"), names)  # noqa: S102  our own generator's output
     return names["read_to_train_5"], names["write_to_train_5"]
@@ -199,78 +203,3 @@ def test_each_kind_leaves_a_mark(visitor: Callable[[Node], Any]) -> None:
     for kind, (node, _, _) in KINDS.items():
         if kind is not When:
             assert visitor(node) != nothing, kind
-
-
-# --- composition -----------------------------------------------------------------------------
-
-
-def further_issue() -> Any:
-    """Compose an invented issue of 3.6.0: one variable renamed, one wider, one packet more."""
-    renamed = next(each for each in DECLARATIONS.variables if each.name == "V_EMA")
-    variables = tuple(
-        dataclasses.replace(each, name="V_END", formerly=("V_EMA",), lineage="V_EMA")
-        if each is renamed
-        else dataclasses.replace(each, bits=9, plain=None, codes=())
-        if each.name == "M_AXLELOADCAT"
-        else each
-        for each in DECLARATIONS.variables
-    )
-    extra = Variable(
-        "M_INVENTED", "0.0", 3, "unsigned", "Invented", codes=(Codes(0, 0, "value", "nothing"),)
-    )
-    added = Packet(
-        200,
-        "to-train",
-        "0.0",
-        "Invented",
-        ("Any",),
-        (*HEAD, Repeat("inventions", (Field("M_INVENTED"), Field("V_END")))),
-    )
-    packets = tuple(
-        dataclasses.replace(each, nodes=tuple(_renamed(node) for node in each.nodes))
-        for each in DECLARATIONS.packets
-    )
-    messages = tuple(
-        dataclasses.replace(each, optional=(*each.optional, Optional(200)))
-        if each.number == 3
-        else each
-        for each in DECLARATIONS.messages
-    )
-    return dataclasses.replace(
-        DECLARATIONS,
-        version="9.1",
-        issue="invented",
-        variables=(*variables, extra),
-        packets=(*packets, added),
-        messages=messages,
-    )
-
-
-def _renamed(node: Node) -> Node:
-    if isinstance(node, Field) and node.variable == "V_EMA":
-        return Field("V_END", node.key)
-    return node
-
-
-def test_another_issue_is_composed_of_declarations_only() -> None:
-    built = build(further_issue())
-    assert (built.version, built.issue) == ("9.1", "invented")
-    assert len(built.packets) == len(REGISTRY.packets) + 1
-    assert built.of_lineage("V_EMA").name == "V_END"
-    assert built.of_lineage("V_EMA").formerly == ("V_EMA",)
-    assert REGISTRY.of_lineage("V_EMA").name == "V_EMA", "the issue beside it is untouched"
-    names: dict[str, Any] = {}
-    exec(compile(module_source(built), "generated", "exec"), names)  # noqa: S102  our own output
-    codec = names["CODEC"]
-    tree = {"NID_PACKET": 200, "Q_DIR": 1, "inventions": [{"M_INVENTED": 5, "V_END": 12}]}
-    # By hand: 11001000 01 L_PACKET(0 until the frame fills it in) 00001 101 0001100.
-    expected = int("11001000010000000000000000011010001100", 2)
-    assert codec.write_packet["to-train"][200](tree) == (expected, 38)
-    assert codec.read_packet["to-train"][200](expected, 38) == (tree | {"L_PACKET": 38}, 0)
-    assert codec.issue == "invented"
-
-
-def test_a_name_forgotten_while_renaming_is_found() -> None:
-    declarations = dataclasses.replace(further_issue(), packets=DECLARATIONS.packets)
-    with pytest.raises(RegistryError, match="unknown variable V_EMA"):
-        build(declarations)

@@ -9,7 +9,7 @@ import copy
 import json
 import random
 from pathlib import Path
-from typing import Any
+from typing import TYPE_CHECKING, Any
 
 import jsonschema
 import pytest
@@ -25,8 +25,12 @@ from fishplate.models import (
     telegram_model,
 )
 from fishplate.standard import registry
+from fishplate.standard.editions import EDITIONS
 from fishplate.trees import CONTEXT, read_yaml, split_context
 from property.trees import Maker
+
+if TYPE_CHECKING:
+    from fishplate.standard.editions import Edition
 
 REGISTRY = registry("2.1")
 DEMO = Path(__file__).resolve().parents[2] / "fixtures" / "demo"
@@ -109,6 +113,54 @@ def test_schema_of_every_packet(direction: str, number: int) -> None:
     assert from_model["properties"].keys() == schema["properties"].keys()
 
 
+# One version for each set of layouts beside the usual one.
+OTHERS = list({each.layouts: each for each in EDITIONS if each != EDITIONS[0]}.values())
+
+
+@pytest.mark.parametrize("edition", OTHERS, ids=" ".join)
+def test_models_schema_and_encoder_agree_in_every_edition(edition: Edition) -> None:
+    version, issue = edition[:2]
+    chance = random.Random(" ".join(edition))  # noqa: S311  repeatable test data
+    for direction, number in sorted(registry(version, issue).messages):
+        tree = Maker(chance, edition=edition).message(direction, number)
+        bits = fishplate.encode(tree)
+        given: dict[str, Any] = {"medium": "radio", "direction": direction}
+        given |= {"version": version, "issue": issue}
+        decoded = fishplate.decode(bits, **given).tree()
+        model = message_model(number, direction, version, issue)
+        for each in (tree, decoded):
+            codes = model.model_validate(each).model_dump(exclude_none=True)
+            assert fishplate.encode(codes) == bits, number
+        assert codes_of(tree)["packets"] == tree["packets"]
+        if number % 4 == 0 and tree["packets"]:
+            validator = jsonschema.Draft202012Validator(
+                json_schema("message", direction, number, version=version, issue=issue)
+            )
+            assert not [each.message for each in validator.iter_errors(tree)], number
+            wrong = spoilt(tree, chance)
+            with pytest.raises(fishplate.EncodeError):
+                codes_of(wrong)
+            assert list(validator.iter_errors(wrong))
+
+
+@pytest.mark.parametrize("edition", OTHERS, ids=" ".join)
+def test_schema_of_every_packet_of_every_edition(edition: Edition) -> None:
+    version, issue = edition[:2]
+    book = registry(version, issue)
+    chance = random.Random(" ".join(edition))  # noqa: S311  repeatable test data
+    for direction, number in sorted(book.packets):
+        schema = json_schema("packet", direction, number, version=version, issue=issue)
+        jsonschema.Draft202012Validator.check_schema(schema)
+        validator = jsonschema.Draft202012Validator(schema)
+        maker = Maker(chance, edition=edition)
+        for tree in [maker.packet(direction, number) for _ in range(6)]:
+            assert not [each.message for each in validator.iter_errors(tree)], number
+            # The form of a packet may be left out, not be said wrong.
+            if tree.pop("form", None):
+                assert validator.is_valid(tree), number
+                assert not validator.is_valid({**tree, "form": "1.0"}), number
+
+
 @pytest.mark.parametrize("kind", ["telegram", "loop", "frame"])
 def test_schemas_are_schemas(kind: str) -> None:
     schema = json_schema(kind)
@@ -186,7 +238,7 @@ def test_short_forms_of_labels_are_in_the_schema() -> None:
     assert not validator.is_valid(tree)
 
 
-@pytest.mark.parametrize("version", ["1.0", "3.0"])
+@pytest.mark.parametrize("version", ["0.3", "1.2", "2.4", "4.0"])
 def test_packets_need_layouts_of_the_version_announced(version: str) -> None:
     tree = next(each for _, each in documents() if each["medium"] == "balise")
     tree, _ = split_context(tree)

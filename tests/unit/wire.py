@@ -77,3 +77,19 @@ TEMPORARY = packet(66, field(9, 8))
 
 ORDER = packet(2, field(33, 7))
 """Packet 2, system version order: M_VERSION (7.4.2.1)."""
+
+
+def position(*, mode_bits: int = 4, previous: bool = False, integrity: int = 0) -> str:
+    """Write packet 0 to the trackside, or packet 1 with a previous group (7.4.3.1, 7.4.3.2).
+
+    M_MODE is 4 bits wide up to issue 3.6.0, 5 bits in issue 4.0.0; full supervision (0), level 2.
+    """
+    fields = [(1, 2), (9050, 24), *([(9051, 24)] if previous else []), (1200, 15), (1, 2), (1, 2)]
+    fields += [(40, 15), (50, 15), (integrity, 2), *([(400, 15)] if integrity in (1, 2) else [])]
+    fields += [(24, 7), (1, 2), (0, mode_bits), (3, 3)]
+    return packet_back(1 if previous else 0, "".join(field(*each) for each in fields))
+
+
+def report(*packets: str, **more: Any) -> str:
+    """Write message 136, train position report: T_TRAIN, NID_ENGINE (8.6.5)."""
+    return radio(136, field(5, 32) + field(9, 24) + "".join(packets), **more)

@@ -6,43 +6,117 @@ would give.
 
 from __future__ import annotations
 
+import re
 import sys
 from pathlib import Path
 from typing import TYPE_CHECKING
 
 from fishplate.engine.reading import ReaderSource
-from fishplate.engine.runtime import MODULES
 from fishplate.engine.source import fixed_fields
 from fishplate.engine.writing import WriterSource
 from fishplate.standard import registry
+from fishplate.standard.editions import EDITIONS
 from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN, Field, Packet
 
 if TYPE_CHECKING:
-    from collections.abc import Iterator
+    from collections.abc import Iterator, Sequence
 
     from fishplate.standard import Registry
 
 FOLDER = Path(__file__).parent / "generated"
 
-HEAD = '''"""Readers and writers of SUBSET-026 issue {issue}.
+HEAD = '''"""Readers and writers of SUBSET-026, layouts {layouts}.
 
 Written by ``python -m fishplate.engine.generate`` from the registry; never edit it.
 """
 
 from __future__ import annotations
 
-from fishplate.bits import blob, digits_text, digits_value, read_blob
-from fishplate.engine.runtime import Codec, Misfit, Tree
-'''
+{imports}'''
+
+ORIGINS = {
+    "fishplate.bits": ("blob", "digits_text", "digits_value", "read_blob"),
+    "fishplate.engine.runtime": ("Codec", "Misfit", "Tree"),
+}
+"""What a generated module may import, and from where."""
 
 
-def module_source(registry: Registry) -> str:
-    """Return the whole source of the generated module of one registry."""
-    functions = [*_packets(registry), *_messages(registry), *_headers(registry)]
-    return HEAD.format(issue=registry.issue) + "".join(functions) + _table(registry)
+class Module:
+    """The generated module of one registry; what its bases hold the same is taken from there."""
+
+    def __init__(self, registry: Registry, bases: Sequence[Module]) -> None:
+        self.registry = registry
+        self.name = registry.layouts
+        every = dict((*_packets(registry), *_messages(registry), *_headers(registry)))
+        homes = {name: _home(name, text, bases) for name, text in every.items()}
+        self.own = {name: text for name, text in every.items() if not homes[name]}
+        self.homes = {name: home for name, home in homes.items() if home}
+
+    def source(self) -> str:
+        """Return the whole source of the module."""
+        body = "".join(self.own.values()) + self._table()
+        lines = [
+            f"from fishplate.engine.generated import {home}"
+            for home in sorted(set(self.homes.values()))
+        ]
+        for module, names in ORIGINS.items():
+            used = [each for each in names if re.search(rf"\b{each}\b", body)]
+            if used:
+                lines.append(f"from {module} import {', '.join(used)}")
+        head = HEAD.format(layouts=self.name, imports="\n".join(sorted(lines)) + "\n")
+        return head + body
+
+    def _called(self, name: str) -> str:
+        return f"{self.homes[name]}.{name}" if name in self.homes else name
+
+    def _table(self) -> str:
+        registry = self.registry
+        lines = ["", "", "CODEC = Codec(", f'    layouts="{self.name}",']
+        for verb in ("read", "write"):
+            for kind in ("packet", "message"):
+                lines += self._by_number(verb, kind)
+            media = ", ".join(
+                f'"{medium}": {self._called(f"{verb}_{medium}")}' for medium in registry.headers
+            )
+            lines.append(f"    {verb}_header={{{media}}},")
+        lines += [f"    unmeasured={_unmeasured(registry)},"]
+        lines += [f"    forms={_forms(registry)},"]
+        evidence = tuple((each.kind, each.note, each.subject) for each in registry.evidence)
+        lines += [f"    evidence={evidence!r},", ")", ""]
+        return "\n".join(lines)
+
+    def _by_number(self, verb: str, kind: str) -> Iterator[str]:
+        only = {key for key, form in self.registry.forms.items() if form.only}
+        keys: set[tuple[str, int]] = set(self.registry.messages)
+        if kind == "packet":
+            keys = set(self.registry.packets) - only
+        yield f"    {verb}_{kind}={{"
+        for direction in (TO_TRAIN, TO_TRACK):
+            yield f'        "{direction}": {{'
+            for number in sorted(number for way, number in keys if way == direction):
+                stem = f"{_word(direction)}_" if kind == "packet" else "message_"
+                yield f"            {number}: {self._called(f'{verb}_{stem}{number}')},"
+            yield "        },"
+        yield "    },"
 
 
-def _packets(registry: Registry) -> Iterator[str]:
+def _home(name: str, text: str, bases: Sequence[Module]) -> str:
+    """Return the module that holds the same function already, if one does."""
+    return next((base.name for base in bases if base.own.get(name) == text), "")
+
+
+def modules() -> list[Module]:
+    """Return the modules of all editions, each behind those it is composed from."""
+    done: dict[str, Module] = {}
+    waiting = {each.layouts: registry(each.version, each.issue) for each in EDITIONS}
+    while waiting:
+        name = next(name for name, each in waiting.items() if set(each.bases) <= set(done))
+        each = waiting.pop(name)
+        done[name] = Module(each, [done[base] for base in each.bases])
+    return list(done.values())
+
+
+def _packets(registry: Registry) -> Iterator[tuple[str, str]]:
     for packet in registry.packets.values():
         name = f"{_word(packet.direction)}_{packet.number}"
         known = {"NID_PACKET": str(packet.number)}
@@ -54,7 +128,7 @@ def _packets(registry: Registry) -> Iterator[str]:
         yield _writer(name, WriterSource(registry.variables, packet.nodes, known).lines)
 
 
-def _messages(registry: Registry) -> Iterator[str]:
+def _messages(registry: Registry) -> Iterator[tuple[str, str]]:
     for message in registry.messages.values():
         name = f"message_{message.number}"
         known = {"NID_MESSAGE": str(message.number)}
@@ -62,20 +136,20 @@ def _messages(registry: Registry) -> Iterator[str]:
         yield _writer(name, WriterSource(registry.variables, message.nodes, known).lines)
 
 
-def _headers(registry: Registry) -> Iterator[str]:
+def _headers(registry: Registry) -> Iterator[tuple[str, str]]:
     for header in registry.headers.values():
         yield _reader(header.medium, ReaderSource(registry.variables, header.nodes).lines)
         yield _writer(header.medium, WriterSource(registry.variables, header.nodes).lines)
 
 
-def _reader(name: str, body: list[str]) -> str:
-    head = f"\n\ndef read_{name}(n: int, p: int) -> tuple[Tree, int]:\n"
-    return head + "\n".join(body) + "\n"
+def _reader(stem: str, body: list[str]) -> tuple[str, str]:
+    head = f"\n\ndef read_{stem}(n: int, p: int) -> tuple[Tree, int]:\n"
+    return f"read_{stem}", head + "\n".join(body) + "\n"
 
 
-def _writer(name: str, body: list[str]) -> str:
-    head = f"\n\ndef write_{name}(t: Tree) -> tuple[int, int]:\n"
-    return head + "\n".join(body) + "\n"
+def _writer(stem: str, body: list[str]) -> tuple[str, str]:
+    head = f"\n\ndef write_{stem}(t: Tree) -> tuple[int, int]:\n"
+    return f"write_{stem}", head + "\n".join(body) + "\n"
 
 
 def _word(direction: str) -> str:
@@ -84,28 +158,6 @@ def _word(direction: str) -> str:
 
 def _measured(packet: Packet) -> bool:
     return any(isinstance(each, Field) and each.name == "L_PACKET" for each in packet.nodes)
-
-
-def _table(registry: Registry) -> str:
-    lines = ["", "", "CODEC = Codec("]
-    lines += [f'    version="{registry.version}",', f'    issue="{registry.issue}",']
-    packets = [(each.direction, each.number) for each in registry.packets.values()]
-    messages = [(each.direction, each.number) for each in registry.messages.values()]
-    for verb in ("read", "write"):
-        for kind, keys in (("packet", packets), ("message", messages)):
-            lines.append(f"    {verb}_{kind}={{")
-            for direction in (TO_TRAIN, TO_TRACK):
-                lines.append(f'        "{direction}": {{')
-                for number in sorted(number for way, number in keys if way == direction):
-                    stem = f"{_word(direction)}_" if kind == "packet" else "message_"
-                    lines.append(f"            {number}: {verb}_{stem}{number},")
-                lines.append("        },")
-            lines.append("    },")
-        media = ", ".join(f'"{medium}": {verb}_{medium}' for medium in registry.headers)
-        lines.append(f"    {verb}_header={{{media}}},")
-    lines += [f"    unmeasured={_unmeasured(registry)},"]
-    lines += [f"    versions={_versions(registry)},", ")", ""]
-    return "\n".join(lines)
 
 
 def _unmeasured(registry: Registry) -> str:
@@ -118,18 +170,19 @@ def _unmeasured(registry: Registry) -> str:
     return str(widths).replace("'", '"')
 
 
-def _versions(registry: Registry) -> str:
-    codes = registry.variables["M_VERSION"].codes
-    named = {each.first: each.label for each in codes if each.kind == "value"}
-    return str(named).replace("'", '"')
+def _forms(registry: Registry) -> str:
+    forms: dict[str, dict[int, str]] = {TO_TRAIN: {}, TO_TRACK: {}}
+    for (direction, number), form in registry.forms.items():
+        forms[direction][number] = form.version
+    return str(forms).replace("'", '"')
 
 
 def main(arguments: list[str]) -> int:
     """Write or check every generated module; return the exit code."""
     stale = 0
-    for version, module in MODULES.items():
-        path = FOLDER / f"{module}.py"
-        source = module_source(registry(version))
+    for module in modules():
+        path = FOLDER / f"{module.name}.py"
+        source = module.source()
         if path.exists() and path.read_text(encoding="utf-8") == source:
             continue
         if "--check" in arguments:

@@ -2,17 +2,20 @@
 
 from __future__ import annotations
 
-from dataclasses import dataclass
+from dataclasses import dataclass, replace
 from functools import cache
 from importlib import import_module
-from types import MappingProxyType
 from typing import TYPE_CHECKING, Any
 
 from fishplate.errors import EncodeError
+from fishplate.standard import registry
+from fishplate.standard.editions import Edition, edition
 from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN
 
 if TYPE_CHECKING:
     from collections.abc import Callable, Mapping
+
+    from fishplate.standard import Registry
 
     Reader = Callable[[int, int], tuple[dict[str, Any], int]]
     Writer = Callable[[dict[str, Any]], tuple[int, int]]
@@ -35,12 +38,12 @@ MISFITS = (EncodeError, KeyError, TypeError, ValueError, IndexError, AttributeEr
 class Codec:
     """The generated readers and writers of one issue, by direction and number, or medium.
 
-    `unmeasured` gives the width of the packets that carry no L_PACKET, `versions` the system
-    versions that the issue defines, by code of M_VERSION.
+    `unmeasured` gives the width of the packets that carry no L_PACKET, `forms` the other
+    version that may lay out a packet. `evidence` is that of the registry: kind, note and subject.
+    `version` and `issue` say as which edition the layouts are used.
     """
 
-    version: str
-    issue: str
+    layouts: str
     read_packet: Mapping[str, Mapping[int, Reader]]
     write_packet: Mapping[str, Mapping[int, Writer]]
     read_message: Mapping[str, Mapping[int, Reader]]
@@ -48,7 +51,15 @@ class Codec:
     read_header: Mapping[str, Reader]
     write_header: Mapping[str, Writer]
     unmeasured: Mapping[str, Mapping[int, int]]
-    versions: Mapping[int, str]
+    forms: Mapping[str, Mapping[int, str]]
+    evidence: tuple[tuple[str, str, tuple[str | int, ...]], ...]
+    version: str = ""
+    issue: str = ""
+
+    @property
+    def registry(self) -> Registry:
+        """The registry behind the readers and writers."""
+        return registry(self.version, self.issue)
 
     def direction_of(self, number: object) -> str:
         """Return the direction of a radio message, of an unknown one by its number."""
@@ -58,13 +69,21 @@ class Codec:
         return TO_TRACK if isinstance(number, int) and number >= FIRST_TO_TRACK else TO_TRAIN
 
 
-MODULES: Mapping[str, str] = MappingProxyType({"2.1": "v3_6_0"})
-"""The generated module of each system version."""
+@cache
+def codec(version: str, issue: str | None = None) -> Codec:
+    """Return the generated readers and writers of a system version.
+
+    They are those of the issue where it prints that version, else those the version is used with
+    anyway. Raises `KeyError` for a version without layouts.
+    """
+    found = edition(version, issue)
+    if found is None:
+        raise KeyError(version)
+    return _of_edition(found)
 
 
 @cache
-def codec(version: str) -> Codec:
-    """Import the generated module of a system version and return its table."""
-    name = f"fishplate.engine.generated.{MODULES[version]}"
-    found: Codec = import_module(name).CODEC
-    return found
+def _of_edition(found: Edition) -> Codec:
+    module = import_module(f"fishplate.engine.generated.{found.layouts}")
+    generated: Codec = module.CODEC
+    return replace(generated, version=found.version, issue=found.issue)

@@ -5,7 +5,7 @@ from __future__ import annotations
 from functools import cache
 from typing import TYPE_CHECKING
 
-from fishplate.bits import read_bits, read_blob
+from fishplate.bits import read_bits
 from fishplate.engine.runtime import Codec, codec
 from fishplate.errors import (
     Ambiguous,
@@ -15,23 +15,28 @@ from fishplate.errors import (
     Unknown,
 )
 from fishplate.frames import quick
+from fishplate.frames.fitting import infer_version
 from fishplate.frames.message import Message
 from fishplate.frames.reader import FrameReader
 from fishplate.frames.sizes import (
     END_FLAG,
+    HEADER_BITS,
     HEADS,
     LONGEST_PACKET,
     LONGEST_PADDING,
     MESSAGE_START,
     SHORTEST_PACKET,
 )
+from fishplate.standard.editions import EDITIONS, first_version
 from fishplate.standard.vocabulary import DIRECTIONS, MEDIA, TO_TRACK, TO_TRAIN
 from fishplate.versions import (
     DEFAULT_VERSION,
     NAME,
     closest_layouts,
+    declared_as,
     defined_codes,
     is_declared_invalid,
+    version_code,
     version_text,
 )
 
@@ -39,7 +44,10 @@ if TYPE_CHECKING:
     from fishplate.bits import Data
     from fishplate.errors import Path
 
-NOTHING_SAID = (None, None, None)
+Said = tuple[str | None, str | None]
+"""The system version and the issue that the caller asks for."""
+
+NOTHING_SAID = (None, None, None, None)
 
 
 def decode(
@@ -48,6 +56,7 @@ def decode(
     medium: str | None = None,
     direction: str | None = None,
     version: str | None = None,
+    issue: str | None = None,
     bits: int | None = None,
     strict: bool = True,
 ) -> Message:
@@ -55,48 +64,66 @@ def decode(
 
     `data` is bytes, hex text or `bitstring.Bits`; `bits` its true length where the last byte is
     padded. `medium` ("balise", "loop", "radio"), `direction` ("to-train", "to-track") and
-    `version` ("2.1") are found from the bits where they are not given. Strict decoding raises
-    the first `DecodeError`; otherwise the message holds all that is readable, plus `problems`.
+    `version` ("2.1") are found from the bits where they are not given. `issue` ("2.3.0") asks for
+    the layouts as that issue prints them, for the versions it prints. Strict decoding raises the
+    first `DecodeError`; otherwise the message holds all that is readable, plus `problems`.
     """
-    if (medium, direction, version) != NOTHING_SAID:
-        _check_said(medium, direction, version)
+    if (medium, direction, version, issue) != NOTHING_SAID:
+        _check_said(medium, direction, version, issue)
     if type(data) is bytes and bits is None:
         n, size = int.from_bytes(data), len(data) * 8
     else:
         n, size = read_bits(data, bits)
+    said = (version, issue)
     if version is None and (medium is None or medium == "radio"):
-        message = quick.read_radio(n, size, direction)
+        message = None
+        if issue in (None, quick.USUAL.issue):
+            message = quick.read_radio(n, size, direction)
+        message = message or infer_version(n, size, direction, issue)
         if message is not None:
             return message
+    found = medium or _radio_or_telegram(n, size, direction, said)
+    if found is None:
+        return _ambiguous(n, size, strict=strict)
+    if found == "radio":
+        return _radio(n, size, direction, said, strict=strict)
     if medium is None:
-        medium = _radio_or_telegram(n, size)
-        if medium is None:
-            return _ambiguous(n, size, strict=strict)
-        if medium != "radio":
-            return _if_it_ends(n, size, medium, version, strict=strict)
-    if medium == "radio":
-        return _radio(n, size, direction, version, strict=strict)
-    return _telegram(n, size, medium, version, strict=strict)
+        return _if_it_ends(n, size, found, said, strict=strict)
+    return _telegram(n, size, found, said, strict=strict)
 
 
-def _check_said(medium: object, direction: object, version: object) -> None:
-    """Raise `ValueError` for a medium, direction or version that is none."""
+def _check_said(medium: object, direction: object, version: object, issue: object) -> None:
+    """Raise `ValueError` for a medium, direction, version or issue that is none."""
     if medium is not None and medium not in MEDIA:
         raise ValueError(f"medium is one of {', '.join(MEDIA)}, not {medium!r}")
     if direction is not None and direction not in DIRECTIONS:
         raise ValueError(f"direction is {TO_TRAIN} or {TO_TRACK}, not {direction!r}")
     if version is not None and not (isinstance(version, str) and NAME.fullmatch(version)):
         raise ValueError(f"version is written as '2.1', not {version!r}")
+    issues = list(dict.fromkeys(each.issue for each in EDITIONS))
+    if issue is not None and issue not in issues:
+        raise ValueError(f"issue is one of {', '.join(issues)}, not {issue!r}")
 
 
-def _radio_or_telegram(n: int, size: int) -> str | None:
-    """Tell the medium from the first bits and the length; None when they do not say."""
+def _radio_or_telegram(n: int, size: int, direction: str | None, said: Said) -> str | None:
+    """Tell the medium from the first bits and the length; None when they do not say.
+
+    A defined M_VERSION behind a first bit 1 is no message number. Any other one may be: there,
+    packets that reach the end flag speak for a telegram, L_MESSAGE for a radio message; where
+    both do, a radio message without a problem is one.
+    """
     if size < MESSAGE_START:
         return None
     start = n >> size - MESSAGE_START
+    medium = "loop" if start >> 9 & 1 else "balise"
     if start >> 10 in _telegram_starts():
-        return "loop" if start >> 9 & 1 else "balise"
-    return "radio" if (start & 1023) << 3 == size else None
+        return medium
+    as_long_as_said = (start & 1023) << 3 == size
+    if start >> MESSAGE_START - 1 and _hops_to_the_end(n, size - HEADER_BITS[medium]):
+        if not as_long_as_said:
+            return medium
+        return None if _radio(n, size, direction, said, strict=False).problems else "radio"
+    return "radio" if as_long_as_said else None
 
 
 @cache
@@ -105,27 +132,32 @@ def _telegram_starts() -> frozenset[int]:
     return frozenset(128 | code for code in defined_codes())
 
 
-def _if_it_ends(n: int, size: int, medium: str, version: str | None, *, strict: bool) -> Message:
+def _if_it_ends(n: int, size: int, medium: str, said: Said, *, strict: bool) -> Message:
     """Read a telegram on trial: only its end flag proves that it is one."""
-    trial = _telegram(n, size, medium, version, strict=False)
-    if trial.filler is None and not _hops_to_the_end(trial):
+    trial = _telegram(n, size, medium, said, strict=False)
+    if trial.filler is None and not _cannot_be_read_but_ends(trial, n):
         return _ambiguous(n, size, strict=strict)
     if strict and trial.problems:
         raise trial.problems[0].error
     return trial
 
 
-def _hops_to_the_end(telegram: Message) -> bool:
-    """Tell whether packets of a version without layouts reach the end flag, by L_PACKET alone."""
-    if not telegram.problems or telegram.problems[0].kind != "unknown-version":
-        return False
-    n, left = read_blob(telegram.content, ("content",))
+def _cannot_be_read_but_ends(telegram: Message, n: int) -> bool:
+    kinds = [each.kind for each in telegram.problems]
+    left = telegram.size - HEADER_BITS[telegram.medium or "balise"]
+    return kinds[:1] == ["unknown-version"] and _hops_to_the_end(n, left)
+
+
+def _hops_to_the_end(n: int, left: int) -> bool:
+    """Tell whether packets reach the end flag, by L_PACKET alone; `n` holds `left` bits of them."""
     head = HEADS[TO_TRAIN]
+    # A packet without L_PACKET is laid out the same in every version (SUBSET-026 8.4.2.4).
+    unmeasured = codec(DEFAULT_VERSION).unmeasured[TO_TRAIN]
     while left >= head:
         word = n >> left - head & (1 << head) - 1
         if word >> head - 8 == END_FLAG:
             return True
-        left -= max(head, word & LONGEST_PACKET)
+        left -= unmeasured.get(word >> head - 8) or max(head, word & LONGEST_PACKET)
     return left >= SHORTEST_PACKET and n >> left - 8 & 255 == END_FLAG
 
 
@@ -143,9 +175,10 @@ def _ambiguous(n: int, size: int, *, strict: bool) -> Message:
     return message
 
 
-def _telegram(n: int, size: int, medium: str, version: str | None, *, strict: bool) -> Message:
+def _telegram(n: int, size: int, medium: str, said: Said, *, strict: bool) -> Message:
+    version, issue = said
     message = Message(medium, TO_TRAIN, size)
-    layouts = _layouts(message, version or DEFAULT_VERSION)
+    layouts = _layouts(message, version or DEFAULT_VERSION, issue)
     reader = FrameReader(message, layouts or codec(DEFAULT_VERSION), n, strict=strict)
     try:
         message.header, reader.left = reader.codec.read_header[medium](n, size)
@@ -155,7 +188,7 @@ def _telegram(n: int, size: int, medium: str, version: str | None, *, strict: bo
         message.content = reader.rest()
         return message
     if version is None:
-        layouts = _layouts(message, version_text(message.header["M_VERSION"]))
+        layouts = _layouts(message, version_text(message.header["M_VERSION"]), issue)
         _say_if_newer(reader, ("header", "M_VERSION"), bit=1)
     message.version_from = "caller" if version else "frame"
     if layouts is None:
@@ -173,12 +206,11 @@ def _telegram(n: int, size: int, medium: str, version: str | None, *, strict: bo
     return message
 
 
-def _radio(
-    n: int, size: int, direction: str | None, version: str | None, *, strict: bool
-) -> Message:
+def _radio(n: int, size: int, direction: str | None, said: Said, *, strict: bool) -> Message:
+    version, issue = said
     number = n >> size - 8 if size >= SHORTEST_PACKET else 0
     message = Message("radio", direction, size)
-    layouts = _layouts(message, version or DEFAULT_VERSION)
+    layouts = _layouts(message, version or first_version(issue), issue)
     reader = FrameReader(message, layouts or codec(DEFAULT_VERSION), n, strict=strict)
     message.version_from = "caller" if version else "assumed"
     _say_if_newer(reader, ("header",), bit=0)
@@ -283,13 +315,15 @@ def _keep_from_start(reader: FrameReader, number: int) -> None:
     reader.message.content = reader.rest()
 
 
-def _layouts(message: Message, version: str) -> Codec | None:
+def _layouts(message: Message, version: str, issue: str | None) -> Codec | None:
     """Note version and issue in the message; return the layouts that read it, if any."""
     message.version = version
     closest = closest_layouts(version)
     if closest is None:
+        message.issue = ""
+        message.layouts = None
         return None
-    layouts = codec(closest)
+    message.layouts = layouts = codec(closest, issue)
     message.issue = layouts.issue
     return layouts
 
@@ -297,7 +331,7 @@ def _layouts(message: Message, version: str) -> Codec | None:
 def _say_if_newer(reader: FrameReader, path: Path, bit: int) -> None:
     version = reader.message.version
     closest = closest_layouts(version)
-    if closest is None or version in codec(closest).versions.values():
+    if closest in (None, version):
         return
     reader.trouble(
         Unknown(
@@ -311,10 +345,13 @@ def _say_if_newer(reader: FrameReader, path: Path, bit: int) -> None:
 
 
 def _unknown_version(message: Message, bit: int) -> Unknown:
-    code = message.header.get("M_VERSION")
+    code = version_code(message.version)
+    declared = declared_as(code)
     reason = f"there are no layouts for system version {message.version}"
-    if code is not None and is_declared_invalid(code):
+    if is_declared_invalid(code):
         reason = f"M_VERSION {code}, {message.version}, is declared not valid"
+    elif declared:
+        reason += f": {declared.label}"
     return Unknown(
         reason,
         kind="unknown-version",

@@ -14,6 +14,7 @@ from fishplate.engine.runtime import MISFITS, Codec, codec
 from fishplate.engine.spell import Spelling, code_of
 from fishplate.errors import EncodeError, Path
 from fishplate.frames import quick
+from fishplate.frames.forms import BESIDE, check_issue, layouts_of_packet
 from fishplate.frames.message import Message, Tree
 from fishplate.frames.sizes import (
     END_FLAG,
@@ -24,20 +25,17 @@ from fishplate.frames.sizes import (
     MESSAGE_START,
     TELEGRAM_SIZES,
 )
-from fishplate.standard import known_versions, registry
+from fishplate.standard import known_versions
 from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN
-from fishplate.versions import DEFAULT_VERSION, closest_layouts, version_text
+from fishplate.versions import DEFAULT_VERSION, closest_layouts, told_version
 
 if TYPE_CHECKING:
     from collections.abc import Sequence
 
     from fishplate.standard.vocabulary import Node
 
-KEYS = quick.KEYS | {"filler", "surplus", "content", "problems"}
+KEYS = quick.KEYS | {"filler", "surplus", "content", "problems", "evidence"}
 """What a tree may hold at its top."""
-
-BESIDE = frozenset({"content", "surplus"})
-"""Keys of a packet that are not its layout's."""
 
 
 def encode_bits(
@@ -61,7 +59,7 @@ def encode_bits(
         medium = _medium_of(tree.get("header"))
     writer = _Writer(tree, _codec_of(tree), force=force)
     if medium is None:
-        if set(tree) - {"problems", "content"}:
+        if set(tree) - {"problems", "content", "evidence"}:
             raise EncodeError("expected balise, loop or radio", path=("medium",), expected="medium")
         return read_blob(tree.get("content"), ("content",))
     if medium == "radio":
@@ -85,24 +83,20 @@ def _medium_of(header: object) -> str | None:
 
 
 def _codec_of(tree: Tree) -> Codec:
-    version = tree.get("version", DEFAULT_VERSION)
+    version = told_version(tree)
     closest = closest_layouts(version) if isinstance(version, str) else None
     # A frame that no layout explains may be of any version: all but its start is content.
     if closest is None and not ("content" in tree and isinstance(version, str)):
+        said = "version" in tree
         raise EncodeError(
-            f"there are no layouts for system version {version!r}",
-            path=("version",),
+            f"there are no layouts for system version {version}",
+            path=("version",) if said else ("header", "M_VERSION"),
             expected=", ".join(known_versions()),
             got=version,
         )
-    layouts = codec(closest or DEFAULT_VERSION)
-    if tree.get("issue", layouts.issue) != layouts.issue:
-        raise EncodeError(
-            f"version {version} is laid out as in issue {layouts.issue}",
-            path=("issue",),
-            expected=layouts.issue,
-            got=tree["issue"],
-        )
+    issue = tree.get("issue")
+    layouts = codec(closest or DEFAULT_VERSION, issue if isinstance(issue, str) else None)
+    check_issue(issue, layouts)
     return layouts
 
 
@@ -156,7 +150,7 @@ class _Writer:
             try:
                 self.value, self.size = writer(header)
             except MISFITS:
-                nodes = registry(self.codec.version).messages[direction, number].nodes
+                nodes = self.codec.registry.messages[direction, number].nodes
                 raise self._misfit(nodes, header, ("header",)) from None
         self.packets(direction)
         given = header.get("L_MESSAGE") if isinstance(header, dict) else None
@@ -167,12 +161,12 @@ class _Writer:
         """Write the fixed part of a message that is not known, or was not all there."""
         number = header.get("NID_MESSAGE") if isinstance(header, dict) else None
         if isinstance(header, dict) and set(header) == {"NID_MESSAGE", "L_MESSAGE"}:
-            variables = registry(self.codec.version).variables
+            variables = self.codec.registry.variables
             for name in ("NID_MESSAGE", "L_MESSAGE"):
                 code = code_of(variables[name], header[name], ("header", name))
                 self._add(code, variables[name].bits)
             return
-        known = registry(self.codec.version).messages
+        known = self.codec.registry.messages
         if isinstance(number, int) and (direction, number) in known:
             nodes = known[direction, number].nodes
             self._spell(nodes, header, ("header",))
@@ -203,7 +197,7 @@ class _Writer:
             self._add(0, -self.size % 8)
         length = self.size // 8
         if given is not None and (broken or self.force or "surplus" in tree):
-            variable = registry(self.codec.version).variables["L_MESSAGE"]
+            variable = self.codec.registry.variables["L_MESSAGE"]
             length = code_of(variable, given, ("header", "L_MESSAGE"))
         elif given not in (None, length):
             raise _disagrees("L_MESSAGE", given, length, ("header", "L_MESSAGE"))
@@ -229,9 +223,8 @@ class _Writer:
         try:
             self.value, self.size = self.codec.write_header[medium](header)
         except MISFITS:
-            nodes = registry(self.codec.version).headers[medium].nodes
+            nodes = self.codec.registry.headers[medium].nodes
             raise self._misfit(nodes, header, ("header",)) from None
-        self._check_version(header["M_VERSION"])
         last = self.packets(TO_TRAIN)
         if "content" in tree:
             self._add(*read_blob(tree["content"], ("content",)))
@@ -248,17 +241,6 @@ class _Writer:
                 got=self.size,
             )
         return self.value, self.size
-
-    def _check_version(self, code: int) -> None:
-        """Refuse packets under a version whose layouts are not known."""
-        version = version_text(code)
-        if self.tree.get("packets") and closest_layouts(version) is None:
-            raise EncodeError(
-                f"there are no layouts for system version {version}",
-                path=("header", "M_VERSION"),
-                expected=", ".join(known_versions()),
-                got=code,
-            )
 
     def _fill(self, medium: str, length: int | None) -> None:
         if length is None and medium == "balise":
@@ -310,9 +292,9 @@ class _Writer:
         if "content" in packet:
             part, width = self._content_packet(packet, HEAD_NAMES[direction], path)
         else:
-            nodes = self._nodes_of(number, direction, path)
             layout = {key: value for key, value in packet.items() if key not in BESIDE}
-            pieces = self._pieces(nodes, layout, path)
+            layouts = layouts_of_packet(self.codec, packet, direction, path)
+            pieces = self._pieces_of(layouts, number, direction, layout, path)
             if "surplus" in packet:
                 pieces.append(read_blob(packet["surplus"], (*path, "surplus")))
             part, width = _joined(pieces)
@@ -321,7 +303,7 @@ class _Writer:
             if given not in (None, width) and not self.force:
                 raise _disagrees("L_PACKET", given, width, (*path, "L_PACKET"))
         length = width if given is None else given
-        variable = registry(self.codec.version).variables["L_PACKET"]
+        variable = self.codec.registry.variables["L_PACKET"]
         code = code_of(variable, length, (*path, "L_PACKET"))
         return part | code << width - head, width
 
@@ -331,7 +313,7 @@ class _Writer:
                 raise EncodeError(
                     "given beside content", path=(*path, key), expected="content alone"
                 )
-        variables = registry(self.codec.version).variables
+        variables = self.codec.registry.variables
         pieces = []
         for name in head[:-1]:
             if name not in packet:
@@ -342,8 +324,10 @@ class _Writer:
         pieces.append(read_blob(packet["content"], (*path, "content")))
         return _joined(pieces)
 
-    def _nodes_of(self, number: object, direction: str, path: Path) -> Sequence[Node]:
-        packets = registry(self.codec.version).packets
+    def _pieces_of(
+        self, layouts: Codec, number: object, direction: str, layout: Tree, path: Path
+    ) -> list[tuple[int, int]]:
+        packets = layouts.registry.packets
         known = packets.get((direction, number)) if isinstance(number, int) else None
         if known is None:
             raise EncodeError(
@@ -352,10 +336,12 @@ class _Writer:
                 expected="the number of a packet",
                 got=number,
             )
-        return known.nodes
+        spelling = Spelling(layouts.registry.variables)
+        spelling.scope(known.nodes, layout, path, {})
+        return spelling.pieces
 
     def _pieces(self, nodes: Sequence[Node], tree: object, path: Path) -> list[tuple[int, int]]:
-        spelling = Spelling(registry(self.codec.version).variables)
+        spelling = Spelling(self.codec.registry.variables)
         spelling.scope(nodes, tree, path, {})
         return spelling.pieces
 

@@ -4,9 +4,12 @@ from __future__ import annotations
 
 from typing import TYPE_CHECKING, Any, NamedTuple
 
+from fishplate.frames.evidence import evidence_of
+
 if TYPE_CHECKING:
     from collections.abc import Sequence
 
+    from fishplate.engine.runtime import Codec
     from fishplate.errors import DecodeError, Path
 
 Tree = dict[str, Any]
@@ -45,15 +48,19 @@ class Message:
     """One frame, decoded: a radio message, a balise telegram or a loop message.
 
     `header` and each of `packets` are plain dicts of raw codes under the standard's variable
-    names. `version_from` says where the system version came from: ``"frame"``, ``"caller"`` or
-    ``"assumed"``. `padding`, `filler`, `surplus` and `content` are bits that no layout explains,
-    as ``{"bits": n, "hex": "..."}``, or None. `size` is the length of the frame in bits.
+    names. `version_from` says where the system version came from: ``"frame"``, ``"caller"``,
+    ``"capture"`` (earlier frames), ``"inferred"`` (its layouts fit, the usual ones do not) or
+    ``"assumed"``; `fitting` names all versions that fit where it was inferred. `padding`,
+    `filler`, `surplus` and `content` are bits that no layout explains, as
+    ``{"bits": n, "hex": "..."}``, or None. `size` is the length of the frame in bits.
     """
 
     # Defaults stand in the class: most frames never touch them, and setting them costs time.
     version: str = ""
     version_from: str = "assumed"
     issue: str = ""
+    fitting: tuple[str, ...] = ()
+    layouts: Codec | None = None
     padding: Tree | None = None
     filler: Tree | None = None
     surplus: Tree | None = None
@@ -85,7 +92,19 @@ class Message:
                 tree[name] = value
         if self.problems:
             tree["problems"] = [each.tree() for each in self.problems]
+        evidence = self.evidence
+        if evidence:
+            tree["evidence"] = evidence
         return tree
+
+    @property
+    def evidence(self) -> list[Tree]:
+        """What in this message rests on less than the published layouts of a known version.
+
+        A list of ``{"path", "kind", "message"}``; kinds are ``"weaker"``, ``"inferred"`` and
+        ``"memory"``.
+        """
+        return evidence_of(self)
 
     @property
     def complete(self) -> bool:

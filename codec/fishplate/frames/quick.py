@@ -6,6 +6,7 @@ writers beside this module then start afresh. Tests hold the two to the same res
 
 from __future__ import annotations
 
+from functools import cache
 from typing import TYPE_CHECKING, NamedTuple
 
 from fishplate.bits import blob
@@ -18,12 +19,13 @@ from fishplate.frames.sizes import (
     LONGEST_PADDING,
     MESSAGE_START,
 )
-from fishplate.versions import DEFAULT_VERSION
+from fishplate.standard.editions import DEFAULT_VERSION, EDITIONS
 
 if TYPE_CHECKING:
     from collections.abc import Mapping
 
     from fishplate.engine.runtime import Reader, Writer
+    from fishplate.standard.editions import Edition
 
 KEYS = frozenset({"medium", "direction", "version", "issue", "header", "packets", "padding"})
 
@@ -32,7 +34,7 @@ OCTETS = {f"{octet:02X}": octet for octet in range(256)}
 """What the hex of a padding may be: less than a byte, left aligned."""
 
 
-class _Way(NamedTuple):
+class Way(NamedTuple):
     """All that reading or writing one kind of message needs."""
 
     direction: str
@@ -44,9 +46,10 @@ class _Way(NamedTuple):
     issue: str
 
 
-def _ways() -> dict[int, _Way]:
-    """Return what each message number needs, in the layouts of the usual version."""
-    layouts = codec(DEFAULT_VERSION)
+@cache
+def ways_of(edition: Edition) -> Mapping[int, Way]:
+    """Return what each message number needs, in the layouts of one edition."""
+    layouts = codec(edition.version, edition.issue)
     ways = {}
     for direction, messages in layouts.read_message.items():
         odd = layouts.unmeasured[direction]
@@ -55,21 +58,27 @@ def _ways() -> dict[int, _Way]:
         writers = {number: each for number, each in writers.items() if number not in odd}
         for number, read in messages.items():
             write = layouts.write_message[direction][number]
-            ways[number] = _Way(
+            ways[number] = Way(
                 direction, HEADS[direction], read, write, readers, writers, layouts.issue
             )
     return ways
 
 
-WAYS = _ways()
+USUAL = EDITIONS[0]
+WAYS = ways_of(USUAL)
 
 
-def read_radio(n: int, size: int, direction: str | None) -> Message | None:
-    """Read a radio message of `size` bits, or return None."""
+def read_radio(
+    n: int, size: int, direction: str | None, ways: Mapping[int, Way] = WAYS
+) -> Message | None:
+    """Read a radio message of `size` bits, or return None.
+
+    Its version is the usual one; the caller says so where the ways are those of another.
+    """
     if size < MESSAGE_START:
         return None
     start = n >> size - MESSAGE_START
-    way = WAYS.get(start >> 10)
+    way = ways.get(start >> 10)
     if way is None or (start & 1023) << 3 != size or direction not in (None, way[0]):
         return None
     direction, head, read, _, readers, _, issue = way

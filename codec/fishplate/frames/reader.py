@@ -9,6 +9,7 @@ from __future__ import annotations
 from typing import TYPE_CHECKING
 
 from fishplate.bits import blob
+from fishplate.engine.runtime import codec
 from fishplate.engine.walk import Cursor, Walk
 from fishplate.errors import (
     DecodeError,
@@ -27,7 +28,6 @@ from fishplate.frames.sizes import (
     LONGEST_PACKET,
     SHORTEST_PACKET,
 )
-from fishplate.standard import registry
 from fishplate.standard.vocabulary import TO_TRAIN, Field
 
 if TYPE_CHECKING:
@@ -107,9 +107,9 @@ class FrameReader:
                     try:
                         tree, extra = reader(part, length)
                     except ValueError:
-                        tree, extra = self._too_short(left, length), 0
-                    if extra:
-                        self._too_long(tree, part, extra, left)
+                        tree, extra = {}, 0
+                    if extra or not tree:
+                        tree = self._misfit(tree, part, extra, left)
                     packets.append(tree)
                     left -= length
                     continue
@@ -141,6 +141,18 @@ class FrameReader:
             self._length_trouble(f"L_PACKET is {length}, less than the {head} bits of its head")
             self.message.packets.append(self._kept(head))
             return True
+        form = self._other_form(number, self.n >> self.left - length & (1 << length) - 1, length)
+        if form:
+            self.message.packets.append(form)
+            self.left -= length
+            return True
+        if number in self.codec.forms[self.message.direction or TO_TRAIN]:
+            version = self.codec.forms[self.message.direction or TO_TRAIN][number]
+            self._length_trouble(
+                f"L_PACKET is {length}, which does not fit packet {number} as in {version}"
+            )
+            self.message.packets.append(self._kept(length))
+            return True
         self.trouble(
             Unknown(
                 f"packet {number} is not known {self.message.direction}; "
@@ -152,6 +164,31 @@ class FrameReader:
         )
         self.message.packets.append(self._kept(length))
         return True
+
+    def _misfit(self, tree: Tree, part: int, extra: int, left: int) -> Tree:
+        """Read a packet that does not fit its layout: in another form of it, or as it stands."""
+        head = HEADS[self.message.direction or TO_TRAIN]
+        length = self.n >> left - head & LONGEST_PACKET
+        number = self.n >> left - 8 & 255
+        form = self._other_form(number, part, length)
+        if form:
+            return form
+        if not tree:
+            return self._too_short(left, length)
+        self._too_long(tree, part, extra, left)
+        return tree
+
+    def _other_form(self, number: int, part: int, length: int) -> Tree | None:
+        """Read a packet as another version lays it out, where it may come so and fits."""
+        direction = self.message.direction or TO_TRAIN
+        version = self.codec.forms[direction].get(number)
+        if version is None:
+            return None
+        try:
+            tree, extra = codec(version).read_packet[direction][number](part, length)
+        except ValueError:
+            return None
+        return None if extra else {**tree, "form": version}
 
     def _only_padding_left(self) -> bool:
         """Tell whether the message ends in zeros; no radio message holds an empty packet 0."""
@@ -234,7 +271,7 @@ class FrameReader:
     @property
     def registry(self) -> Registry:
         """The registry behind the generated readers."""
-        return registry(self.codec.version)
+        return self.codec.registry
 
     def _key(self, number: int) -> tuple[str, int]:
         return self.message.direction or TO_TRAIN, number

@@ -13,17 +13,18 @@ from fishplate.errors import DecodeError, Path, Truncated
 from fishplate.frames.decoding import decode
 from fishplate.frames.sizes import HEAD_NODES, HEADS
 from fishplate.meaning import Meaning, explain
-from fishplate.standard import Registry, registry
+from fishplate.standard import registry
+from fishplate.standard.editions import DEFAULT_VERSION
 from fishplate.standard.vocabulary import TO_TRAIN, Field, Opaque
-from fishplate.versions import DEFAULT_VERSION, closest_layouts
 
 if TYPE_CHECKING:
     from collections.abc import Iterator, Sequence
     from decimal import Decimal
 
     from fishplate.bits import Data
+    from fishplate.engine.runtime import Codec
     from fishplate.frames.message import Message
-    from fishplate.standard.vocabulary import Node
+    from fishplate.standard.vocabulary import Node, Packet
 
 
 NOT_EXPLAINED = "not explained"
@@ -56,6 +57,7 @@ def walk(
     medium: str | None = None,
     direction: str | None = None,
     version: str | None = None,
+    issue: str | None = None,
     bits: int | None = None,
     strict: bool = True,
 ) -> Iterator[FieldRow]:
@@ -66,7 +68,13 @@ def walk(
     explains.
     """
     message = decode(
-        data, medium=medium, direction=direction, version=version, bits=bits, strict=False
+        data,
+        medium=medium,
+        direction=direction,
+        version=version,
+        issue=issue,
+        bits=bits,
+        strict=False,
     )
     return walk_message(message, *read_bits(data, bits), strict=strict)
 
@@ -82,8 +90,8 @@ def walk_message(message: Message, value: int, size: int, *, strict: bool) -> It
 
 
 @lru_cache(maxsize=4096)
-def _meaning(version: str, name: str, raw: int | str, scale: int | None) -> Meaning:
-    return explain(registry(version).variables[name], raw, scale)
+def _meaning(version: str, issue: str, name: str, raw: int | str, scale: int | None) -> Meaning:
+    return explain(registry(version, issue).variables[name], raw, scale)
 
 
 class _Frame:
@@ -93,15 +101,23 @@ class _Frame:
         self.message = message
         self.value = value
         self.size = size
-        self.version = closest_layouts(message.version) or DEFAULT_VERSION
-        self.registry: Registry = registry(self.version)
-        self.unmeasured = codec(self.version).unmeasured[self._direction]
+        self.layouts = message.layouts or codec(DEFAULT_VERSION)
+        self.registry = self.layouts.registry
+        self.unmeasured = self.layouts.unmeasured[self._direction]
+        self.forms: dict[object, Codec] = {
+            index: codec(packet["form"])
+            for index, packet in enumerate(message.packets)
+            if "form" in packet
+        }
 
     def field_row(self, row: Row) -> FieldRow:
         place = (row.path, row.variable, row.offset, row.width, row.raw)
         if row.variable is None:
             return FieldRow(*place, NOT_EXPLAINED)
-        meaning = _meaning(self.version, row.variable, row.raw, row.scale)
+        layouts = self.layouts
+        if self.forms and row.path[0] == "packets":
+            layouts = self.forms.get(row.path[1], layouts)
+        meaning = _meaning(layouts.version, layouts.issue, row.variable, row.raw, row.scale)
         return FieldRow(*place, meaning.text, row.scale, meaning.value, meaning.unit)
 
     def _cursor(self, start: int, size: int) -> Cursor:
@@ -165,10 +181,11 @@ class _Frame:
         if "content" in packet:
             self._kept_packet(cursor, index)
             return
-        nodes = self.registry.packets[self._direction, packet["NID_PACKET"]].nodes
+        book = self.forms[index].registry if index in self.forms else self.registry
+        nodes = book.packets[self._direction, packet["NID_PACKET"]].nodes
         width = packet.get("L_PACKET", cursor.left)
         inner = self._cursor(cursor.position, width)
-        self._walk(inner).scope(nodes, path, {})
+        Walk(book.variables, inner).scope(nodes, path, {})
         if "surplus" in packet:
             self._walk(inner).unexplained(inner.left, (*path, "surplus"))
         cursor.rows += inner.rows
@@ -178,7 +195,7 @@ class _Frame:
         """Add a packet kept as content: the fields before the trouble, then the rest as it is."""
         packet = self.message.packets[index]
         path = ("packets", index)
-        known = self.registry.packets.get((self._direction, packet["NID_PACKET"]))
+        known = self._only_layout(packet["NID_PACKET"])
         width = HEADS[self._direction] + packet["content"]["bits"]
         inner = self._cursor(cursor.position, width)
         self._until_it_ends(
@@ -187,6 +204,11 @@ class _Frame:
         self._walk(inner).unexplained(inner.left, (*path, "content"))
         cursor.rows += inner.rows
         cursor.position += inner.position
+
+    def _only_layout(self, number: int) -> Packet | None:
+        """Return the layout of a packet that is cut: None where it may have come in two forms."""
+        key = (self._direction, number)
+        return None if key in self.registry.forms else self.registry.packets.get(key)
 
     def _broken_packet(self, cursor: Cursor, index: int) -> None:
         """Add the rows of a packet up to where its bits run out, or its head where it is whole."""
@@ -198,7 +220,7 @@ class _Frame:
         if index == len(packets) and number in self.unmeasured:
             nodes = self.registry.packets[self._direction, number].nodes
         if index < len(packets):
-            known = self.registry.packets.get((self._direction, packets[index]["NID_PACKET"]))
+            known = self._only_layout(packets[index]["NID_PACKET"])
             if known and "surplus" in packets[index]:
                 self._packet(cursor, index)
                 cursor.rows.pop()

@@ -23,6 +23,9 @@ HEAD_NAMES = {TO_TRAIN: ("NID_PACKET", "Q_DIR", "L_PACKET"), TO_TRACK: ("NID_PAC
 HEAD_NODES = {way: tuple(Field(each) for each in names) for way, names in HEAD_NAMES.items()}
 """That head as a layout."""
 
+HEADER_BITS = {"balise": 50, "loop": 33}
+"""The header of a balise telegram and of a loop message (SUBSET-026 8.4.2.1, 8.4.3.1)."""
+
 MESSAGE_START = 18
 """NID_MESSAGE and L_MESSAGE, with which every radio message of every version begins."""
 

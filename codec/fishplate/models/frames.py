@@ -2,6 +2,7 @@
 
 from __future__ import annotations
 
+from contextlib import suppress
 from functools import cache, partial
 from typing import TYPE_CHECKING, Annotated, Any, Literal
 
@@ -10,6 +11,7 @@ from pydantic import BeforeValidator, ValidationError, create_model
 from fishplate.engine.runtime import codec
 from fishplate.errors import EncodeError, Path
 from fishplate.frames.encoding import KEYS
+from fishplate.frames.forms import check_issue
 from fishplate.frames.sizes import HEAD_NODES
 from fishplate.models.schema import (
     content_packet_schema,
@@ -20,54 +22,71 @@ from fishplate.models.schema import (
 from fishplate.models.scopes import Bits, Scope, custom_error, scope_model
 from fishplate.standard import registry
 from fishplate.standard.vocabulary import DIRECTIONS, TO_TRACK, TO_TRAIN, Node
-from fishplate.versions import DEFAULT_VERSION, closest_layouts
+from fishplate.versions import DEFAULT_VERSION, closest_layouts, told_version
 
 if TYPE_CHECKING:
-    from collections.abc import Callable
+    from collections.abc import Callable, Sequence
 
     from fishplate.standard import Registry
 
 
 @cache
 def packet_model(
-    number: int, direction: str = TO_TRAIN, version: str = DEFAULT_VERSION
+    number: int,
+    direction: str = TO_TRAIN,
+    version: str = DEFAULT_VERSION,
+    issue: str | None = None,
+    *,
+    form: bool = False,
 ) -> type[Scope]:
-    """Return the model of one packet; `KeyError` when the registry holds none."""
-    layouts = registry(version)
+    """Return the model of one packet; `KeyError` when the registry holds none.
+
+    As the `form` of a packet of another version, it may say so.
+    """
+    layouts = registry(version, issue)
+    other = layouts.forms.get((direction, number))
+    if other and other.only:
+        return packet_model(number, direction, other.version, form=True)
     packet = layouts.packets[direction, number]
     name = f"Packet{number}{'ToTrain' if direction == TO_TRAIN else 'ToTrack'}"
-    model = scope_model(layouts, packet.nodes, name, {"surplus": Bits})
+    extra: dict[str, Any] = {"surplus": Bits}
+    if form:
+        extra["form"] = Literal[version]
+    model = scope_model(layouts, packet.nodes, name, extra)
     model.declared = partial(packet_schema, layouts, direction, number)
     return model
 
 
 @cache
 def message_model(
-    number: int, direction: str | None = None, version: str = DEFAULT_VERSION
+    number: int,
+    direction: str | None = None,
+    version: str = DEFAULT_VERSION,
+    issue: str | None = None,
 ) -> type[Scope]:
     """Return the model of one radio message; `KeyError` when the registry holds none."""
-    layouts = registry(version)
+    layouts = registry(version, issue)
     if direction is None:
-        direction = codec(version).direction_of(number)
+        direction = codec(version, issue).direction_of(number)
     nodes = layouts.messages[direction, number].nodes
     schema = partial(message_schema, layouts, direction, number)
     return _frame_model(layouts, f"Message{number}", "radio", direction, nodes, schema)
 
 
 @cache
-def telegram_model(version: str = DEFAULT_VERSION) -> type[Scope]:
+def telegram_model(version: str = DEFAULT_VERSION, issue: str | None = None) -> type[Scope]:
     """Return the model of a balise telegram."""
-    return _telegram_model("balise", version)
+    return _telegram_model("balise", version, issue)
 
 
 @cache
-def loop_model(version: str = DEFAULT_VERSION) -> type[Scope]:
+def loop_model(version: str = DEFAULT_VERSION, issue: str | None = None) -> type[Scope]:
     """Return the model of a loop message."""
-    return _telegram_model("loop", version)
+    return _telegram_model("loop", version, issue)
 
 
-def _telegram_model(medium: str, version: str) -> type[Scope]:
-    layouts = registry(version)
+def _telegram_model(medium: str, version: str, issue: str | None) -> type[Scope]:
+    layouts = registry(version, issue)
     nodes = layouts.headers[medium].nodes
     schema = partial(telegram_schema, layouts, medium)
     return _frame_model(layouts, medium.capitalize(), medium, TO_TRAIN, nodes, schema)
@@ -82,7 +101,7 @@ def _frame_model(
     schema: Callable[[], dict[str, Any]],
 ) -> type[Scope]:
     header = scope_model(layouts, nodes, f"{name}Header")
-    packet = Annotated[Any, BeforeValidator(_packet_validator(direction, layouts.version))]
+    packet = Annotated[Any, BeforeValidator(_packet_validator(direction, layouts))]
     rests = ("padding", "surplus", "content") if medium == "radio" else ("filler", "content")
     fields: dict[str, Any] = {
         "medium": (Literal[medium], medium),
@@ -93,14 +112,15 @@ def _frame_model(
         "packets": (list[packet], []),
         **dict.fromkeys(rests, (Bits, None)),
         "problems": (list[Any], None),
+        "evidence": (list[Any], None),
     }
     model = create_model(name, __base__=Scope, **fields)
     model.declared = schema
     return model
 
 
-def _packet_validator(direction: str, version: str) -> Callable[[Any], dict[str, Any]]:
-    known = registry(version).packets
+def _packet_validator(direction: str, layouts: Registry) -> Callable[[Any], dict[str, Any]]:
+    known = layouts.packets
 
     def validate(value: Any) -> dict[str, Any]:
         if isinstance(value, Scope):
@@ -113,9 +133,26 @@ def _packet_validator(direction: str, version: str) -> Callable[[Any], dict[str,
         if not isinstance(number, int) or (direction, number) not in known:
             reason = f"packet {number!r} is not known {direction}; give its bits as content"
             raise custom_error(reason)
-        return packet_model(number, direction, version).model_validate(value).tree()
+        models = _models_of(layouts, direction, number, value.get("form"))
+        for model in models[:-1]:
+            # Told by its variables: errors are those of the version's own layout.
+            with suppress(ValidationError):
+                return model.model_validate(value).tree()
+        return models[-1].model_validate(value).tree()
 
     return validate
+
+
+def _models_of(
+    layouts: Registry, direction: str, number: int, said: object
+) -> Sequence[type[Scope]]:
+    """Return the models a packet may follow, the version's own layout last."""
+    form = layouts.forms.get((direction, number))
+    own = packet_model(number, direction, layouts.version, layouts.issue, form=bool(form))
+    if form is None or said == layouts.version:
+        return [own]
+    other = packet_model(number, direction, form.version, form=True)
+    return [other] if form.only or said == form.version else [other, own]
 
 
 @cache
@@ -140,12 +177,15 @@ def codes_of(tree: object) -> dict[str, Any]:
         validated = model.model_validate(tree)
     except ValidationError as error:
         raise _encode_error(error) from None
-    return validated.model_dump(exclude_none=True, exclude={"problems"})
+    unsaid = {"version", "issue"} - tree.keys()
+    return validated.model_dump(exclude_none=True, exclude={"problems", "evidence"} | unsaid)
 
 
 def _model_for(tree: dict[str, Any]) -> type[Scope]:
-    given = tree.get("version", DEFAULT_VERSION)
+    given = told_version(tree)
     version = (closest_layouts(given) if isinstance(given, str) else None) or DEFAULT_VERSION
+    issue = tree["issue"] if isinstance(tree.get("issue"), str) else None
+    check_issue(tree.get("issue"), codec(version, issue))
     header = tree.get("header")
     if not isinstance(header, dict):
         found = [f"; {each} is not part of a tree" for each in tree if each not in KEYS]
@@ -153,9 +193,9 @@ def _model_for(tree: dict[str, Any]) -> type[Scope]:
         raise EncodeError(reason, path=("header",), got=header)
     medium = tree.get("medium")
     if medium == "loop" or (medium is None and "NID_LOOP" in header):
-        return loop_model(version)
+        return loop_model(version, issue)
     if medium == "balise" or (medium is None and "NID_BG" in header and "Q_UPDOWN" in header):
-        return telegram_model(version)
+        return telegram_model(version, issue)
     if medium not in (None, "radio"):
         reason = f"expected balise, loop or radio, got {medium!r}"
         raise EncodeError(reason, path=("medium",), expected="balise, loop or radio", got=medium)
@@ -165,23 +205,23 @@ def _model_for(tree: dict[str, Any]) -> type[Scope]:
         reason = f"expected {TO_TRAIN} or {TO_TRACK}, got {direction!r}"
         raise EncodeError(reason, path=("direction",), got=direction)
     try:
-        return message_model(number, direction, version)
+        return message_model(number, direction, version, issue)
     except (KeyError, TypeError):
         raise EncodeError(
             f"message {number!r} is not known"
             + (f" {direction}" if direction else "")
-            + _other_way(number, direction),
+            + _other_way(number, direction, version),
             path=("header", "NID_MESSAGE"),
             expected="the number of a radio message",
             got=number,
         ) from None
 
 
-def _other_way(number: object, direction: object) -> str:
+def _other_way(number: object, direction: object, version: str) -> str:
     if not direction or not isinstance(number, int):
         return ""
-    other = codec(DEFAULT_VERSION).direction_of(number)
-    known = (other, number) in registry(DEFAULT_VERSION).messages
+    other = codec(version).direction_of(number)
+    known = (other, number) in registry(version).messages
     return f"; it is sent {other}" if known and other != direction else ""
 
 

@@ -13,6 +13,7 @@ from typing import TYPE_CHECKING, Any
 from fishplate.engine.spell import COMPUTED, all_keys
 from fishplate.meaning import UNITS, accepted_labels, parse
 from fishplate.standard import registry as registry_of
+from fishplate.standard.editions import DEFAULT_VERSION
 from fishplate.standard.vocabulary import (
     COUNT,
     TO_TRAIN,
@@ -238,12 +239,15 @@ def content_packet_schema(direction: str) -> Schema:
 
 def _frame(registry: Registry, medium: str, direction: str, header: Schema, title: str) -> Schema:
     """Return the schema of a frame: header, packets of one direction, unexplained bits."""
-    numbers = sorted(number for way, number in registry.packets if way == direction)
-    known = [{"$ref": f"#/$defs/packet_{number}"} for number in numbers]
-    packets = [*known, {"$ref": "#/$defs/content_packet"}]
+    only = {key for key, form in registry.forms.items() if form.only}
+    keys = sorted(key for key in registry.packets if key[0] == direction and key not in only)
+    numbers = [number for _, number in keys]
     definitions = {
         f"packet_{number}": packet_schema(registry, direction, number) for number in numbers
     }
+    definitions |= _forms(registry, direction)
+    for _, number in registry.forms.keys() & set(keys):
+        definitions[f"packet_{number}"]["properties"]["form"] = {"const": registry.version}
     definitions["content_packet"] = content_packet_schema(direction)
     rests = ("padding", "surplus", "content") if medium == "radio" else ("filler", "content")
     return {
@@ -255,15 +259,35 @@ def _frame(registry: Registry, medium: str, direction: str, header: Schema, titl
             "version": {"type": ["string", "number"]},
             "issue": {"type": "string"},
             "header": header,
-            "packets": {"type": "array", "items": {"anyOf": packets}},
+            "packets": {
+                "type": "array",
+                "items": {"anyOf": [{"$ref": f"#/$defs/{name}"} for name in definitions]},
+            },
             **dict.fromkeys(rests, BITS_SCHEMA),
             "problems": {"type": "array"},
+            "evidence": {"type": "array"},
             **BESIDE,
         },
         "required": ["medium", "header"],
         "additionalProperties": False,
         "$defs": definitions,
     }
+
+
+def _forms(registry: Registry, direction: str) -> dict[str, Schema]:
+    """Return the schemas of packets that may come as another version lays them out."""
+    schemas = {}
+    for (way, number), form in registry.forms.items():
+        if way == direction:
+            name = f"packet_{number}_as_{form.version.replace('.', '_')}"
+            schemas[name] = _form_schema(direction, number, form.version)
+    return schemas
+
+
+def _form_schema(direction: str, number: int, version: str) -> Schema:
+    schema = packet_schema(registry_of(version), direction, number)
+    schema["properties"]["form"] = {"const": version}
+    return schema
 
 
 def message_schema(registry: Registry, direction: str, number: int) -> Schema:
@@ -297,17 +321,25 @@ def frame_schema(registry: Registry) -> Schema:
 
 
 def json_schema(
-    kind: str, direction: str = TO_TRAIN, number: int | None = None, version: str = "2.1"
+    kind: str,
+    direction: str = TO_TRAIN,
+    number: int | None = None,
+    version: str = DEFAULT_VERSION,
+    issue: str | None = None,
 ) -> Schema:
     """Return the JSON Schema of a ``packet`` or ``message``, ``telegram``, ``loop`` or ``frame``.
 
     Packets and messages are named by direction and number. Raises `KeyError` for one that the
     registry of this system version does not hold.
     """
-    registry = registry_of(version)
+    registry = registry_of(version, issue)
     match kind, number:
         case "packet", int():
+            form = registry.forms.get((direction, number))
             schema = packet_schema(registry, direction, number)
+            if form:
+                other = _form_schema(direction, number, form.version)
+                schema = other if form.only else {"anyOf": [schema, other]}
         case "message", int():
             schema = message_schema(registry, direction, number)
         case "telegram", None:

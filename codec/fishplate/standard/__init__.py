@@ -2,6 +2,7 @@
 
 from __future__ import annotations
 
-from fishplate.standard.build import Registry, known_versions, registry
+from fishplate.standard.build import Registry, registry
+from fishplate.standard.editions import known_versions
 
 __all__ = ["Registry", "known_versions", "registry"]

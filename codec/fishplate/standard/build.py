@@ -2,7 +2,7 @@
 
 from __future__ import annotations
 
-from dataclasses import dataclass
+from dataclasses import dataclass, replace
 from functools import cache
 from importlib import import_module
 from types import MappingProxyType
@@ -10,31 +10,30 @@ from typing import TYPE_CHECKING
 
 from fishplate.errors import RegistryError
 from fishplate.standard.check import check
+from fishplate.standard.editions import DEFAULT_VERSION, EDITIONS, Edition, edition
 
 if TYPE_CHECKING:
     from collections.abc import Mapping
 
     from fishplate.standard.vocabulary import (
         Declarations,
+        Evidence,
         Header,
+        OtherForm,
         Packet,
         RadioMessage,
         Variable,
     )
-
-ISSUES: Mapping[tuple[str, str], str] = MappingProxyType(
-    {("2.1", "3.6.0"): "fishplate.standard.v3_6_0"}
-)
-"""Where the declarations of a system version, as printed in an issue, are to be found."""
-
-DEFAULT_VERSION = "2.1"
 
 
 @dataclass(frozen=True, slots=True)
 class Registry:
     """All variables and layouts of one system version, read-only.
 
-    Packets and messages are keyed by direction and number, headers by medium.
+    Packets and messages are keyed by direction and number, headers by medium. `evidence` says
+    what rests on less than the published layouts, `forms` which other version may lay out a
+    packet, keyed as packets are. `layouts` names the declarations, `bases` what they are composed
+    from.
     """
 
     version: str
@@ -44,6 +43,14 @@ class Registry:
     packets: Mapping[tuple[str, int], Packet]
     messages: Mapping[tuple[str, int], RadioMessage]
     headers: Mapping[str, Header]
+    evidence: tuple[Evidence, ...]
+    forms: Mapping[tuple[str, int], OtherForm]
+    layouts: str
+    bases: tuple[str, ...]
+
+    def evidence_of(self, *subject: str | int) -> tuple[Evidence, ...]:
+        """Return what is said of a packet, a message, a variable, or (nothing given) of all."""
+        return tuple(each for each in self.evidence if each.subject == subject)
 
     def of_lineage(self, name: str) -> Variable:
         """Return the variable that carries this lineage, whatever this issue calls it."""
@@ -68,12 +75,13 @@ def build(declarations: Declarations) -> Registry:
             {(each.direction, each.number): each for each in declarations.messages}
         ),
         headers=MappingProxyType({each.medium: each for each in declarations.headers}),
+        evidence=declarations.evidence,
+        forms=MappingProxyType(
+            {(each.direction, each.number): each for each in declarations.forms}
+        ),
+        layouts=declarations.layouts,
+        bases=declarations.bases,
     )
-
-
-def known_versions() -> tuple[str, ...]:
-    """Return the system versions that have a registry, such as ``("2.1",)``."""
-    return tuple(dict.fromkeys(version for version, _ in ISSUES))
 
 
 @cache
@@ -82,9 +90,15 @@ def registry(version: str = DEFAULT_VERSION, issue: str | None = None) -> Regist
 
     Raises `RegistryError` when there is none.
     """
-    for (known, printed), module in ISSUES.items():
-        if known == version and issue in (None, printed):
-            return build(import_module(module).DECLARATIONS)
-    wanted = f"{version} as printed in issue {issue}" if issue else version
-    offers = ", ".join(f"{known} (issue {printed})" for known, printed in ISSUES)
-    raise RegistryError(f"no registry for system version {wanted}; there is {offers}")
+    found = edition(version, issue)
+    if found is None or issue not in (None, found.issue):
+        wanted = f"{version} as printed in issue {issue}" if issue else version
+        offers = ", ".join(f"{each.version} (issue {each.issue})" for each in EDITIONS)
+        raise RegistryError(f"no registry for system version {wanted}; there is {offers}")
+    return _of_edition(found)
+
+
+@cache
+def _of_edition(found: Edition) -> Registry:
+    declared = import_module(f"fishplate.standard.{found.layouts}").DECLARATIONS
+    return build(replace(declared, version=found.version))

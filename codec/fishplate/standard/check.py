@@ -33,7 +33,18 @@ if TYPE_CHECKING:
     from collections.abc import Iterable, Sequence
 
 RESERVED_KEYS = frozenset(
-    {"content", "surplus", "padding", "filler", "problems", "packets", "header", "accepted"}
+    {
+        "content",
+        "surplus",
+        "padding",
+        "filler",
+        "problems",
+        "packets",
+        "header",
+        "accepted",
+        "form",
+        "evidence",
+    }
 )
 """Keys that a tree uses for itself, so that no field or set may take them."""
 
@@ -67,6 +78,22 @@ def check(declarations: Declarations) -> None:
         _check_message(message, variables, known)
     for header in declarations.headers:
         _check_header(header, variables)
+    _check_notes(declarations, known)
+
+
+def _check_notes(declarations: Declarations, packets: set[tuple[Direction, int]]) -> None:
+    """Hold evidence and other forms to what is declared."""
+    subjects: set[tuple[str | int, ...]] = {()}
+    subjects |= {("variable", each.name) for each in declarations.variables}
+    subjects |= {("packet", *each) for each in packets}
+    subjects |= {("message", each.direction, each.number) for each in declarations.messages}
+    for evidence in declarations.evidence:
+        if evidence.subject not in subjects:
+            what = " ".join(map(str, evidence.subject))
+            raise RegistryError(f"evidence on {what}, which is not declared")
+    for form in declarations.forms:
+        if (form.direction, form.number) not in packets:
+            raise RegistryError(f"other form of packet {form.number}, which is not declared")
 
 
 def _unique(names: Iterable[object], what: str, path: Path) -> None:

@@ -6,8 +6,12 @@ decoder, encoder, walk, models, schema and documentation all read the same decla
 
 from __future__ import annotations
 
-from dataclasses import dataclass
-from typing import Final, Literal
+from dataclasses import dataclass, field
+from types import MappingProxyType
+from typing import TYPE_CHECKING, Any, Final, Literal
+
+if TYPE_CHECKING:
+    from collections.abc import Mapping
 
 Coding = Literal["unsigned", "signed", "bitset", "digits", "latin1", "group-identity", "version"]
 """How the bits of a variable are read.
@@ -23,7 +27,7 @@ without meaning, ``bit`` and ``spare_bit`` the weight of one bit of a bit set, `
 on codes that are plain numbers."""
 
 UNITS: Final = frozenset(
-    {"", "A", "bit", "byte", "character", "day", "km/h", "m", "m/s2", "permille", "s"}
+    {"", "A", "bit", "byte", "character", "day", "km/h", "m", "m/s2", "permille", "s", "t"}
 )
 """The units a variable may be declared in; metres per second squared is ``m/s2``."""
 
@@ -168,7 +172,12 @@ COUNT: Final = "N_ITER"
 
 @dataclass(frozen=True, slots=True)
 class Packet:
-    """One packet of one direction; `senders` says who transmits it (or to whom it goes)."""
+    """One packet of one direction; `senders` says who transmits it (or to whom it goes).
+
+    `lineage` is the number under which the same content is known in issue 3.6.0 where this one
+    carries it under another. `since` names the first system version that may use the packet,
+    where that is not the first one of its X.
+    """
 
     number: int
     direction: Direction
@@ -176,6 +185,13 @@ class Packet:
     name: str
     senders: tuple[str, ...]
     nodes: tuple[Node, ...]
+    lineage: int = -1
+    since: str = ""
+
+    def __post_init__(self) -> None:
+        """Take the number as the lineage where none is declared."""
+        if self.lineage < 0:
+            object.__setattr__(self, "lineage", self.number)
 
 
 @dataclass(frozen=True, slots=True)
@@ -218,10 +234,45 @@ class Header:
     nodes: tuple[Node, ...]
 
 
+EvidenceKind = Literal["weaker", "inferred", "memory"]
+"""``weaker``: declared from less than the published layout; ``inferred``: from what other issues
+say; ``memory``: from memory, not checked against any text."""
+
+
+@dataclass(frozen=True, slots=True)
+class Evidence:
+    """Why something rests on less than the published text that lays it out.
+
+    `subject` is empty for all of an issue; else ``("packet", direction, number)``,
+    ``("message", direction, number)`` or ``("variable", name)``.
+    """
+
+    kind: EvidenceKind
+    note: str
+    subject: tuple[str | int, ...] = ()
+
+
+@dataclass(frozen=True, slots=True)
+class OtherForm:
+    """A packet that may also come as another system version lays it out: L_PACKET tells.
+
+    With `only`, it comes in no other way.
+    """
+
+    direction: Direction
+    number: int
+    version: str
+    only: bool = False
+
+
 @dataclass(frozen=True, slots=True)
 class Declarations:
-    """All that one issue of the standard declares, before it is checked and frozen."""
+    """All that one issue of the standard declares, before it is checked and frozen.
 
+    `layouts` is the name of the module that holds it, `bases` are those it is composed from.
+    """
+
+    layouts: str
     version: str
     issue: str
     date: str
@@ -229,3 +280,38 @@ class Declarations:
     packets: tuple[Packet, ...]
     messages: tuple[RadioMessage, ...]
     headers: tuple[Header, ...]
+    evidence: tuple[Evidence, ...] = ()
+    forms: tuple[OtherForm, ...] = ()
+    bases: tuple[str, ...] = ()
+
+
+def _nothing() -> Mapping[Any, Any]:
+    return MappingProxyType({})
+
+
+@dataclass(frozen=True, slots=True)
+class Revision:
+    """What one issue declares otherwise than the issue it is composed from.
+
+    `renamed` maps names of variables to those of this issue, wherever they stand. The tuples
+    `variables`, `packets` and `messages` are declared whole, in place of what has their name or
+    number, or beside it; the `amended` ones say single attributes of what else stays the same,
+    the `without` ones what is left out. `recoded` gives codes that stand in place of those they
+    overlap, the others stay. Names are those of this issue.
+    """
+
+    renamed: Mapping[str, str] = field(default_factory=_nothing)
+    variables: tuple[Variable, ...] = ()
+    amended_variables: Mapping[str, Mapping[str, Any]] = field(default_factory=_nothing)
+    recoded: Mapping[str, tuple[Codes, ...]] = field(default_factory=_nothing)
+    without_variables: tuple[str, ...] = ()
+    packets: tuple[Packet, ...] = ()
+    amended_packets: Mapping[tuple[Direction, int], Mapping[str, Any]] = field(
+        default_factory=_nothing
+    )
+    without_packets: tuple[tuple[Direction, int], ...] = ()
+    messages: tuple[RadioMessage, ...] = ()
+    amended_messages: Mapping[tuple[Direction, int], Mapping[str, Any]] = field(
+        default_factory=_nothing
+    )
+    without_messages: tuple[tuple[Direction, int], ...] = ()

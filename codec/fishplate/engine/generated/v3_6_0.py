@@ -1,4 +1,4 @@
-"""Readers and writers of SUBSET-026 issue 3.6.0.
+"""Readers and writers of SUBSET-026, layouts v3_6_0.
 
 Written by ``python -m fishplate.engine.generate`` from the registry; never edit it.
 """
@@ -4314,8 +4314,7 @@ def write_loop(t: Tree) -> tuple[int, int]:
 
 
 CODEC = Codec(
-    version="2.1",
-    issue="3.6.0",
+    layouts="v3_6_0",
     read_packet={
         "to-train": {
             0: read_to_train_0,
@@ -4543,5 +4542,6 @@ CODEC = Codec(
     },
     write_header={"balise": write_balise, "loop": write_loop},
     unmeasured={"to-train": {0: 14, 255: 8}, "to-track": {}},
-    versions={16: "1.0", 17: "1.1", 32: "2.0", 33: "2.1"},
+    forms={"to-train": {}, "to-track": {}},
+    evidence=(),
 )

@@ -10,6 +10,7 @@ from fishplate.standard.v3_6_0.variables import VARIABLES
 from fishplate.standard.vocabulary import Declarations
 
 DECLARATIONS = Declarations(
+    layouts="v3_6_0",
     version="2.1",
     issue="3.6.0",
     date="13/05/2016",

@@ -48,7 +48,7 @@ SECTIONS_AND_END: tuple[Node, ...] = (
     ),
 )
 
-DISPLAY_AND_CONFIRMATION: tuple[Node, ...] = (
+TEXT_DISPLAY: tuple[Node, ...] = (
     Group(
         "start",
         (
@@ -68,6 +68,10 @@ DISPLAY_AND_CONFIRMATION: tuple[Node, ...] = (
             When(Eq("M_LEVELTEXTDISPLAY", 1), (Field("NID_NTC"),)),
         ),
     ),
+)
+
+DISPLAY_AND_CONFIRMATION: tuple[Node, ...] = (
+    *TEXT_DISPLAY,
     Field("Q_TEXTCONFIRM"),
     When(
         Ne("Q_TEXTCONFIRM", 0),
@@ -76,6 +80,68 @@ DISPLAY_AND_CONFIRMATION: tuple[Node, ...] = (
             Field("Q_TEXTREPORT"),
             When(
                 Eq("Q_TEXTREPORT", 1), (Field("NID_TEXTMESSAGE"), Field("NID_C"), Field("NID_RBC"))
+            ),
+        ),
+    ),
+)
+
+CONVERSION_MODEL: tuple[Node, ...] = (
+    When(
+        Eq("Q_NVKINT", 1),
+        (
+            Series(
+                "kv_sets",
+                (
+                    Field("Q_NVKVINTSET"),
+                    When(Eq("Q_NVKVINTSET", 1), (Field("A_NVP12"), Field("A_NVP23"))),
+                    Series(
+                        "speed_steps",
+                        (
+                            Field("V_NVKVINT"),
+                            Field("M_NVKVINT"),
+                            When(
+                                Eq("Q_NVKVINTSET", 1),
+                                (Field("M_NVKVINT", key="M_NVKVINT_P23"),),
+                            ),
+                        ),
+                    ),
+                ),
+            ),
+            Series("length_steps", (Field("L_NVKRINT"), Field("M_NVKRINT"))),
+            Field("M_NVKTINT"),
+        ),
+    ),
+)
+
+TRACTION_CHANGE: tuple[Node, ...] = (
+    *SCALED_HEAD,
+    Field("D_TRACTION"),
+    Field("M_VOLTAGE"),
+    When(Ne("M_VOLTAGE", 0), (Field("NID_CTRACTION"),)),
+)
+
+SUITABILITIES: tuple[Node, ...] = (
+    *SCALED_HEAD,
+    Field("Q_TRACKINIT"),
+    When(Eq("Q_TRACKINIT", 1), (Field("D_TRACKINIT"),)),
+    When(
+        Eq("Q_TRACKINIT", 0),
+        (
+            Series(
+                "suitabilities",
+                (
+                    Field("D_SUITABILITY"),
+                    Field("Q_SUITABILITY"),
+                    When(Eq("Q_SUITABILITY", 0), (Field("M_LINEGAUGE"),)),
+                    When(Eq("Q_SUITABILITY", 1), (Field("M_AXLELOADCAT"),)),
+                    When(
+                        Eq("Q_SUITABILITY", 2),
+                        (
+                            Field("M_VOLTAGE"),
+                            When(Ne("M_VOLTAGE", 0), (Field("NID_CTRACTION"),)),
+                        ),
+                    ),
+                ),
             ),
         ),
     ),
@@ -137,31 +203,7 @@ PACKETS: tuple[Packet, ...] = (
             Field("M_NVAVADH"),
             Field("M_NVEBCL"),
             Field("Q_NVKINT"),
-            When(
-                Eq("Q_NVKINT", 1),
-                (
-                    Series(
-                        "kv_sets",
-                        (
-                            Field("Q_NVKVINTSET"),
-                            When(Eq("Q_NVKVINTSET", 1), (Field("A_NVP12"), Field("A_NVP23"))),
-                            Series(
-                                "speed_steps",
-                                (
-                                    Field("V_NVKVINT"),
-                                    Field("M_NVKVINT"),
-                                    When(
-                                        Eq("Q_NVKVINTSET", 1),
-                                        (Field("M_NVKVINT", key="M_NVKVINT_P23"),),
-                                    ),
-                                ),
-                            ),
-                        ),
-                    ),
-                    Series("length_steps", (Field("L_NVKRINT"), Field("M_NVKRINT"))),
-                    Field("M_NVKTINT"),
-                ),
-            ),
+            *CONVERSION_MODEL,
         ),
     ),
     Packet(
@@ -290,12 +332,7 @@ PACKETS: tuple[Packet, ...] = (
         "7.4.2.8",
         "Track Condition Change of traction system",
         ("Any",),
-        nodes=(
-            *SCALED_HEAD,
-            Field("D_TRACTION"),
-            Field("M_VOLTAGE"),
-            When(Ne("M_VOLTAGE", 0), (Field("NID_CTRACTION"),)),
-        ),
+        nodes=TRACTION_CHANGE,
     ),
     Packet(
         40,
@@ -575,32 +612,7 @@ PACKETS: tuple[Packet, ...] = (
         "7.4.2.21",
         "Route Suitability Data",
         ("Any",),
-        nodes=(
-            *SCALED_HEAD,
-            Field("Q_TRACKINIT"),
-            When(Eq("Q_TRACKINIT", 1), (Field("D_TRACKINIT"),)),
-            When(
-                Eq("Q_TRACKINIT", 0),
-                (
-                    Series(
-                        "suitabilities",
-                        (
-                            Field("D_SUITABILITY"),
-                            Field("Q_SUITABILITY"),
-                            When(Eq("Q_SUITABILITY", 0), (Field("M_LINEGAUGE"),)),
-                            When(Eq("Q_SUITABILITY", 1), (Field("M_AXLELOADCAT"),)),
-                            When(
-                                Eq("Q_SUITABILITY", 2),
-                                (
-                                    Field("M_VOLTAGE"),
-                                    When(Ne("M_VOLTAGE", 0), (Field("NID_CTRACTION"),)),
-                                ),
-                            ),
-                        ),
-                    ),
-                ),
-            ),
-        ),
+        nodes=SUITABILITIES,
     ),
     Packet(
         71,

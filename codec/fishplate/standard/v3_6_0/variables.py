@@ -67,6 +67,20 @@ SESSION_ORDER = (
 )
 TIME_INFINITE_8_BITS = (Codes(255, 255, "special", "infinite"),)
 TIME_INFINITE_10_BITS = (Codes(1023, 1023, "special", "infinite"),)
+TRACK_CONDITIONS = (
+    Codes(0, 0, "value", "non stopping area"),
+    Codes(1, 1, "value", "tunnel stopping area"),
+    Codes(2, 2, "value", "sound horn"),
+    Codes(3, 3, "value", "powerless section, lower pantograph"),
+    Codes(4, 4, "value", "radio hole"),
+    Codes(5, 5, "value", "air tightness"),
+    Codes(6, 6, "value", "switch off regenerative brake"),
+    Codes(7, 7, "value", "switch off eddy current brake for service brake"),
+    Codes(8, 8, "value", "switch off magnetic shoe brake"),
+    Codes(9, 9, "value", "powerless section, switch off main power switch"),
+    Codes(10, 10, "value", "switch off eddy current brake for emergency brake"),
+    Codes(11, 15, "spare", "spare"),
+)
 SPEED_SPARE = (Codes(121, 127, "spare", "spare"),)
 RELEASE_SPEED = (
     Codes(121, 125, "spare", "spare"),
@@ -1189,20 +1203,7 @@ VARIABLES: tuple[Variable, ...] = (
         4,
         "unsigned",
         "track condition type",
-        codes=(
-            Codes(0, 0, "value", "non stopping area"),
-            Codes(1, 1, "value", "tunnel stopping area"),
-            Codes(2, 2, "value", "sound horn"),
-            Codes(3, 3, "value", "powerless section, lower pantograph"),
-            Codes(4, 4, "value", "radio hole"),
-            Codes(5, 5, "value", "air tightness"),
-            Codes(6, 6, "value", "switch off regenerative brake"),
-            Codes(7, 7, "value", "switch off eddy current brake for service brake"),
-            Codes(8, 8, "value", "switch off magnetic shoe brake"),
-            Codes(9, 9, "value", "powerless section, switch off main power switch"),
-            Codes(10, 10, "value", "switch off eddy current brake for emergency brake"),
-            Codes(11, 15, "spare", "spare"),
-        ),
+        codes=TRACK_CONDITIONS,
     ),
     Variable(
         "M_VOLTAGE",
