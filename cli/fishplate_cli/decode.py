@@ -18,6 +18,7 @@ from fishplate_cli.inputs import (
     FormOption,
     Given,
     Inputs,
+    IssueOption,
     MediumOption,
     VersionOption,
     check_frames,
@@ -40,6 +41,10 @@ spare code. jsonl carries time, note and true bit length along, so that `encode`
 capture back."""
 
 
+NOT_SAID_OF_IT = frozenset({"assumed", "inferred", "capture"})
+"""Where the version of a frame came from when neither its line nor an option said it."""
+
+
 class As(StrEnum):
     """What is written."""
 
@@ -56,11 +61,12 @@ def command(
     medium: MediumOption = None,
     direction: DirectionOption = None,
     version: VersionOption = None,
+    issue: IssueOption = None,
     form: FormOption = None,
 ) -> None:
     """Decode frames."""
     check_frames(inputs)
-    given = Given(medium, direction, version, form)
+    given = Given(medium, direction, version, issue, form)
     complaints = Complaints()
     if view is As.TEXT:
         _text(inputs, given, complaints)
@@ -109,7 +115,7 @@ def context(frame: Frame, message: Message, *, full: bool) -> dict[str, Any]:
         given = _given(frame, message)
         if given:
             beside["given"] = given
-        if message.medium == "radio" and message.version_from == "assumed":
+        if message.medium == "radio" and message.version_from in NOT_SAID_OF_IT:
             beside["assumed"] = ["version"]
     return beside
 

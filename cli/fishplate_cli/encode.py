@@ -165,7 +165,9 @@ def _encoded(authored: dict[str, Any], place: str, *, length: int | None, force:
         found = decode(data, bits=bits, medium=medium, direction=direction, strict=False)
         medium, direction = found.medium, found.direction
     version = tree.get("version")
+    assumed = beside.get("assumed") or ()
     stated = medium == "radio" and version not in (None, DEFAULT_VERSION)
+    stated = stated and "version" not in assumed
     given = _given(beside.get("given"))
     return Frame(
         data,

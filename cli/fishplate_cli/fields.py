@@ -26,12 +26,20 @@ from fishplate_cli.inputs import (
     FormOption,
     Given,
     Inputs,
+    IssueOption,
     MediumOption,
     VersionOption,
     check_frames,
     read_frames,
 )
-from fishplate_cli.wording import book_of, heading, packet_title, quoted, unexplained
+from fishplate_cli.wording import (
+    book_of,
+    evidence_lines,
+    heading,
+    packet_title,
+    quoted,
+    unexplained,
+)
 
 if TYPE_CHECKING:
     from collections.abc import Iterator
@@ -66,12 +74,14 @@ def command(
     medium: MediumOption = None,
     direction: DirectionOption = None,
     version: VersionOption = None,
+    issue: IssueOption = None,
     form: FormOption = None,
 ) -> None:
     """List fields."""
     check_frames(inputs)
-    given = Given(medium, direction, version, form)
+    given = Given(medium, direction, version, issue, form)
     complaints = Complaints()
+    said: set[str] = set()
     frames = (each for each in read_frames(inputs, given, complaints) if not each.problem)
     for number, frame in enumerate(frames):
         message = given.decode(frame)
@@ -79,7 +89,7 @@ def command(
         if view is As.TEXT:
             if number:
                 write("")
-            for line in table(frame, message, list(rows)):
+            for line in table(frame, message, list(rows), said):
                 write(line)
         else:
             for row in rows:
@@ -104,8 +114,8 @@ def as_json(index: int, row: FieldRow) -> str:
     )
 
 
-def table(frame: Frame, message: Message, rows: list[FieldRow]) -> Iterator[str]:
-    """Yield the rows of one frame as a table."""
+def table(frame: Frame, message: Message, rows: list[FieldRow], before: set[str]) -> Iterator[str]:
+    """Yield the rows of one frame as a table; `before` holds the evidence said before."""
     book = book_of(message)
     first, second = heading(message, book)
     columns = max(width(), USUAL)
@@ -113,6 +123,8 @@ def table(frame: Frame, message: Message, rows: list[FieldRow]) -> Iterator[str]
     for each in wrap(title, columns, subsequent_indent="    "):
         yield style(each, "bold", colour=coloured())
     yield from wrap(f"  {second}", width(), subsequent_indent="    ")
+    for sentence in evidence_lines(message, before):
+        yield from wrap(f"  {sentence}", columns, subsequent_indent="    ")
     cells = [(_place(row), _raw(row)) for row in rows]
     raw_width = min(max(len("raw"), *(len(raw) for _, raw in cells), 0), LONGEST_RAW)
     room = columns - len(NUMBERS) - len(GAP) - raw_width - len(GAP) - NARROWEST_MEANING

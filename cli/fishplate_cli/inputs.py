@@ -13,9 +13,9 @@ from typing import IO, TYPE_CHECKING, Annotated
 
 import typer
 
-from fishplate.captures import Frame, form_by_name, read_literal, read_stream
+from fishplate.captures import CaptureDecoder, Frame, form_by_name, read_literal, read_stream
 from fishplate.errors import DecodeError, FishplateError
-from fishplate.frames import decode
+from fishplate.standard.editions import EDITIONS
 from fishplate_cli.console import Complaints, Progress, shortened, visible
 
 if TYPE_CHECKING:
@@ -35,7 +35,6 @@ VERSION = re.compile(r"\d+\.\d+")
 SHOWN = 60
 NAMED = 8
 """Keys and columns that are named where a file has some that mean nothing."""
-BYTE = 8
 
 
 class Medium(StrEnum):
@@ -68,6 +67,13 @@ def _version(value: str | None) -> str | None:
     return value
 
 
+def _issue(value: str | None) -> str | None:
+    issues = sorted({each.issue for each in EDITIONS})
+    if value is not None and value not in issues:
+        raise typer.BadParameter(f"{value!r} is none of {', '.join(issues)}")
+    return value
+
+
 Inputs = Annotated[
     list[str],
     typer.Argument(
@@ -88,8 +94,17 @@ VersionOption = Annotated[
     str | None,
     typer.Option(
         metavar="X.Y",
-        help="The system version of radio messages, otherwise taken to be 2.1.",
+        help="The system version of radio messages where the capture does not say it.",
         callback=_version,
+        show_default=False,
+    ),
+]
+IssueOption = Annotated[
+    str | None,
+    typer.Option(
+        metavar="N.N.N",
+        help="Read versions as this issue of SUBSET-026 prints them (2.3.0 for 1.0).",
+        callback=_issue,
         show_default=False,
     ),
 ]
@@ -109,31 +124,21 @@ class Given:
         medium: Medium | None = None,
         direction: Direction | None = None,
         version: str | None = None,
+        issue: str | None = None,
         form: FrameForm | None = None,
     ) -> None:
         self.medium = medium.value if medium else None
-        self.direction = direction.value if direction else None
-        self.version = version
         self.form: Form | None = form.value if form else None
+        self.decoder = CaptureDecoder(
+            medium=self.medium,
+            direction=direction.value if direction else None,
+            version=version,
+            issue=issue,
+        )
 
     def decode(self, frame: Frame) -> Message:
-        """Decode a frame leniently; telegrams say their version themselves."""
-        medium = frame.medium or self.medium
-        version = frame.version or self.version
-        if version is not None and medium is None:
-            medium = self._decoded(frame, None, None).medium
-        return self._decoded(frame, medium, version if medium == "radio" else None)
-
-    def _decoded(self, frame: Frame, medium: str | None, version: str | None) -> Message:
-        whole = len(frame.data) * BYTE == frame.bits
-        return decode(
-            frame.data,
-            medium=medium,
-            direction=frame.direction or self.direction,
-            version=version,
-            bits=None if whole else frame.bits,
-            strict=False,
-        )
+        """Decode a frame leniently, with what earlier frames of its capture said of versions."""
+        return self.decoder.decode(frame)
 
 
 def is_file(text: str) -> bool:

@@ -11,23 +11,28 @@ from fishplate_cli.inputs import (
     FormOption,
     Given,
     Inputs,
+    IssueOption,
     MediumOption,
     VersionOption,
     check_frames,
     read_frames,
 )
-from fishplate_cli.wording import book_of, message_name, reference
+from fishplate_cli.wording import NOT_SURE, book_of, message_name, reference, same_in_every_version
 
 if TYPE_CHECKING:
     from fishplate.captures import Frame
     from fishplate.frames import Message
+    from fishplate.standard import Registry
 
 HELP = """\
-List frames, one line each: number, time, direction, what it is, its reference, its packets.
+List frames, one line each: number, time, direction, system version, what it is, its reference,
+its packets. ? marks a version that is assumed or inferred, any a message that is
+the same in every version.
 
 !! marks a frame with problems and names their kinds."""
 
 DIRECTION = 8
+VERSION = 4
 WHAT = 11
 REFERENCE = 16
 
@@ -38,11 +43,12 @@ def command(
     medium: MediumOption = None,
     direction: DirectionOption = None,
     version: VersionOption = None,
+    issue: IssueOption = None,
     form: FormOption = None,
 ) -> None:
     """List frames."""
     check_frames(inputs)
-    given = Given(medium, direction, version, form)
+    given = Given(medium, direction, version, issue, form)
     complaints = Complaints()
     colour = coloured()
     time_width = 1
@@ -77,10 +83,19 @@ def line(frame: Frame, message: Message, *, colour: bool) -> str:
             what = message.medium
     numbers = [each["NID_PACKET"] for each in message.packets if each["NID_PACKET"] != END_FLAG]
     packets = f"packets {' '.join(map(str, numbers))}" if numbers else "no packets"
-    text = f"{message.direction or '-':<{DIRECTION}}  {what:<{WHAT}}"
+    text = f"{message.direction or '-':<{DIRECTION}}  {_version(message, book):<{VERSION}}"
+    text += f"  {what:<{WHAT}}"
     text += f"  {reference(message, book):<{REFERENCE}}"
     text += f"  {name}, {packets}" if name else f"  {packets}"
     if message.problems:
         kinds = ", ".join(dict.fromkeys(each.kind for each in message.problems))
         text += style(f"  !! {kinds}", "problem", colour=colour)
     return text
+
+
+def _version(message: Message, book: Registry) -> str:
+    if same_in_every_version(message, book):
+        return "any"
+    if not message.version or message.medium is None:
+        return "-"
+    return message.version + ("?" if message.version_from in NOT_SURE else "")

@@ -12,6 +12,8 @@ from fishplate_cli.console import shown_time, style, visible
 from fishplate_cli.wording import (
     SPARE,
     book_of,
+    book_of_packet,
+    evidence_lines,
     heading,
     in_heading,
     packet_title,
@@ -63,6 +65,7 @@ class View:
     def __init__(self, width: int, *, colour: bool = False) -> None:
         self.width = width
         self.colour = colour
+        self.said: set[str] = set()
 
     def frame(self, frame: Frame, message: Message) -> Iterator[str]:
         """Yield the lines of one frame, its problems where they stand."""
@@ -88,6 +91,8 @@ class View:
         for line in wrap(title, self.width, subsequent_indent=GAP * 2):
             yield style(line, "bold", colour=self.colour)
         yield from wrap(second, self.width, initial_indent=GAP, subsequent_indent=GAP * 2)
+        for sentence in evidence_lines(message, self.said):
+            yield from wrap(sentence, self.width, initial_indent=GAP, subsequent_indent=GAP * 2)
         if frame.note:
             note = f"note: {visible(frame.note)}"
             yield from wrap(note, self.width, initial_indent=GAP, subsequent_indent=GAP * 4)
@@ -101,6 +106,7 @@ class View:
             yield from self._header(rows, message, book, problems)
         elif first.path[0] == "packets":
             packet = message.packets[int(first.path[1])]
+            book = book_of_packet(packet, book)
             title = packet_title(packet, message.direction or "", book)
             yield from self._wrapped(first.offset, "", title, bold=True)
             head = [row for row in rows[: len(HEAD)] if row.path[-1] in HEAD]

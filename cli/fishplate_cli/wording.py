@@ -8,12 +8,16 @@ from types import MappingProxyType
 from typing import TYPE_CHECKING, Any
 
 from fishplate.bits import BYTE
+from fishplate.errors import path_text
 from fishplate.meaning import explain
 from fishplate.standard import registry
-from fishplate.versions import DEFAULT_VERSION, closest_layouts, version_text
+from fishplate.standard.editions import DEFAULT_VERSION, edition
+from fishplate.versions import closest_layouts, version_text
 from fishplate_cli.console import counted, visible
 
 if TYPE_CHECKING:
+    from collections.abc import Iterator
+
     from fishplate.frames import FieldRow, Message
     from fishplate.standard import Registry
     from fishplate.standard.vocabulary import Variable
@@ -34,15 +38,28 @@ UP_LINK = 1
 Q_MEDIA = MappingProxyType({"balise": 0, "loop": 1})
 """Q_MEDIA by what the heading calls the medium (SUBSET-026 7.5.1.119)."""
 
+NOT_SURE = frozenset({"assumed", "inferred"})
+"""Where a system version came from that the heading of a frame does not leave unsaid."""
+
 CODED = frozenset({"special", "spare", "value"})
 SPARE = "!"
+EVIDENCE = MappingProxyType(
+    {"weaker": "weaker evidence", "inferred": "inferred", "memory": "from memory"}
+)
+"""How kinds of evidence are named in front of what they are about."""
+
 SHOWN_HEX = 32
 POSITION_REPORTS = (0, 1)
 
 
 def book_of(message: Message) -> Registry:
     """Return the registry whose layouts read the message."""
-    return registry(closest_layouts(message.version) or DEFAULT_VERSION)
+    return message.layouts.registry if message.layouts else registry(DEFAULT_VERSION)
+
+
+def book_of_packet(packet: dict[str, Any], book: Registry) -> Registry:
+    """Return the registry whose layouts read a packet: another one for another form of it."""
+    return registry(packet["form"]) if "form" in packet else book
 
 
 @lru_cache(maxsize=4096)
@@ -88,9 +105,34 @@ def heading(message: Message, book: Registry) -> tuple[str, str]:
     first = "  ".join(filter(None, (message.medium, way, counted(message.size, "bit"))))
     version = ""
     if message.version and message.medium:
-        assumed = " (assumed)" if message.version_from == "assumed" else ""
-        version = f"; system version {message.version}{assumed}"
+        source = f" ({message.version_from})" if message.version_from in NOT_SURE else ""
+        version = f"; system version {message.version}{source}"
+        if same_in_every_version(message, book):
+            version = "; the same in every system version"
+        if message.issue and message.issue != _usual_issue(message.version):
+            version += f" as issue {message.issue} prints it"
     return first, f"{_what(message, book)}{version}"
+
+
+def _usual_issue(version: str) -> str:
+    """Return the issue whose layouts a version is read with unless another is asked for."""
+    found = edition(closest_layouts(version) or DEFAULT_VERSION)
+    return found.issue if found else ""
+
+
+def evidence_lines(message: Message, before: set[str]) -> Iterator[str]:
+    """Yield what in a message rests on less than published layouts, one sentence each.
+
+    What holds for all of a version is said once: `before` keeps what has been.
+    """
+    for each in message.evidence:
+        place = path_text(tuple(each["path"]))
+        text = f"{EVIDENCE[each['kind']]}: {each['message']}"
+        if place:
+            yield f"{text} [{place}]"
+        elif text not in before:
+            before.add(text)
+            yield text
 
 
 def _what(message: Message, book: Registry) -> str:
@@ -107,6 +149,12 @@ def _what(message: Message, book: Registry) -> str:
         case None:
             return "not recognised"
     return f"{message.medium}, header not readable"
+
+
+def same_in_every_version(message: Message, book: Registry) -> bool:
+    """Tell whether a radio message is laid out the same in every system version."""
+    found = book.messages.get((message.direction or "", message.header.get("NID_MESSAGE", -1)))
+    return found is not None and found.version_invariant
 
 
 def message_name(message: Message, book: Registry) -> str:
@@ -135,6 +183,7 @@ def _agrees(row: FieldRow, message: Message) -> bool:
 
 def packet_title(packet: dict[str, Any], direction: str, book: Registry) -> str:
     """Return number, name, validity direction and length of a packet."""
+    book = book_of_packet(packet, book)
     number = packet["NID_PACKET"]
     found = book.packets.get((direction, number))
     known = []

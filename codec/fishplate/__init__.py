@@ -9,7 +9,7 @@ from typing import TYPE_CHECKING, Any
 
 if TYPE_CHECKING:
     from fishplate.authoring import encode
-    from fishplate.captures import Frame, read_capture
+    from fishplate.captures import Frame, decode_frames, read_capture
     from fishplate.errors import (
         Ambiguous,
         DecodeError,
@@ -28,6 +28,7 @@ __version__ = "0.1.0"
 _HOMES = {
     "encode": "fishplate.authoring",
     "Frame": "fishplate.captures",
+    "decode_frames": "fishplate.captures",
     "read_capture": "fishplate.captures",
     "FieldRow": "fishplate.frames",
     "Message": "fishplate.frames",
@@ -62,6 +63,7 @@ __all__ = [
     "Truncated",
     "Unknown",
     "decode",
+    "decode_frames",
     "encode",
     "read_capture",
     "registry",

@@ -86,7 +86,9 @@ def test_list_has_a_line_a_frame(
     assert ended.code == 3
     first, second, third, fourth = ended.out.splitlines()
     # Vector 01: NID_LRBG 16/257; vector 02: balise 1 of 2 of group 1000/12 with packet 41.
-    assert first.split()[:4] == ["0", "06:15", "to-train", "message"]
+    # A radio message that says no version is taken to be 2.1; the telegram says 2.1 itself.
+    assert first.split()[:5] == ["0", "06:15", "to-train", "2.1?", "message"]
+    assert second.split()[:4] == ["1", "-", "to-train", "2.1"]
     assert "LRBG 16/257" in first
     assert first.endswith("packets 15 21")
     assert "balise 1/2" in second

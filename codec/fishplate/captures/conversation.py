@@ -1,0 +1,149 @@
+"""Decoding the frames of a capture one after the other, with what they say of system versions.
+
+A radio message does not say which system version it is of. In a capture, frames before it may:
+message 32 names the version of the trackside, packet 2 of the train the versions it can speak,
+packet 2 of a balise the version ordered for the area.
+"""
+
+from __future__ import annotations
+
+from typing import TYPE_CHECKING
+
+from fishplate.bits import BYTE
+from fishplate.frames import decode
+from fishplate.standard.editions import version_key
+from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN
+from fishplate.versions import version_text
+
+if TYPE_CHECKING:
+    from collections.abc import Iterable, Iterator
+
+    from fishplate.captures.frame import Frame
+    from fishplate.frames import Message
+
+TRACKSIDE_VERSION = 32
+"""The message in which RBC or RIU names its system version (SUBSET-026 8.7.12)."""
+
+VERSIONS = 2
+"""To the train the version order (SUBSET-026 7.4.2.1), to the track the supported versions."""
+
+
+class Heard:
+    """What the frames of a capture have said so far of system versions."""
+
+    def __init__(self) -> None:
+        self.trackside: str | None = None
+        self.ordered: str | None = None
+        self.supported: tuple[str, ...] = ()
+
+    def hear(self, message: Message) -> None:
+        """Take in what a message says, if it says anything of versions."""
+        number = message.header.get("NID_MESSAGE")
+        if number == TRACKSIDE_VERSION and "M_VERSION" in message.header:
+            self.trackside = version_text(message.header["M_VERSION"])
+        for packet in message.packets:
+            if packet["NID_PACKET"] != VERSIONS or "content" in packet:
+                continue
+            if message.direction == TO_TRAIN:
+                self.ordered = version_text(packet["M_VERSION"])
+            else:
+                codes = (each["M_VERSION"] for each in packet["versions"])
+                self.supported = tuple(map(version_text, codes))
+
+    def version(self, direction: str | None) -> str | None:
+        """Return the version of radio messages this way; None where nothing has been said.
+
+        A train that does not know the Y of the trackside speaks the highest below that it knows
+        (versions that differ in Y only are compatible, SUBSET-026 3.17.3).
+        """
+        said = self.trackside or self.ordered
+        if said is None or direction != TO_TRACK or said in self.supported:
+            return said
+        x, y = version_key(said)
+        below = [each for each in self.supported if (x, 0) <= version_key(each) < (x, y)]
+        return max(below, key=version_key, default=said)
+
+
+class CaptureDecoder:
+    """Decodes frames leniently, one after the other; each source is a capture of its own.
+
+    `medium`, `direction`, `version` (of radio messages) and `issue` hold for frames that do not
+    say it themselves, `version` where no frame before them does either.
+    """
+
+    def __init__(
+        self,
+        *,
+        medium: str | None = None,
+        direction: str | None = None,
+        version: str | None = None,
+        issue: str | None = None,
+    ) -> None:
+        self.medium = medium
+        self.direction = direction
+        self.version = version
+        self.issue = issue
+        self.heard = Heard()
+        self._source: str | None = None
+
+    def decode(self, frame: Frame) -> Message:
+        """Decode one frame; its `version_from` says ``"capture"`` where earlier frames told it."""
+        if frame.source != self._source:
+            self._source = frame.source
+            self.heard = Heard()
+        message = self._decoded(frame)
+        self.heard.hear(message)
+        return message
+
+    def _decoded(self, frame: Frame) -> Message:
+        medium = frame.medium or self.medium
+        if frame.version is not None and medium == "radio":
+            return self._read(frame, medium, frame.version)
+        message = self._read(frame, medium, None)
+        if message.medium != "radio":
+            return message
+        if frame.version is not None:
+            return self._read(frame, "radio", frame.version)
+        told = self.heard.version(message.direction)
+        if told is None:
+            return self._read(frame, "radio", self.version) if self.version else message
+        if told == message.version and not message.problems:
+            message.version_from = "capture"
+            return message
+        again = self._read(frame, "radio", told)
+        if again.problems and not message.problems:
+            # Of another trackside, or of a session whose beginning is missing.
+            return message
+        again.version_from = "capture"
+        return again
+
+    def _read(self, frame: Frame, medium: str | None, version: str | None) -> Message:
+        whole = len(frame.data) * BYTE == frame.bits
+        return decode(
+            frame.data,
+            medium=medium,
+            direction=frame.direction or self.direction,
+            version=version,
+            issue=self.issue,
+            bits=None if whole else frame.bits,
+            strict=False,
+        )
+
+
+def decode_frames(
+    frames: Iterable[Frame],
+    *,
+    medium: str | None = None,
+    direction: str | None = None,
+    version: str | None = None,
+    issue: str | None = None,
+) -> Iterator[tuple[Frame, Message]]:
+    """Yield the frames of a capture with the messages they decode to, leniently.
+
+    Frames that could not be read (`Frame.problem`) are left out. The arguments hold for frames
+    that do not say it themselves, as for `CaptureDecoder`.
+    """
+    decoder = CaptureDecoder(medium=medium, direction=direction, version=version, issue=issue)
+    for frame in frames:
+        if frame.problem is None:
+            yield frame, decoder.decode(frame)
