@@ -1,4 +1,4 @@
-"""Write the reference pages from the registry, or check that the committed ones are current.
+"""Write the reference pages from the registries, or check that the committed ones are current.
 
 ``python docs/reference.py`` writes, ``python docs/reference.py --check`` compares and ends with
 code 1 when a page is missing, stale or left over.
@@ -8,33 +8,37 @@ from __future__ import annotations
 
 import argparse
 import sys
-from collections import defaultdict
+from importlib import import_module
 from pathlib import Path
 from typing import TYPE_CHECKING, TypeVar
 
-from fishplate.standard import known_versions, registry
+from fishplate.standard import registry
 from fishplate.standard import vocabulary as v
+from fishplate.standard.comparison import compare, difference
+from fishplate.standard.fields import Place, places
+from fishplate.standard.history import Stage, neighbour, own_evidence, stages
+from fishplate_cli.compare import edition_label, said, state_groups, title
+from fishplate_cli.console import counted
+from fishplate_cli.describe import CODINGS, length_text
+from fishplate_cli.lookup import KINDS_OF_EVIDENCE, condition_text, users
 
 if TYPE_CHECKING:
-    from collections.abc import Iterable, Iterator, Mapping, Sequence
+    from collections.abc import Container, Iterable, Iterator, Mapping, Sequence
 
     from fishplate.standard import Registry
+    from fishplate.standard.comparison import Difference, Thing
 
 FOLDER = Path(__file__).parent / "reference"
 NOTE = "<!-- Written by docs/reference.py from the registry: change the declarations instead. -->"
 
 Sent = TypeVar("Sent", v.Packet, v.RadioMessage)
 
-WAYS: dict[v.Direction, str] = {v.TO_TRAIN: "track to train", v.TO_TRACK: "train to track"}
-CODINGS = {
-    "unsigned": "unsigned number",
-    "signed": "signed number, two's complement",
-    "bitset": "set of bits",
-    "digits": "decimal digits in nibbles, left adjusted, padded with F",
-    "latin1": "character of ISO 8859-1",
-    "group-identity": "NID_C in the 10 high bits, NID_BG in the 14 low bits",
-    "version": "X in the 3 high bits, Y in the 4 low bits",
+WHAT_REPEATS = {
+    "series": "N\\_ITER of the list: so many further elements follow",
+    "repeat": "N\\_ITER of the list: so many elements follow",
 }
+WAYS: dict[v.Direction, str] = {v.TO_TRAIN: "track to train", v.TO_TRACK: "train to track"}
+MAIN = registry()
 KINDS = {
     "value": "value",
     "special": "special meaning",
@@ -71,15 +75,23 @@ def main(arguments: Sequence[str] | None = None) -> int:
 
 def pages() -> Iterator[tuple[str, str]]:
     """Every page as name below docs/reference and text."""
-    registries = [registry(version) for version in known_versions()]
-    yield "index.md", join(index(registries))
-    for book in registries:
-        yield f"{book.issue}/index.md", join(issue_index(book))
-        yield f"{book.issue}/variables.md", join(variables(book))
-        yield f"{book.issue}/telegrams.md", join(telegrams(book))
+    every = stages()
+    yield "index.md", join(index(every))
+    yield "differences.md", join(differences(every))
+    for stage in every:
+        book, name = stage.book, folder(stage.book)
+        yield f"{name}/index.md", join(edition_index(stage))
+        yield f"{name}/variables.md", join(variables(book))
+        yield f"{name}/telegrams.md", join(telegrams(book))
         for direction in (v.TO_TRAIN, v.TO_TRACK):
-            yield f"{book.issue}/packets-{direction}.md", join(packets(book, direction))
-            yield f"{book.issue}/messages-{direction}.md", join(messages(book, direction))
+            yield f"{name}/packets-{direction}.md", join(packets(book, direction))
+            yield f"{name}/messages-{direction}.md", join(messages(book, direction))
+
+
+def folder(book: Registry) -> str:
+    """The folder of an edition: its issue, or the name of layouts that no issue prints as such."""
+    printed = f"v{book.issue.replace('.', '_')}" == book.layouts
+    return book.issue if printed else book.layouts.replace("_", "-")
 
 
 def join(blocks: Iterable[str]) -> str:
@@ -87,20 +99,42 @@ def join(blocks: Iterable[str]) -> str:
     return "\n\n".join([NOTE, *blocks]) + "\n"
 
 
-def index(registries: Sequence[Registry]) -> Iterator[str]:
-    """The page that leads to every issue of the standard."""
+def index(every: Sequence[Stage]) -> Iterator[str]:
+    """The page that leads to every edition of the standard."""
     yield "# Reference"
     yield (
-        "Written from the registry that the codec itself is generated from. Names, widths, codes,"
+        "Written from the registries that the codec itself is generated from. Names, widths, codes,"
         " order and conditions are facts of SUBSET-026; titles and labels are our own words. The"
         " standard decides, not these pages."
     )
-    yield toctree(f"{book.issue}/index" for book in registries)
+    yield table(
+        ("system version", "issue", "layouts", "evidence"),
+        (
+            (
+                " and ".join(stage.versions),
+                f"{stage.book.issue} of {stage.book.date}",
+                f"[{folder(stage.book)}]({folder(stage.book)}/index.md)",
+                "; ".join(map(evidence, stage.book.evidence_of())) or "published",
+            )
+            for stage in every
+        ),
+    )
+    yield toctree(["differences", *(f"{folder(stage.book)}/index" for stage in every)])
 
 
-def issue_index(book: Registry) -> Iterator[str]:
-    """The page that leads to everything one issue declares."""
-    yield f"# SUBSET-026 issue {book.issue} (system version {book.version})"
+def evidence(what: v.Evidence) -> str:
+    """On what something rests."""
+    return f"**{KINDS_OF_EVIDENCE[what.kind]}**: {escape(what.note)}"
+
+
+def edition_index(stage: Stage) -> Iterator[str]:
+    """The page that leads to everything one edition declares."""
+    book = stage.book
+    versions = "version" if len(stage.versions) == 1 else "versions"
+    yield f"# System {versions} {' and '.join(stage.versions)} (issue {book.issue})"
+    declared = import_module(f"fishplate.standard.{book.layouts}").__doc__ or ""
+    yield escape(declared.strip())
+    yield from map(evidence, book.evidence_of())
     yield (
         f"{len(book.variables)} variables, {len(book.packets)} packets, {len(book.messages)} radio"
         f" messages and {len(book.headers)} headers."
@@ -108,11 +142,44 @@ def issue_index(book: Registry) -> Iterator[str]:
     yield (
         "**How to read the layouts.** Fields stand in the order of the wire, most significant bit"
         " first. `set[].NAME` is a field of each element of a list, `group.NAME` a field of a"
-        " group. A list row says where its N_ITER stands. Distances with a step set by Q_SCALE"
+        " group. A list row is its N_ITER. Distances with a step set by Q_SCALE"
         " count 0.1 m, 1 m or 10 m."
     )
     layouts = (f"{kind}-{direction}" for kind in ("packets", "messages") for direction in WAYS)
     yield toctree(["telegrams", *layouts, "variables"])
+
+
+def differences(every: Sequence[Stage]) -> Iterator[str]:
+    """What changed from one edition to another."""
+    yield "# Differences between editions"
+    yield (
+        "Found by comparing the registries; `fishplate about --between` compares any two editions."
+        " *meaning* names fields whose variable has other codes, another range or step: what is"
+        " other about it stands with the variable."
+    )
+    for stage in every:
+        old = neighbour(stage, every)
+        if old is None:
+            continue
+        yield f"## {edition_label(old.book)} to {edition_label(stage.book)}"
+        for heading, found in state_groups(compare(old.book, stage.book)):
+            yield f"### {heading.capitalize()}"
+            yield table(("", "", ""), difference_rows(old.book, stage.book, found))
+
+
+def difference_rows(
+    before: Registry, after: Registry, found: Iterable[Difference]
+) -> Iterator[tuple[str, str, str]]:
+    """One row a difference, the thing named in the first of its rows."""
+    for each in found:
+        what = each.thing
+        name, about = title(what), ""
+        if isinstance(what, v.Variable):
+            name, about = what.name, what.title
+        cell = link(before if each.after is None else after, escape(name), *key(what))
+        for label, text in list(said(each)) or [("", about)]:
+            yield cell, label, escape(text)
+            cell = ""
 
 
 def toctree(names: Iterable[str]) -> str:
@@ -121,34 +188,47 @@ def toctree(names: Iterable[str]) -> str:
 
 
 def variables(book: Registry) -> Iterator[str]:
-    """All variables with their codes and the places that hold them."""
-    places = uses(book)
-    yield f"# Variables (issue {book.issue})"
-    for variable in sorted(book.variables.values(), key=lambda each: each.name):
-        yield f"({target(book, 'variable', variable.name)})="
-        yield f"## {variable.name}"
-        yield f"Clause {variable.clause}: {escape(variable.title)}."
-        yield table(
-            ("bits", "coding", "step", "plain numbers"),
-            [
-                (
-                    str(variable.bits),
-                    CODINGS[variable.coding],
-                    step(variable),
-                    span(*variable.plain) if variable.plain else "",
-                )
-            ],
+    """The variables that this edition has otherwise than the main one, with codes and places."""
+    yield f"# Variables, {edition_label(book)}"
+    every = sorted(book.variables.values(), key=lambda each: each.name)
+    if same := [each.name for each in every if home(book, each.name) is not book]:
+        names = ", ".join(link(book, escape(name), "variable", name) for name in same)
+        yield f"As in {edition_label(MAIN)}: {names}. All others follow."
+    for variable in every:
+        if variable.name not in same:
+            yield f"({target(book, 'variable', variable.name)})="
+            yield f"## {variable.name}"
+            yield from one_variable(book, variable)
+
+
+def home(book: Registry, name: str) -> Registry:
+    """The registry on whose page a variable stands: the main one where both have it alike."""
+    main = MAIN.variables.get(name)
+    variable = book.variables[name]
+    differs = not main or difference(MAIN, main, book, variable) or own_evidence(book, variable)
+    return book if differs else MAIN
+
+
+def one_variable(book: Registry, variable: v.Variable) -> Iterator[str]:
+    """What there is to say of one variable."""
+    yield f"Clause {variable.clause}: {escape(variable.title)}."
+    facts = [counted(variable.bits, "bit"), CODINGS[variable.coding]]
+    if variable.unit:
+        facts.append(f"a step is {step(variable)}")
+    if variable.plain:
+        facts.append(f"plain numbers are {span(*variable.plain)}")
+    yield f"{'; '.join(facts)}."
+    if variable.codes:
+        meanings = (
+            (span(each.first, each.last), KINDS[each.kind], escape(each.label))
+            for each in variable.codes
         )
-        if variable.codes:
-            meanings = (
-                (span(each.first, each.last), KINDS[each.kind], escape(each.label))
-                for each in variable.codes
-            )
-            yield table(("code", "kind", "meaning"), meanings)
-        if variable.formerly:
-            yield f"In earlier issues: {', '.join(map(code, variable.formerly))}."
-        if used := places[variable.name]:
-            yield f"Used in {', '.join(used)}."
+        yield table(("code", "kind", "meaning"), meanings)
+    if variable.formerly:
+        yield f"In earlier issues: {', '.join(map(code, variable.formerly))}."
+    yield from map(evidence, own_evidence(book, variable))
+    if used := users(book, variable):
+        yield f"Used in {', '.join(use(book, each) for each in used)}."
 
 
 def step(variable: v.Variable) -> str:
@@ -163,25 +243,24 @@ def span(first: int, last: int) -> str:
     return str(first) if first == last else f"{first} to {last}"
 
 
-def uses(book: Registry) -> Mapping[str, list[str]]:
-    """Links to headers, packets and messages, by the variable that they hold."""
-    found: dict[str, list[str]] = defaultdict(list)
-    for header in book.headers.values():
-        for name in names(header.nodes):
-            found[name].append(link(book, f"{header.medium} header", "header", header.medium))
-    sent: list[v.Packet | v.RadioMessage] = [*by_number(book.packets), *by_number(book.messages)]
-    for each in sent:
-        kind, direction, number = key(each)
-        for name in dict.fromkeys(names(each.nodes)):
-            text = f"{kind} {number} {direction}"
-            found[name].append(link(book, text, kind, direction, number))
-    return found
+def key(what: Thing) -> tuple[object, ...]:
+    """The parts of the link target of a variable, header, packet or message."""
+    match what:
+        case v.Variable():
+            return "variable", what.name
+        case v.Header():
+            return "header", what.medium
+        case v.Packet():
+            return "packet", what.direction, what.number
+        case v.RadioMessage():
+            return "message", what.direction, what.number
 
 
-def key(what: v.Packet | v.RadioMessage) -> tuple[object, ...]:
-    """The parts of the link target of a packet or message."""
-    kind = "packet" if isinstance(what, v.Packet) else "message"
-    return kind, what.direction, what.number
+def use(book: Registry, what: v.Header | v.Packet | v.RadioMessage) -> str:
+    """A link to a layout that holds a variable."""
+    kind, *rest = key(what)
+    words = [*rest, kind] if isinstance(what, v.Header) else [kind, rest[1], rest[0]]
+    return link(book, " ".join(map(str, words)), *key(what))
 
 
 def by_number(found: Mapping[tuple[str, int], Sent]) -> list[Sent]:
@@ -190,26 +269,9 @@ def by_number(found: Mapping[tuple[str, int], Sent]) -> list[Sent]:
     return sorted(found.values(), key=lambda each: (order.index(each.direction), each.number))
 
 
-def names(nodes: Iterable[v.Node]) -> Iterator[str]:
-    """The variables of a layout in wire order, N_ITER and text lengths included."""
-    for node in nodes:
-        match node:
-            case v.Field(variable=variable):
-                yield variable
-            case v.Series() | v.Repeat():
-                yield v.COUNT
-                yield from names(node.nodes)
-            case v.Group() | v.When():
-                yield from names(node.nodes)
-            case v.Text(length=length, element=element):
-                yield from (length, element)
-            case v.Opaque():
-                pass
-
-
 def telegrams(book: Registry) -> Iterator[str]:
     """The headers of balise telegrams and loop messages."""
-    yield f"# Balise telegrams and loop messages (issue {book.issue})"
+    yield f"# Balise telegrams and loop messages, {edition_label(book)}"
     yield (
         "A header, packets, and packet 255 as the end flag. What follows the end flag is kept as"
         " `filler`. Radio messages have their fixed variables instead of a header."
@@ -217,24 +279,24 @@ def telegrams(book: Registry) -> Iterator[str]:
     for header in book.headers.values():
         yield f"({target(book, 'header', header.medium)})="
         yield f"## Header, {header.medium}"
-        yield f"Clause {header.clause}. {length(book, header.nodes)}"
+        yield f"Clause {header.clause}. {length_text(book, header.nodes)}."
         yield layout(book, header.nodes)
 
 
 def packets(book: Registry, direction: v.Direction) -> Iterator[str]:
     """The packets of one direction."""
-    yield f"# Packets, {WAYS[direction]} (issue {book.issue})"
+    yield f"# Packets, {WAYS[direction]}, {edition_label(book)}"
     yield "What stands after the last field, up to L_PACKET, is kept as `surplus`."
     for packet in by_number(book.packets):
         if packet.direction == direction:
             yield from opening(book, packet)
-            yield length(book, packet.nodes)
+            yield f"{length_text(book, packet.nodes)}."
             yield layout(book, packet.nodes)
 
 
 def messages(book: Registry, direction: v.Direction) -> Iterator[str]:
     """The radio messages of one direction."""
-    yield f"# Radio messages, {WAYS[direction]} (issue {book.issue})"
+    yield f"# Radio messages, {WAYS[direction]}, {edition_label(book)}"
     yield "Fixed variables, then the required packets in this order, then optional packets."
     for message in by_number(book.messages):
         if message.direction == direction:
@@ -251,7 +313,14 @@ def opening(book: Registry, what: v.Packet | v.RadioMessage) -> Iterator[str]:
     yield f"({target(book, *key(what))})="
     yield f"## {kind} {what.number}: {escape(what.name)}"
     way = "Sent by" if what.direction == v.TO_TRAIN else "Sent to"
-    yield f"Clause {what.clause}. {way}: {', '.join(map(escape, what.senders))}."
+    senders = ", ".join(map(escape, what.senders)) or "not said"
+    since = f" From version {what.since} on." if isinstance(what, v.Packet) and what.since else ""
+    yield f"Clause {what.clause}. {way}: {senders}.{since}"
+    other = book.forms.get((what.direction, what.number)) if isinstance(what, v.Packet) else None
+    if other:
+        told = "" if other.only else ", where L\\_PACKET tells so"
+        yield f"Laid out as in version {other.version}{told}."
+    yield from map(evidence, own_evidence(book, what))
 
 
 def attached(book: Registry, message: v.RadioMessage) -> Iterator[str]:
@@ -275,96 +344,23 @@ def attached(book: Registry, message: v.RadioMessage) -> Iterator[str]:
 
 def layout(book: Registry, nodes: Sequence[v.Node]) -> str:
     """A layout as a table in wire order."""
-    return table(("field", "bits", "present when", "title"), rows(book, nodes))
+    found = places(book, nodes)
+    lists = {each.path for each in found if each.repeats in WHAT_REPEATS}
+    head = ("field", "bits", "present when", "title")
+    return table(head, [row(book, each, lists) for each in found])
 
 
-Row = tuple[str, str, str, str]
-
-
-def rows(
-    book: Registry, nodes: Sequence[v.Node], prefix: str = "", when: tuple[str, ...] = ()
-) -> Iterator[Row]:
-    """One row a field, list, text or opaque part; `when` holds the conditions around it."""
-    present = " and ".join(when)
-    for node in nodes:
-        match node:
-            case v.Field():
-                yield field_row(book, prefix + node.name, node.variable, present)
-            case v.Group():
-                yield from rows(book, node.nodes, f"{prefix}{node.name}.", when)
-            case v.Series() | v.Repeat():
-                yield list_row(book, node, prefix, present)
-                yield from rows(book, node.nodes, f"{prefix}{node.name}[].", when)
-            case v.When():
-                yield from rows(book, node.nodes, prefix, (*when, condition(node.condition)))
-            case v.Text():
-                yield field_row(book, prefix + node.length, node.length, present)
-                _, bits, *_ = field_row(book, "", node.element, present)
-                yield (
-                    code(prefix + node.element),
-                    f"{node.length} times {bits}",
-                    present,
-                    "the text",
-                )
-            case v.Opaque():
-                yield (code(prefix + node.name), "rest", present, "bits that no layout explains")
-
-
-def field_row(book: Registry, place: str, name: str, present: str) -> Row:
-    """The row of one variable."""
-    variable = book.variables[name]
-    return (
-        link(book, code(place), "variable", name),
-        str(variable.bits),
-        present,
-        escape(variable.title),
-    )
-
-
-def list_row(book: Registry, node: v.Series | v.Repeat, prefix: str, present: str) -> Row:
-    """The row that says how often the elements of a list stand there."""
-    bits = book.variables[v.COUNT].bits
-    if isinstance(node, v.Series):
-        text = f"list: one element, {v.COUNT} ({bits} bits), then {v.COUNT} further elements"
-    else:
-        text = f"list: {v.COUNT} ({bits} bits), then {v.COUNT} elements"
-    return code(f"{prefix}{node.name}"), "", present, escape(text)
-
-
-def condition(what: v.Condition) -> str:
-    """A condition in words."""
-    match what:
-        case v.Eq(variable=name, code=value):
-            return f"{escape(name)} = {value}"
-        case v.Ne(variable=name, code=value):
-            return f"{escape(name)} ≠ {value}"
-        case v.In(variable=name, codes=values):
-            return f"{escape(name)} = {' or '.join(map(str, values))}"
-
-
-def length(book: Registry, nodes: Sequence[v.Node]) -> str:
-    """The size of a layout in bits, or the least it can have."""
-    bits, fixed = size(book, nodes)
-    return f"{bits} bits." if fixed else f"At least {bits} bits."
-
-
-def size(book: Registry, nodes: Iterable[v.Node]) -> tuple[int, bool]:
-    """Bits that are always there, and whether there can be no more."""
-    total, fixed = 0, True
-    for node in nodes:
-        match node:
-            case v.Field(variable=name):
-                total += book.variables[name].bits
-            case v.Group() | v.Series():
-                inner, inner_fixed = size(book, node.nodes)
-                total += inner
-                fixed = fixed and inner_fixed
-            case v.Text(length=name):
-                total += book.variables[name].bits
-        if isinstance(node, v.Series | v.Repeat):
-            total += book.variables[v.COUNT].bits
-        fixed = fixed and isinstance(node, v.Field | v.Group)
-    return total, fixed
+def row(book: Registry, place: Place, lists: Container[tuple[str, ...]]) -> tuple[str, ...]:
+    """The row of one field, with `[]` behind the lists around it."""
+    path = place.path
+    inside = [f"{each}[]" if path[:n] in lists else each for n, each in enumerate(path[:-1], 1)]
+    name = code(".".join([*inside, path[-1]]))
+    present = escape(" and ".join(map(condition_text, place.when)))
+    if place.repeats == "opaque":
+        return name, "rest", present, "bits that no layout explains"
+    text = WHAT_REPEATS.get(place.repeats, escape(book.variables[place.variable].title))
+    bits = f"{place.bits} each" if place.repeats == "text" else str(place.bits)
+    return link(book, name, "variable", place.variable), bits, present, text
 
 
 def link(book: Registry, text: str, *parts: object) -> str:
@@ -373,8 +369,9 @@ def link(book: Registry, text: str, *parts: object) -> str:
 
 
 def target(book: Registry, *parts: object) -> str:
-    """A link target that is unique over all issues."""
-    return "-".join(map(str, (book.issue, *parts))).lower()
+    """A link target that is unique over all editions."""
+    owner = home(book, str(parts[1])) if parts[0] == "variable" else book
+    return "-".join(map(str, (folder(owner), *parts))).lower()
 
 
 def table(head: Sequence[str], body: Iterable[Sequence[str]]) -> str:

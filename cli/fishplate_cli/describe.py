@@ -6,6 +6,7 @@ from textwrap import wrap
 from types import MappingProxyType
 from typing import TYPE_CHECKING
 
+from fishplate.standard.history import evidence_for, history, own_evidence, stages
 from fishplate.standard.vocabulary import (
     COUNT,
     SCALED,
@@ -21,16 +22,17 @@ from fishplate.standard.vocabulary import (
     Variable,
     When,
 )
+from fishplate_cli.compare import aligned, evidence_text, said, title
 from fishplate_cli.console import counted
-from fishplate_cli.lookup import carriers, condition_text, users
+from fishplate_cli.lookup import carriers, condition_text, stage_label, users
 
 if TYPE_CHECKING:
     from collections.abc import Iterable, Iterator, Sequence
 
     from fishplate.standard import Registry
+    from fishplate.standard.history import Form, History
     from fishplate.standard.vocabulary import Codes, Node
-    from fishplate_cli.console import counted
-from fishplate_cli.lookup import Found
+    from fishplate_cli.lookup import Found
 
 GAP = "  "
 BITS = 6
@@ -59,7 +61,11 @@ class Description:
         self.width = width
 
     def lines(self, found: Found) -> Iterator[str]:
-        """Yield the lines about one thing."""
+        """Yield the lines about one thing, and about its forms in other editions."""
+        yield from self._here(found)
+        yield from self._history(history(found, stages()))
+
+    def _here(self, found: Found) -> Iterator[str]:
         match found:
             case Variable():
                 yield from self._variable(found)
@@ -68,14 +74,51 @@ class Description:
             case RadioMessage():
                 yield from self._message(found)
             case Header():
-                yield f"header of a {found.medium} {_unit(found)}"
+                yield title(found)
                 yield from self._fact("clause", found.clause)
                 yield from self._fact("length", counted(found.bits, "bit"))
+                yield from self._evidence(found)
                 yield from self._layout(found.nodes)
 
     def _fact(self, name: str, text: str) -> Iterator[str]:
         start = f"{GAP}{name:<10}{GAP}"
         yield from wrap(text, self.width, initial_indent=start, subsequent_indent=" " * len(start))
+
+    def _evidence(self, found: Found) -> Iterator[str]:
+        for each in evidence_for(self.book, found):
+            yield from self._fact("evidence", evidence_text(each))
+
+    def _history(self, past: History) -> Iterator[str]:
+        if len(past.forms) == 1 and not past.absent:
+            yield from self._fact("history", "the same in every edition")
+            return
+        yield f"{GAP}history"
+        for form in past.forms:
+            editions = ", ".join(stage_label(each, form.thing) for each in form.stages)
+            heading = (
+                editions
+                if form.against is None
+                else f"{editions}, against {stage_label(form.against)}"
+            )
+            yield from wrap(
+                f"{heading}:", self.width, initial_indent=GAP * 2, subsequent_indent=GAP * 4
+            )
+            yield from aligned(self._form(form), self.width, 3 * len(GAP))
+        if past.absent:
+            text = f"not in {', '.join(map(stage_label, past.absent))}"
+            yield from wrap(text, self.width, initial_indent=GAP * 2, subsequent_indent=GAP * 4)
+
+    def _form(self, form: Form) -> Iterator[tuple[str, str]]:
+        if form.difference is None:
+            yield "is", f"{title(form.thing)} ({form.thing.clause})"
+        else:
+            yield from said(form.difference)
+        for stage, packet in form.beside:
+            yield "beside", f"packet {packet.number} in {stage_label(stage, packet)}"
+        for stage in form.stages:
+            if stage.book.layouts != self.book.layouts:
+                for each in own_evidence(stage.book, form.thing):
+                    yield "evidence", f"{' and '.join(stage.versions)}: {evidence_text(each)}"
 
     def _variable(self, variable: Variable) -> Iterator[str]:
         yield from wrap(f"{variable.name}: {variable.title}", self.width, subsequent_indent=GAP)
@@ -92,10 +135,11 @@ class Description:
             yield from self._fact("numbers", f"codes {variable.plain[0]} to {variable.plain[1]}")
         if variable.formerly:
             yield from self._fact("formerly", ", ".join(variable.formerly))
+        yield from self._evidence(variable)
         if variable.codes:
             yield f"{GAP}codes"
             yield from self._codes(variable.codes)
-        used = [_title(each) for each in users(self.book, variable)]
+        used = [title(each) for each in users(self.book, variable)]
         if used:
             yield f"{GAP}stands in"
             yield from self._list(used)
@@ -115,25 +159,35 @@ class Description:
             yield from wrap(text, self.width, initial_indent=GAP * 2, subsequent_indent=GAP * 4)
 
     def _packet(self, packet: Packet) -> Iterator[str]:
-        yield from wrap(_title(packet), self.width, subsequent_indent=GAP)
+        yield from wrap(title(packet), self.width, subsequent_indent=GAP)
         yield from self._fact("clause", packet.clause)
         word = "sent by" if packet.direction == "to-train" else "sent to"
         yield from self._fact(word, ", ".join(packet.senders))
-        yield from self._fact("length", _length(self.book, packet.nodes))
+        if packet.since:
+            yield from self._fact("versions", f"from version {packet.since} on")
+        other = self.book.forms.get((packet.direction, packet.number))
+        if other:
+            text = f"laid out as in {other.version}"
+            if not other.only:
+                text = f"may also be {text}: L_PACKET tells which"
+            yield from self._fact("forms", text)
+        yield from self._fact("length", length_text(self.book, packet.nodes))
+        yield from self._evidence(packet)
         yield from self._layout(packet.nodes)
-        carried = [f"{_title(each)} ({how})" for each, how in carriers(self.book, packet)]
+        carried = [f"{title(each)} ({how})" for each, how in carriers(self.book, packet)]
         if carried:
             yield f"{GAP}carried by"
             yield from self._list(carried)
 
     def _message(self, message: RadioMessage) -> Iterator[str]:
-        yield from wrap(_title(message), self.width, subsequent_indent=GAP)
+        yield from wrap(title(message), self.width, subsequent_indent=GAP)
         yield from self._fact("clause", message.clause)
         word = "sent by" if message.direction == "to-train" else "sent to"
         yield from self._fact(word, ", ".join(message.senders))
         if message.version_invariant:
             yield from self._fact("versions", "the same in every system version")
-        yield from self._fact("length", f"{_length(self.book, message.nodes)}, then packets")
+        yield from self._fact("length", f"{length_text(self.book, message.nodes)}, then packets")
+        yield from self._evidence(message)
         yield from self._layout(message.nodes)
         if message.required.packets:
             yield f"{GAP}required packets, in this order"
@@ -201,20 +255,8 @@ class Description:
         )
 
 
-def _unit(header: Header) -> str:
-    return "telegram" if header.medium == "balise" else "message"
-
-
-def _title(found: Packet | RadioMessage | Header) -> str:
-    match found:
-        case Packet():
-            return f"packet {found.number} {found.direction}, {found.name}"
-        case RadioMessage():
-            return f"message {found.number} {found.direction}, {found.name}"
-    return f"header of a {found.medium} {_unit(found)}"
-
-
-def _length(book: Registry, nodes: Sequence[Node]) -> str:
+def length_text(book: Registry, nodes: Sequence[Node]) -> str:
+    """Say how long a layout is in bits, or at least is."""
     bits, fixed = _size(book, nodes)
     return counted(bits, "bit") if fixed else f"{bits} bits or more"
 

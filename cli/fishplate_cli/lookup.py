@@ -4,8 +4,12 @@ from __future__ import annotations
 
 import re
 from difflib import get_close_matches
-from typing import TYPE_CHECKING
+from types import MappingProxyType
+from typing import TYPE_CHECKING, NamedTuple
 
+from fishplate.standard.comparison import counterparts
+from fishplate.standard.editions import EDITIONS, version_key
+from fishplate.standard.history import stages
 from fishplate.standard.vocabulary import (
     COUNT,
     Eq,
@@ -28,6 +32,7 @@ if TYPE_CHECKING:
     from collections.abc import Iterator, Sequence
 
     from fishplate.standard import Registry
+    from fishplate.standard.history import Stage
     from fishplate.standard.vocabulary import Condition, Node
 
 Found = Variable | Packet | RadioMessage | Header
@@ -35,6 +40,9 @@ Found = Variable | Packet | RadioMessage | Header
 KINDS = ("packet", "message", "header", "variable")
 WAYS = ("to-train", "to-track")
 HEADER_WORDS = {"balise": "balise", "telegram": "balise", "loop": "loop"}
+KINDS_OF_EVIDENCE = MappingProxyType(
+    {"weaker": "weaker evidence", "inferred": "inferred", "memory": "from memory"}
+)
 CLOSE = 5
 MOST = 8
 
@@ -42,9 +50,69 @@ MOST = 8
 class NotFoundError(Exception):
     """Nothing bears that name; `close` lists names that look like it."""
 
-    def __init__(self, words: str, close: Sequence[str]) -> None:
+    def __init__(self, words: str, close: Sequence[str], where: str = "") -> None:
         hint = f"; close to it: {', '.join(close)}" if close else ""
-        super().__init__(f"nothing is called {words!r}{hint}")
+        super().__init__(f"nothing is called {words!r}{where}{hint}")
+
+
+class Answer(NamedTuple):
+    """What was found, in which registry, and a sentence on why that is not the one asked."""
+
+    book: Registry
+    found: list[Found]
+    note: str = ""
+
+
+def find(book: Registry, words: Sequence[str], *, only_here: bool) -> Answer:
+    """Look in one registry, and then in the others; raises `NotFoundError`.
+
+    With `only_here`, what only another one knows is followed back to this one.
+    """
+    try:
+        return Answer(book, look_up(book, words))
+    except NotFoundError as error:
+        others = [(stage, there) for stage in _by_preference() if (there := _there(stage, words))]
+        if not others:
+            raise
+        asked = " ".join(words)
+        if not only_here:
+            stage, there = others[0]
+            where = stage_label(stage, there[0])
+            return Answer(
+                stage.book, there, f"{asked!r} is not in {book.version}; found in {where}"
+            )
+        for stage, there in others:
+            here = [same[0] for each in there if (same := counterparts(each, book))]
+            if here:
+                where = stage_label(stage, there[0])
+                note = f"{asked!r} is of {where}; in {book.version} this carries it"
+                return Answer(book, list(dict.fromkeys(here)), note)
+        places = ", ".join(stage_label(each, found[0]) for each, found in others)
+        where = f" in {book.version} (issue {book.issue}), only in {places}"
+        raise NotFoundError(asked, (), where) from error
+
+
+def _by_preference() -> list[Stage]:
+    """Return the layouts in the order in which versions are tried where nothing says which."""
+    order = [each.layouts for each in EDITIONS]
+    return sorted(stages(), key=lambda each: order.index(each.book.layouts))
+
+
+def _there(stage: Stage, words: Sequence[str]) -> list[Found]:
+    try:
+        return look_up(stage.book, words)
+    except NotFoundError:
+        return []
+
+
+def stage_label(stage: Stage, thing: Found | None = None) -> str:
+    """Name the versions of a stage (of these, the ones that may use a thing) and its issue."""
+    since = thing.since if isinstance(thing, Packet) else ""
+    versions = [
+        each for each in stage.versions if not since or version_key(each) >= version_key(since)
+    ]
+    kinds = [KINDS_OF_EVIDENCE[each.kind] for each in stage.book.evidence_of()]
+    return f"{' and '.join(versions)} ({', '.join([f'issue {stage.book.issue}', *kinds])})"
 
 
 def look_up(book: Registry, words: Sequence[str]) -> list[Found]:
@@ -89,7 +157,7 @@ def _named(book: Registry, words: str) -> list[Found]:
     upper = words.upper().replace(" ", "_")
     if upper in book.variables:
         return [book.variables[upper]]
-    renamed = [each for each in book.variables.values() if upper in each.formerly]
+    renamed = [each for each in book.variables.values() if upper in (*each.formerly, each.lineage)]
     if renamed:
         return list(renamed)
     if words.lower() in ("header", "headers"):

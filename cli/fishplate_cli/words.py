@@ -12,6 +12,7 @@ EXAMPLES = {
   fishplate decode capture.jsonl
   fishplate decode --medium radio --direction to-track 9306400133260008E0E4...
   fishplate decode --as jsonl capture.csv > trees.jsonl
+  fishplate decode --version 1.0 --issue 2.3.0 frames.txt
   cat frames.txt | fishplate decode -""",
     "encode": """\
   fishplate encode telegram.yaml
@@ -24,11 +25,17 @@ EXAMPLES = {
     "list": """\
   fishplate list capture.jsonl
   fishplate list line.csv run.jsonl | grep '!!'""",
+    "translate": """\
+  fishplate translate --to 2.1 capture.jsonl
+  fishplate translate --to 1.0 --as capture run.jsonl > run-1.0.jsonl
+  fishplate translate --to 2.1 --stored values.yaml --version 1.0 frames.txt""",
     "about": """\
   fishplate about L_ENDSECTION
   fishplate about packet 15
   fishplate about 44 to-track
   fishplate about movement authority
+  fishplate about --version 1.1 packet 203
+  fishplate about --between 2.0 2.1
   fishplate about message 3 --schema > message-3.schema.json""",
 }
 
@@ -37,7 +44,8 @@ SHORT = {
     "encode": "Write trees of codes or meanings as frames.",
     "fields": "List every field with its place, code and meaning.",
     "list": "List frames, one line each.",
-    "about": "Look up a variable, packet or message.",
+    "translate": "Translate frames into another system version.",
+    "about": "Look up a variable, packet or message, and what versions have otherwise.",
 }
 
 OVERVIEW = """\

@@ -55,7 +55,7 @@ def broken() -> str:
     return (
         line("01", data=data[:-8], bits=4 * len(data[:-8]), note="cut in packet 21")
         + line("01", data=data + "ABCD", bits=4 * len(data) + 16, note="two bytes too many")
-        + line("01", data="26" + data[2:], note="message 38 is not defined")
+        + line("01", data="4D" + data[2:], note="message 77 is not defined")
         + line("02", data="94" + telegram[2:], note="system version code 20")
         + line("02", bits=100, data=telegram[:26], note="cut in packet 41")
         + line("01", data="0307", bits=16, medium=None, note="too little to tell")
@@ -78,6 +78,9 @@ ABOUT = {
     "about-message": ["message", "24"],
     "about-number": ["0"],
     "about-header": ["balise"],
+    "about-elsewhere": ["packet", "203"],
+    "about-inferred": ["packet", "45", "--version", "2.2"],
+    "about-between": ["--between", "2.0", "2.1"],
 }
 
 
