@@ -165,15 +165,16 @@ def _overlap(one: Codes, other: Codes) -> bool:
 
 
 def _with_nodes(item: Any, names: Mapping[str, str]) -> Any:
-    nodes = _renamed(item.nodes, names)
+    nodes = renamed_nodes(item.nodes, names)
     return item if nodes == item.nodes else replace(item, nodes=nodes)
 
 
 def _renamed_header(header: Header, names: Mapping[str, str]) -> Header:
-    return replace(header, nodes=_renamed(header.nodes, names))
+    return replace(header, nodes=renamed_nodes(header.nodes, names))
 
 
-def _renamed(nodes: tuple[Node, ...], names: Mapping[str, str]) -> tuple[Node, ...]:
+def renamed_nodes(nodes: tuple[Node, ...], names: Mapping[str, str]) -> tuple[Node, ...]:
+    """Return a layout with other names for some of its variables."""
     return tuple(_renamed_node(each, names) for each in nodes)
 
 
@@ -182,11 +183,11 @@ def _renamed_node(node: Node, names: Mapping[str, str]) -> Node:
         case Field():
             return replace(node, variable=names.get(node.variable, node.variable))
         case Group() | Series() | Repeat():
-            return replace(node, nodes=_renamed(node.nodes, names))
+            return replace(node, nodes=renamed_nodes(node.nodes, names))
         case When():
             condition: Condition = node.condition
             variable = names.get(condition.variable, condition.variable)
-            return When(replace(condition, variable=variable), _renamed(node.nodes, names))
+            return When(replace(condition, variable=variable), renamed_nodes(node.nodes, names))
         case Text():
             return Text(names.get(node.length, node.length), names.get(node.element, node.element))
         case Opaque():

@@ -13,12 +13,10 @@ if TYPE_CHECKING:
 
     from fishplate.standard.vocabulary import Direction
 
-COMMON: tuple[Optional, ...] = tuple(
-    map(
-        Optional,
-        (3, 5, 39, 51, 41, 42, 44, 45, 57, 58, 65, 66, 68, 70, 71, 72, 76, 79, 131, 138, 139, 140),
-    )
-)
+COMMON_NUMBERS = (
+    3, 5, 39, 51, 41, 42, 44, 45, 57, 58, 65, 66, 68, 70, 71, 72, 76, 79, 131, 138, 139, 140,
+)  # fmt: skip
+COMMON: tuple[Optional, ...] = tuple(map(Optional, COMMON_NUMBERS))
 
 MESSAGES: tuple[RadioMessage, ...] = (
     RadioMessage(

@@ -113,6 +113,21 @@ CONVERSION_MODEL: tuple[Node, ...] = (
     ),
 )
 
+CONDITIONS: tuple[Node, ...] = (
+    *SCALED_HEAD,
+    Field("Q_TRACKINIT"),
+    When(Eq("Q_TRACKINIT", 1), (Field("D_TRACKINIT"),)),
+    When(
+        Eq("Q_TRACKINIT", 0),
+        (
+            Series(
+                "conditions",
+                (Field("D_TRACKCOND"), Field("L_TRACKCOND"), Field("M_TRACKCOND")),
+            ),
+        ),
+    ),
+)
+
 TRACTION_CHANGE: tuple[Node, ...] = (
     *SCALED_HEAD,
     Field("D_TRACTION"),
@@ -565,20 +580,7 @@ PACKETS: tuple[Packet, ...] = (
         "7.4.2.20",
         "Track Condition",
         ("Any",),
-        nodes=(
-            *SCALED_HEAD,
-            Field("Q_TRACKINIT"),
-            When(Eq("Q_TRACKINIT", 1), (Field("D_TRACKINIT"),)),
-            When(
-                Eq("Q_TRACKINIT", 0),
-                (
-                    Series(
-                        "conditions",
-                        (Field("D_TRACKCOND"), Field("L_TRACKCOND"), Field("M_TRACKCOND")),
-                    ),
-                ),
-            ),
-        ),
+        nodes=CONDITIONS,
     ),
     Packet(
         69,

@@ -21,44 +21,11 @@ if TYPE_CHECKING:
 
     from fishplate.standard.vocabulary import Direction
 
-COMMON: tuple[Optional, ...] = tuple(
-    map(
-        Optional,
-        (
-            3,
-            5,
-            31,
-            32,
-            39,
-            40,
-            51,
-            41,
-            42,
-            44,
-            45,
-            52,
-            57,
-            58,
-            64,
-            65,
-            66,
-            67,
-            68,
-            69,
-            70,
-            71,
-            73,
-            74,
-            79,
-            88,
-            131,
-            138,
-            139,
-            140,
-            180,
-        ),
-    )
-)
+COMMON_NUMBERS = (
+    3, 5, 31, 32, 39, 40, 51, 41, 42, 44, 45, 52, 57, 58, 64, 65, 66, 67, 68, 69, 70, 71, 73,
+    74, 79, 88, 131, 138, 139, 140, 180,
+)  # fmt: skip
+COMMON: tuple[Optional, ...] = tuple(map(Optional, COMMON_NUMBERS))
 
 MESSAGES: tuple[RadioMessage, ...] = (
     RadioMessage(

@@ -5,8 +5,14 @@ from __future__ import annotations
 from types import MappingProxyType
 from typing import TYPE_CHECKING, Any
 
+from fishplate.standard.compose import renamed_nodes
 from fishplate.standard.v3_6_0.to_track import HEAD as TO_TRACK_HEAD
-from fishplate.standard.v3_6_0.to_train import DISPLAY_AND_CONFIRMATION, HEAD, SCALED_HEAD
+from fishplate.standard.v3_6_0.to_train import (
+    DISPLAY_AND_CONFIRMATION,
+    HEAD,
+    SCALED_HEAD,
+    SUITABILITIES,
+)
 from fishplate.standard.vocabulary import (
     TO_TRACK,
     TO_TRAIN,
@@ -16,7 +22,6 @@ from fishplate.standard.vocabulary import (
     Ne,
     Packet,
     Repeat,
-    Series,
     Text,
     When,
 )
@@ -67,32 +72,7 @@ PACKETS: tuple[Packet, ...] = (
         "7.4.2.21",
         "Route Suitability Data",
         ("Any",),
-        nodes=(
-            *SCALED_HEAD,
-            Field("Q_TRACKINIT"),
-            When(Eq("Q_TRACKINIT", 1), (Field("D_TRACKINIT"),)),
-            When(
-                Eq("Q_TRACKINIT", 0),
-                (
-                    Series(
-                        "suitabilities",
-                        (
-                            Field("D_SUITABILITY"),
-                            Field("Q_SUITABILITY"),
-                            When(Eq("Q_SUITABILITY", 0), (Field("M_LINEGAUGE"),)),
-                            When(Eq("Q_SUITABILITY", 1), (Field("M_LINEAXLELOADCAT"),)),
-                            When(
-                                Eq("Q_SUITABILITY", 2),
-                                (
-                                    Field("M_VOLTAGE"),
-                                    When(Ne("M_VOLTAGE", 0), (Field("NID_CTRACTION"),)),
-                                ),
-                            ),
-                        ),
-                    ),
-                ),
-            ),
-        ),
+        nodes=renamed_nodes(SUITABILITIES, {"M_AXLELOADCAT": "M_LINEAXLELOADCAT"}),
     ),
     Packet(
         73,

@@ -8,8 +8,10 @@ from __future__ import annotations
 from types import MappingProxyType
 from typing import TYPE_CHECKING, Any
 
+from fishplate.standard.compose import renamed_nodes
 from fishplate.standard.v3_6_0.to_track import HEAD as TO_TRACK_HEAD
 from fishplate.standard.v3_6_0.to_train import (
+    CONDITIONS,
     CONVERSION_MODEL,
     HEAD,
     SCALED_HEAD,
@@ -243,20 +245,7 @@ PACKETS: tuple[Packet, ...] = (
         "6.5.1.5.23",
         "Track Condition",
         ("Any",),
-        nodes=(
-            *SCALED_HEAD,
-            Field("Q_TRACKINIT"),
-            When(Eq("Q_TRACKINIT", 1), (Field("D_TRACKINIT"),)),
-            When(
-                Eq("Q_TRACKINIT", 0),
-                (
-                    Series(
-                        "conditions",
-                        (Field("D_TRACKCOND"), Field("L_TRACKCOND"), Field("M_TRACKCONDBC")),
-                    ),
-                ),
-            ),
-        ),
+        nodes=renamed_nodes(CONDITIONS, {"M_TRACKCOND": "M_TRACKCONDBC"}),
         lineage=68,
         since="1.1",
     ),
