@@ -22,7 +22,7 @@ from fishplate_cli.words import CAUTION, EXAMPLES, OVERVIEW, SHORT
 if TYPE_CHECKING:
     from collections.abc import Iterator
 
-COMMANDS = ("decode", "encode", "fields", "list", "about")
+COMMANDS = ("decode", "encode", "fields", "list", "translate", "about")
 MODULES = {"list": "listing"}
 """Where a command is defined, when the module does not bear its name."""
 

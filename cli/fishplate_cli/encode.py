@@ -16,7 +16,7 @@ from fishplate.captures import Frame, capture_line, measures_itself
 from fishplate.errors import EncodeError
 from fishplate.frames import decode
 from fishplate.standard.vocabulary import DIRECTIONS
-from fishplate.trees import NumberText, split_context
+from fishplate.trees import NumberText, is_left_out, split_context
 from fishplate.versions import DEFAULT_VERSION, NAME
 from fishplate_cli.authored import TreeForm, is_typed, read_trees
 from fishplate_cli.console import Complaints, shortened, visible, write
@@ -140,6 +140,8 @@ def _frames(
             try:
                 if authored.problem:
                     raise authored.problem
+                if is_left_out(authored.tree):
+                    continue
                 yield _encoded(authored.tree, place, length=length, force=force)
             except EncodeError as error:
                 for each in (error, *error.others):

@@ -66,4 +66,4 @@ Exit codes:
   0  done
   1  kept for findings
   2  wrong usage
-  3  some input could not be read, or not be encoded; the rest was"""
+  3  some input could not be read, encoded or translated; the rest was"""

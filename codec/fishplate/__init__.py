@@ -22,6 +22,7 @@ if TYPE_CHECKING:
     )
     from fishplate.frames import FieldRow, Message, Problem, decode, walk
     from fishplate.standard import Registry, registry
+    from fishplate.translation import Change, Translation, translate
 
 __version__ = "0.1.0"
 
@@ -35,6 +36,9 @@ _HOMES = {
     "Problem": "fishplate.frames",
     "decode": "fishplate.frames",
     "walk": "fishplate.frames",
+    "Change": "fishplate.translation",
+    "Translation": "fishplate.translation",
+    "translate": "fishplate.translation",
     "Registry": "fishplate.standard",
     "registry": "fishplate.standard",
     "Ambiguous": "fishplate.errors",
@@ -50,6 +54,7 @@ _HOMES = {
 
 __all__ = [
     "Ambiguous",
+    "Change",
     "DecodeError",
     "EncodeError",
     "FieldRow",
@@ -60,6 +65,7 @@ __all__ = [
     "Problem",
     "Registry",
     "RegistryError",
+    "Translation",
     "Truncated",
     "Unknown",
     "decode",
@@ -67,6 +73,7 @@ __all__ = [
     "encode",
     "read_capture",
     "registry",
+    "translate",
     "walk",
 ]
 

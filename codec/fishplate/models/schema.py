@@ -59,6 +59,7 @@ BESIDE: Schema = {
     "given": {"type": "object"},
     "assumed": {"type": "array"},
     "source": {"type": "string"},
+    "changes": {"type": "array"},
 }
 """What is known about a frame and may stand beside its tree."""
 

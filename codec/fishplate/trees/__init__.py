@@ -18,7 +18,7 @@ if TYPE_CHECKING:
 
     from fishplate.errors import Path
 
-CONTEXT = ("time", "note", "bits", "frame", "given", "assumed", "source")
+CONTEXT = ("time", "note", "bits", "frame", "given", "assumed", "source", "changes")
 """Keys that may stand beside those of a tree: what is known about the frame, not its content."""
 
 TREE_KEYS = frozenset({"medium", "header", "packets", "content"})
@@ -57,6 +57,11 @@ def split_context(tree: dict[str, Any]) -> tuple[dict[str, Any], dict[str, Any]]
     """Return what a tree says of its content, and what stands beside it."""
     beside = {key: tree[key] for key in CONTEXT if key in tree}
     return {key: value for key, value in tree.items() if key not in beside}, beside
+
+
+def is_left_out(tree: dict[str, Any]) -> bool:
+    """Tell whether a tree only says why translating left nothing of a frame."""
+    return "changes" in tree and not tree.keys() & TREE_KEYS
 
 
 def parse_json(text: str) -> Any:
@@ -116,7 +121,8 @@ def read_yaml(text: str) -> Iterator[Authored]:
 
 def _checked(authored: Authored) -> Authored:
     if isinstance(authored.tree, dict):
-        found = _truth_in(authored.tree, ())
+        # What a translation says of itself stands beside the tree and is not read.
+        found = _truth_in({**authored.tree, "changes": None}, ())
         if found is None:
             return authored
         reason = "true and false are no codes: write the code, or a label in quotes"
