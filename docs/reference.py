@@ -20,7 +20,8 @@ from fishplate.standard.history import Stage, neighbour, own_evidence, stages
 from fishplate_cli.compare import edition_label, said, state_groups, title
 from fishplate_cli.console import counted
 from fishplate_cli.describe import CODINGS, length_text
-from fishplate_cli.lookup import KINDS_OF_EVIDENCE, condition_text, users
+from fishplate_cli.lookup import condition_text, users
+from fishplate_cli.wording import EVIDENCE
 
 if TYPE_CHECKING:
     from collections.abc import Container, Iterable, Iterator, Mapping, Sequence
@@ -124,7 +125,7 @@ def index(every: Sequence[Stage]) -> Iterator[str]:
 
 def evidence(what: v.Evidence) -> str:
     """On what something rests."""
-    return f"**{KINDS_OF_EVIDENCE[what.kind]}**: {escape(what.note)}"
+    return f"**{EVIDENCE[what.kind]}**: {escape(what.note)}"
 
 
 def edition_index(stage: Stage) -> Iterator[str]:

@@ -18,7 +18,8 @@ from fishplate.standard.vocabulary import (
     Variable,
 )
 from fishplate_cli.console import counted
-from fishplate_cli.lookup import KINDS_OF_EVIDENCE, condition_text
+from fishplate_cli.lookup import condition_text
+from fishplate_cli.wording import EVIDENCE
 
 if TYPE_CHECKING:
     from collections.abc import Iterable, Iterator, Sequence
@@ -67,7 +68,7 @@ def edition_label(book: Registry) -> str:
 def evidence_text(evidence: Evidence) -> str:
     """Say on what something rests."""
     subject = f"{evidence.subject[1]}: " if evidence.subject[:1] == ("variable",) else ""
-    return f"{subject}{evidence.note} ({KINDS_OF_EVIDENCE[evidence.kind]})"
+    return f"{subject}{evidence.note} ({EVIDENCE[evidence.kind]})"
 
 
 def said(difference: Difference) -> Iterator[Line]:

@@ -15,7 +15,7 @@ import typer
 
 from fishplate.captures import CaptureDecoder, Frame, form_by_name, read_literal, read_stream
 from fishplate.errors import DecodeError, FishplateError
-from fishplate.standard.editions import EDITIONS
+from fishplate.standard.editions import known_issues
 from fishplate_cli.console import Complaints, Progress, shortened, visible
 
 if TYPE_CHECKING:
@@ -68,9 +68,8 @@ def _version(value: str | None) -> str | None:
 
 
 def _issue(value: str | None) -> str | None:
-    issues = sorted({each.issue for each in EDITIONS})
-    if value is not None and value not in issues:
-        raise typer.BadParameter(f"{value!r} is none of {', '.join(issues)}")
+    if value is not None and value not in known_issues():
+        raise typer.BadParameter(f"{value!r} is none of {', '.join(known_issues())}")
     return value
 
 

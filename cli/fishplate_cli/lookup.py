@@ -4,7 +4,6 @@ from __future__ import annotations
 
 import re
 from difflib import get_close_matches
-from types import MappingProxyType
 from typing import TYPE_CHECKING, NamedTuple
 
 from fishplate.standard.comparison import counterparts
@@ -27,6 +26,7 @@ from fishplate.standard.vocabulary import (
     Variable,
     When,
 )
+from fishplate_cli.wording import EVIDENCE
 
 if TYPE_CHECKING:
     from collections.abc import Iterator, Sequence
@@ -40,9 +40,6 @@ Found = Variable | Packet | RadioMessage | Header
 KINDS = ("packet", "message", "header", "variable")
 WAYS = ("to-train", "to-track")
 HEADER_WORDS = {"balise": "balise", "telegram": "balise", "loop": "loop"}
-KINDS_OF_EVIDENCE = MappingProxyType(
-    {"weaker": "weaker evidence", "inferred": "inferred", "memory": "from memory"}
-)
 CLOSE = 5
 MOST = 8
 
@@ -111,7 +108,7 @@ def stage_label(stage: Stage, thing: Found | None = None) -> str:
     versions = [
         each for each in stage.versions if not since or version_key(each) >= version_key(since)
     ]
-    kinds = [KINDS_OF_EVIDENCE[each.kind] for each in stage.book.evidence_of()]
+    kinds = [EVIDENCE[each.kind] for each in stage.book.evidence_of()]
     return f"{' and '.join(versions)} ({', '.join([f'issue {stage.book.issue}', *kinds])})"
 
 

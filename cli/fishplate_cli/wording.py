@@ -152,7 +152,12 @@ def _what(message: Message, book: Registry) -> str:
 
 
 def same_in_every_version(message: Message, book: Registry) -> bool:
-    """Tell whether a radio message is laid out the same in every system version."""
+    """Tell whether a radio message is laid out the same in every system version.
+
+    One that only some versions fit is not: number 38 had another meaning before it was taken back.
+    """
+    if message.version_from == "inferred":
+        return False
     found = book.messages.get((message.direction or "", message.header.get("NID_MESSAGE", -1)))
     return found is not None and found.version_invariant
 

@@ -92,8 +92,8 @@ def test_a_later_version_over_radio_is_said() -> None:
 @pytest.mark.parametrize(
     ("version", "reason"),
     [
-        ("2.9", "2.9, is declared not valid"),
-        ("1.2", "1.2, is declared not valid"),
+        ("2.9", "system version 2.9 is declared not valid"),
+        ("1.2", "system version 1.2 is declared not valid"),
         ("4.0", "no layouts for system version 4.0"),
         ("0.9", "no layouts for system version 0.9"),
     ],

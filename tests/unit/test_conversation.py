@@ -146,6 +146,25 @@ def test_a_version_without_layouts_does_not_hide_what_can_be_read() -> None:
     assert found[-1] == ("2.1", "assumed")
 
 
+def test_a_newer_version_is_read_and_said() -> None:
+    """3.1 differs from 3.0 in Y only (issue 4.0.0, 7.5.1.79)."""
+    _, (_, message) = fishplate.decode_frames([trackside("3.1"), acknowledged()])
+    assert (message.version, message.version_from, message.issue) == ("3.1", "capture", "4.0.0")
+    assert [each.kind for each in message.problems] == ["newer-version"]
+
+
+def test_the_direction_said_spares_a_second_reading() -> None:
+    """A frame whose line says medium and direction is read in the version heard at once."""
+    known = Frame(
+        acknowledged().data,
+        acknowledged().bits,
+        medium="radio",
+        direction="to-track",
+        source="capture",
+    )
+    assert versions([trackside("1.0"), known])[-1] == ("1.0", "capture")
+
+
 def test_a_cut_message_32_says_nothing() -> None:
     whole = trackside("1.0")
     cut = Frame(whole.data[:8], 64, medium="radio", source="capture")

@@ -57,7 +57,7 @@ FITTING: dict[str, tuple[str, tuple[str, ...]]] = {
     "telephone numbers": (ESTABLISHED, ("2.0", "1.0", "1.1")),
     "a packet of 1.1": (TRACTION, ("1.1",)),
     "FRMCS session": (SESSION, ("3.0", "2.2", "2.3")),
-    "position with 5 bits of M_MODE": (report(position(mode_bits=5)), ("3.0",)),
+    "position with 5 bits of M_MODE": (report(position(mode_bits=5)), ("3.0", "2.2", "2.3")),
 }
 
 

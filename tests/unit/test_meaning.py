@@ -14,9 +14,10 @@ from typing import TYPE_CHECKING
 import pytest
 
 from fishplate.errors import EncodeError
-from fishplate.meaning import explain, parse
+from fishplate.meaning import UNITS, explain, parse
 from fishplate.standard import registry
 from fishplate.standard.vocabulary import SCALED
+from fishplate.standard.vocabulary import UNITS as DECLARED_UNITS
 
 if TYPE_CHECKING:
     from fishplate.standard.vocabulary import Variable
@@ -360,3 +361,18 @@ def test_no_part_of_a_label_is_read_as_a_label(name: str) -> None:
                     continue
                 with pytest.raises(EncodeError):
                     parse(variable, part if variable.coding != "bitset" else [part])
+
+
+def test_every_unit_can_be_written() -> None:
+    """Each unit a variable may be declared in has words that people may write for it."""
+    assert set(UNITS) == DECLARED_UNITS
+
+
+def test_axle_loads_are_written_in_tonnes() -> None:
+    """M_AXLELOAD counts steps of 0.5 t (SUBSET-026 issue 3.6.0, 6.5.1.5.27)."""
+    axle_load = registry("1.0").variables["M_AXLELOAD"]
+    assert parse(axle_load, "20 t") == 40
+    assert parse(axle_load, "22500 kg") == 45
+    assert explain(axle_load, 45).text == "22.5 t"
+    with pytest.raises(EncodeError, match="nearest"):
+        parse(axle_load, "20.2 t")

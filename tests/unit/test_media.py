@@ -292,3 +292,31 @@ def test_neither_witness_speaks() -> None:
     text = balise(TEMPORARY, version=18)
     with pytest.raises(Ambiguous):
         decode(text)
+
+
+def test_both_witnesses_of_a_version_that_is_not_valid() -> None:
+    """1.2 and message 146 begin with the same byte (7.5.1.79, 8.6.7): here both lengths agree.
+
+    L_MESSAGE is 27 bytes, as long as the frame; the bits behind it are ones, so that packets seem
+    to end at once. As message 146 those ones are packets of no known number.
+    """
+    text = field(146, 8) + field(27, 10) + "1" * (27 * 8 - 18)
+    with pytest.raises(Ambiguous, match="as in a telegram, and L_MESSAGE says 216 bits"):
+        decode(text)
+    assert decode(text, medium="balise", strict=False).version == "1.2"
+    assert decode(text, medium="radio", strict=False).header["NID_MESSAGE"] == 146
+
+
+@pytest.mark.parametrize("version", ["0.1", "1.5", "2.7", "4.0"])
+def test_a_version_without_layouts_is_said_before_the_number(version: str) -> None:
+    """Message 131 stands in issue 4.0.0 only: which numbers a version has is not known here."""
+    message = decode(radio(131, "0" * 8), medium="radio", version=version, strict=False)
+    assert [each.kind for each in message.problems] == ["unknown-version"]
+    assert f"system version {version}" in message.problems[0].message
+
+
+def test_a_newer_version_that_the_caller_names_is_said() -> None:
+    """3.1 differs from 3.0 in Y only (issue 4.0.0, 7.5.1.79)."""
+    message = decode(balise(END, version=48), medium="balise", version="3.1", strict=False)
+    assert (message.version, message.issue) == ("3.1", "4.0.0")
+    assert [each.kind for each in message.problems] == ["newer-version"]

@@ -237,3 +237,15 @@ def test_models_are_built_once() -> None:
 )
 def test_mistakes_are_explained(tree: dict[str, Any], path: str, said: str) -> None:
     assert said in errors_of(tree)[path]
+
+
+def test_a_form_that_a_packet_does_not_come_in() -> None:
+    """Packet 45 of 2.2 comes as in 2.1 or as in 3.0 (SUBSET-026 issue 4.0.0, 7.4.2.11.1)."""
+    packet = {"NID_PACKET": 45, "Q_DIR": "nominal", "Q_NETWORKTYPE": "FRMCS", "form": "2.0"}
+    header = {"NID_MESSAGE": 24, "T_TRAIN": 1, "M_ACK": 0, "NID_LRBG": 0}
+    found = errors_of({"version": "2.2", "header": header, "packets": [packet]})
+    assert list(found) == ["packets[0]"]
+    assert "does not come in the form of '2.0'; expected 2.2 or 3.0" in found["packets[0]"]
+    packet = {"NID_PACKET": 45, "Q_DIR": "nominal", "Q_NETWORKTYPE": 9}
+    found = errors_of({"version": "2.2", "header": header, "packets": [packet]})
+    assert list(found) == ["packets[0].Q_NETWORKTYPE"]

@@ -133,8 +133,8 @@ def test_an_issue_that_does_not_print_a_version(version: str, issue: str) -> Non
         fishplate.registry(version, issue)
     assert str(caught.value) == (
         f"no registry for system version {version} as printed in issue {issue}; there is "
-        "2.1 (issue 3.6.0), 2.0 (issue 3.3.0), 1.0 (issue 3.6.0), 1.1 (issue 3.6.0), "
-        "1.0 (issue 2.3.0), 3.0 (issue 4.0.0), 2.2 (issue 4.0.0), 2.3 (issue 4.0.0)"
+        "1.0 (issue 2.3.0), 1.0 (issue 3.6.0), 1.1 (issue 3.6.0), 2.0 (issue 3.3.0), "
+        "2.1 (issue 3.6.0), 2.2 (issue 4.0.0), 2.3 (issue 4.0.0), 3.0 (issue 4.0.0)"
     )
 
 

@@ -99,6 +99,13 @@ class CaptureDecoder:
         medium = frame.medium or self.medium
         if frame.version is not None and medium == "radio":
             return self._read(frame, medium, frame.version)
+        way = frame.direction or self.direction
+        told = self.heard.version(way) if medium == "radio" and way else None
+        if told is not None:
+            message = self._read(frame, medium, told)
+            if not message.problems:
+                message.version_from = "capture"
+                return message
         message = self._read(frame, medium, None)
         if message.medium != "radio":
             return message
@@ -111,7 +118,8 @@ class CaptureDecoder:
             message.version_from = "capture"
             return message
         again = self._read(frame, "radio", told)
-        if again.problems and not message.problems:
+        misfits = any(each.kind != "newer-version" for each in again.problems)
+        if misfits and not message.problems:
             # Of another trackside, or of a session whose beginning is missing.
             return message
         again.version_from = "capture"

@@ -81,6 +81,7 @@ class Module:
             lines.append(f"    {verb}_header={{{media}}},")
         lines += [f"    unmeasured={_unmeasured(registry)},"]
         lines += [f"    forms={_forms(registry)},"]
+        lines.append(f"    since={_since(registry)},")
         evidence = tuple((each.kind, each.note, each.subject) for each in registry.evidence)
         lines += [f"    evidence={evidence!r},", ")", ""]
         return "\n".join(lines)
@@ -175,6 +176,14 @@ def _forms(registry: Registry) -> str:
     for (direction, number), form in registry.forms.items():
         forms[direction][number] = form.version
     return str(forms).replace("'", '"')
+
+
+def _since(registry: Registry) -> str:
+    versions: dict[str, dict[int, str]] = {TO_TRAIN: {}, TO_TRACK: {}}
+    for (direction, number), packet in registry.packets.items():
+        if packet.since:
+            versions[direction][number] = packet.since
+    return str(versions).replace("'", '"')
 
 
 def main(arguments: list[str]) -> int:

@@ -38,9 +38,10 @@ MISFITS = (EncodeError, KeyError, TypeError, ValueError, IndexError, AttributeEr
 class Codec:
     """The generated readers and writers of one issue, by direction and number, or medium.
 
-    `unmeasured` gives the width of the packets that carry no L_PACKET, `forms` the other
-    version that may lay out a packet. `evidence` is that of the registry: kind, note and subject.
-    `version` and `issue` say as which edition the layouts are used.
+    `unmeasured` gives the width of the packets that carry no L_PACKET, `forms` the other version
+    that may lay out a packet, `since` the first version that may use it where not all may.
+    `evidence` is that of the registry: kind, note and subject. `version` and `issue` say as which
+    edition the layouts are used.
     """
 
     layouts: str
@@ -52,6 +53,7 @@ class Codec:
     write_header: Mapping[str, Writer]
     unmeasured: Mapping[str, Mapping[int, int]]
     forms: Mapping[str, Mapping[int, str]]
+    since: Mapping[str, Mapping[int, str]]
     evidence: tuple[tuple[str, str, tuple[str | int, ...]], ...]
     version: str = ""
     issue: str = ""

@@ -27,7 +27,7 @@ from fishplate.frames.sizes import (
     MESSAGE_START,
     SHORTEST_PACKET,
 )
-from fishplate.standard.editions import EDITIONS, first_version
+from fishplate.standard.editions import first_version, known_issues
 from fishplate.standard.vocabulary import DIRECTIONS, MEDIA, TO_TRACK, TO_TRAIN
 from fishplate.versions import (
     DEFAULT_VERSION,
@@ -46,6 +46,15 @@ if TYPE_CHECKING:
 
 Said = tuple[str | None, str | None]
 """The system version and the issue that the caller asks for."""
+
+NEITHER = (
+    "no telegram that reaches its end flag, and no radio message, since no L_MESSAGE says "
+    "{size} bits"
+)
+BOTH = (
+    "packets reach an end flag as in a telegram, and L_MESSAGE says {size} bits as in a radio "
+    "message"
+)
 
 NOTHING_SAID = (None, None, None, None)
 
@@ -79,12 +88,12 @@ def decode(
         message = None
         if issue in (None, quick.USUAL.issue):
             message = quick.read_radio(n, size, direction)
-        message = message or infer_version(n, size, direction, issue)
+        message = message or infer_version(n, size, direction, issue, careful=_radio)
         if message is not None:
             return message
     found = medium or _radio_or_telegram(n, size, direction, said)
     if found is None:
-        return _ambiguous(n, size, strict=strict)
+        return _ambiguous(n, size, _why_ambiguous(n, size), strict=strict)
     if found == "radio":
         return _radio(n, size, direction, said, strict=strict)
     if medium is None:
@@ -100,9 +109,8 @@ def _check_said(medium: object, direction: object, version: object, issue: objec
         raise ValueError(f"direction is {TO_TRAIN} or {TO_TRACK}, not {direction!r}")
     if version is not None and not (isinstance(version, str) and NAME.fullmatch(version)):
         raise ValueError(f"version is written as '2.1', not {version!r}")
-    issues = list(dict.fromkeys(each.issue for each in EDITIONS))
-    if issue is not None and issue not in issues:
-        raise ValueError(f"issue is one of {', '.join(issues)}, not {issue!r}")
+    if issue is not None and issue not in known_issues():
+        raise ValueError(f"issue is one of {', '.join(known_issues())}, not {issue!r}")
 
 
 def _radio_or_telegram(n: int, size: int, direction: str | None, said: Said) -> str | None:
@@ -136,7 +144,7 @@ def _if_it_ends(n: int, size: int, medium: str, said: Said, *, strict: bool) -> 
     """Read a telegram on trial: only its end flag proves that it is one."""
     trial = _telegram(n, size, medium, said, strict=False)
     if trial.filler is None and not _cannot_be_read_but_ends(trial, n):
-        return _ambiguous(n, size, strict=strict)
+        return _ambiguous(n, size, NEITHER, strict=strict)
     if strict and trial.problems:
         raise trial.problems[0].error
     return trial
@@ -161,13 +169,19 @@ def _hops_to_the_end(n: int, left: int) -> bool:
     return left >= SHORTEST_PACKET and n >> left - 8 & 255 == END_FLAG
 
 
-def _ambiguous(n: int, size: int, *, strict: bool) -> Message:
+def _why_ambiguous(n: int, size: int) -> str:
+    """Say why neither or both media are meant."""
+    if size >= MESSAGE_START and (n >> size - MESSAGE_START & 1023) << 3 == size:
+        return BOTH
+    return NEITHER
+
+
+def _ambiguous(n: int, size: int, reason: str, *, strict: bool) -> Message:
     message = Message(None, None, size)
     reader = FrameReader(message, codec(DEFAULT_VERSION), n, strict=strict)
     reader.trouble(
         Ambiguous(
-            "the bits do not say what they are: no telegram that reaches its end flag, and no "
-            f"radio message, since no L_MESSAGE says {size} bits; give the medium",
+            f"the bits do not say what they are: {reason.format(size=size)}; give the medium",
             bit=0,
         )
     )
@@ -189,7 +203,7 @@ def _telegram(n: int, size: int, medium: str, said: Said, *, strict: bool) -> Me
         return message
     if version is None:
         layouts = _layouts(message, version_text(message.header["M_VERSION"]), issue)
-        _say_if_newer(reader, ("header", "M_VERSION"), bit=1)
+    _say_if_newer(reader, ("header", "M_VERSION"), bit=1)
     message.version_from = "caller" if version else "frame"
     if layouts is None:
         reader.trouble(_unknown_version(message, bit=1))
@@ -252,10 +266,10 @@ def _radio_misfit(reader: FrameReader, number: int, promised: int) -> Message:
         extra = min(size - promised, size - MESSAGE_START)
         message.surplus = reader.surplus(extra)
     read = reader.codec.read_message[direction].get(number)
-    if read is None:
-        reader.trouble(_unknown_message(number, direction))
-    elif not closest_layouts(message.version):
+    if message.layouts is None:
         reader.trouble(_unknown_version(message, bit=0))
+    elif read is None:
+        reader.trouble(_unknown_message(number, direction))
     else:
         try:
             message.header, reader.left = read(reader.n, reader.size)
@@ -349,7 +363,10 @@ def _unknown_version(message: Message, bit: int) -> Unknown:
     declared = declared_as(code)
     reason = f"there are no layouts for system version {message.version}"
     if is_declared_invalid(code):
-        reason = f"M_VERSION {code}, {message.version}, is declared not valid"
+        said = (
+            f"M_VERSION {code}, {message.version}," if bit else f"system version {message.version}"
+        )
+        reason = f"{said} is declared not valid"
     elif declared:
         reason += f": {declared.label}"
     return Unknown(

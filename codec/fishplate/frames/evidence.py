@@ -4,7 +4,9 @@ from __future__ import annotations
 
 from typing import TYPE_CHECKING, Any
 
+from fishplate.engine.runtime import codec
 from fishplate.standard.vocabulary import TO_TRAIN
+from fishplate.versions import closest_layouts
 
 if TYPE_CHECKING:
     from collections.abc import Iterator
@@ -13,26 +15,29 @@ if TYPE_CHECKING:
     from fishplate.frames.message import Message
 
 Tree = dict[str, Any]
+Path = list[str | int]
+Places = dict[tuple[str | int, ...], list[Path]]
+"""What a message holds, as evidence names it, and where."""
 
 
 def evidence_of(message: Message) -> list[Tree]:
     """Return what is to be said of a message, its packets and its variables, each with its path."""
-    layouts = message.layouts
-    if layouts is None or message.medium is None:
+    if message.medium is None or not closest_layouts(message.version):
         return []
+    layouts = message.layouts or codec(message.version)
     return [
         {"path": path, "kind": kind, "message": note}
         for path, kind, note in _found(message, layouts)
     ]
 
 
-def _found(message: Message, layouts: Codec) -> Iterator[tuple[list[str | int], str, str]]:
+def _found(message: Message, layouts: Codec) -> Iterator[tuple[Path, str, str]]:
     if message.version_from == "inferred":
         others = [each for each in message.fitting if each != message.version]
         also = f"; {', '.join(others)} would fit as well" if others else ""
         note = f"nothing says the version: the layouts of {message.version} fit{also}"
         yield ["version"], "inferred", note
-    subjects = _subjects(message)
+    subjects = _subjects(message) if layouts.evidence else {}
     for kind, note, subject in layouts.evidence:
         for path in subjects.get(subject, ()):
             yield path, kind, note
@@ -43,6 +48,9 @@ def _found(message: Message, layouts: Codec) -> Iterator[tuple[list[str | int], 
             if (message.direction or TO_TRAIN, packet["NID_PACKET"]) in _only(layouts):
                 note = f"laid out as in {form}, which alone knows it"
             yield ["packets", index], "inferred", note
+            for kind, sentence, subject in codec(form).evidence:
+                if subject == ():
+                    yield ["packets", index], kind, sentence
 
 
 def _only(layouts: Codec) -> set[tuple[str, int]]:
@@ -55,16 +63,27 @@ def _only(layouts: Codec) -> set[tuple[str, int]]:
     }
 
 
-def _subjects(message: Message) -> dict[tuple[str | int, ...], list[list[str | int]]]:
+def _subjects(message: Message) -> Places:
     """Return what the message holds, as evidence names it, and where."""
     direction = message.direction or TO_TRAIN
-    places: dict[tuple[str | int, ...], list[list[str | int]]] = {(): [[]]}
+    places: Places = {(): [[]]}
     if "NID_MESSAGE" in message.header:
         places["message", direction, message.header["NID_MESSAGE"]] = [["header"]]
+    _variables(message.header, ["header"], places)
     for index, packet in enumerate(message.packets):
-        where: list[str | int] = ["packets", index]
+        where: Path = ["packets", index]
         if "form" not in packet:
             places.setdefault(("packet", direction, packet["NID_PACKET"]), []).append(where)
-        for name in packet:
-            places.setdefault(("variable", name), []).append([*where, name])
+        _variables(packet, where, places)
     return places
+
+
+def _variables(value: object, where: Path, places: Places) -> None:
+    """Note where each name stands, in sets too."""
+    if isinstance(value, dict):
+        for name, inner in value.items():
+            places.setdefault(("variable", name), []).append([*where, name])
+            _variables(inner, [*where, name], places)
+    elif isinstance(value, list):
+        for index, inner in enumerate(value):
+            _variables(inner, [*where, index], places)

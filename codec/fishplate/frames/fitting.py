@@ -6,20 +6,35 @@ is tried before all others, elsewhere, and wins wherever it fits.
 
 from __future__ import annotations
 
-from typing import TYPE_CHECKING
+from typing import TYPE_CHECKING, Protocol
 
 from fishplate.engine.runtime import codec
 from fishplate.frames import quick
 from fishplate.frames.sizes import MESSAGE_START
-from fishplate.standard import registry
 from fishplate.standard.editions import DEFAULT_VERSION, EDITIONS, Edition, edition, version_key
+from fishplate.standard.vocabulary import TO_TRAIN
 
 if TYPE_CHECKING:
     from fishplate.frames.message import Message
 
 
+class Careful(Protocol):
+    """The reader that takes in what the beaten track does not."""
+
+    def __call__(
+        self,
+        n: int,
+        size: int,
+        direction: str | None,
+        said: tuple[str | None, str | None],
+        *,
+        strict: bool,
+    ) -> Message:
+        """Read a radio message in a version and issue."""
+
+
 def infer_version(
-    n: int, size: int, direction: str | None, issue: str | None = None
+    n: int, size: int, direction: str | None, issue: str | None, careful: Careful
 ) -> Message | None:
     """Read a radio message that the usual version does not fit; None where no other fits.
 
@@ -35,15 +50,13 @@ def infer_version(
         if usual or each != edition(each.version, issue) or issue not in (None, each.issue):
             continue
         if each.layouts not in read:
-            read[each.layouts] = quick.read_radio(n, size, direction, quick.ways_of(each))
+            read[each.layouts] = _read(each, n, size, direction, careful)
         message = read[each.layouts]
         if message is not None and _may_hold(each, message):
             fitting.append(each)
-    if not fitting:
-        return None
-    first = fitting[0]
-    found = read[first.layouts]
+    found = read[fitting[0].layouts] if fitting else None
     if found is not None:
+        first = fitting[0]
         found.layouts = codec(first.version, first.issue)
         found.version, found.issue = first.version, first.issue
         found.version_from = "inferred"
@@ -51,11 +64,19 @@ def infer_version(
     return found
 
 
+def _read(
+    each: Edition, n: int, size: int, direction: str | None, careful: Careful
+) -> Message | None:
+    message = quick.read_radio(n, size, direction, quick.ways_of(each))
+    if message is None and any(codec(each.version, each.issue).forms.values()):
+        message = careful(n, size, direction, (each.version, each.issue), strict=False)
+        message = None if message.problems else message
+    return message
+
+
 def _may_hold(each: Edition, message: Message) -> bool:
     """Tell whether a version may use all the packets of a message."""
-    packets = registry(each.version, each.issue).packets
-    for packet in message.packets:
-        since = packets[message.direction or "", packet["NID_PACKET"]].since
-        if since and version_key(since) > version_key(each.version):
-            return False
-    return True
+    since = codec(each.version, each.issue).since[message.direction or TO_TRAIN]
+    numbers = [packet["NID_PACKET"] for packet in message.packets]
+    first = [since[number] for number in numbers if number in since]
+    return all(version_key(version) <= version_key(each.version) for version in first)

@@ -25,12 +25,7 @@ def layouts_of_packet(layouts: Codec, packet: Tree, direction: str, path: Path) 
     other = layouts.forms[direction].get(number) if isinstance(number, int) else None
     form = packet.get("form")
     if form not in (None, own, other):
-        raise EncodeError(
-            f"packet {number!r} of version {own} does not come in the form of {form!r}",
-            path=(*path, "form"),
-            expected=" or ".join(filter(None, (own, other))),
-            got=form,
-        )
+        raise wrong_form(number, own, other, form, path)
     if other is None or form == own:
         return layouts
     if form == other or number not in layouts.write_packet[direction]:
@@ -42,6 +37,18 @@ def layouts_of_packet(layouts: Codec, packet: Tree, direction: str, path: Path) 
         return layouts
     # Told by its variables: only what its own version cannot write comes here unmarked.
     return codec(other)
+
+
+def wrong_form(
+    number: object, own: str, other: str | None, form: object, path: Path
+) -> EncodeError:
+    """Return the error of a packet that does not come in the form it names."""
+    return EncodeError(
+        f"packet {number!r} of version {own} does not come in the form of {form!r}",
+        path=(*path, "form"),
+        expected=" or ".join(filter(None, (own, other))),
+        got=form,
+    )
 
 
 def check_issue(issue: object, layouts: Codec) -> None:

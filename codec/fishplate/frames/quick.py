@@ -64,7 +64,7 @@ def ways_of(edition: Edition) -> Mapping[int, Way]:
     return ways
 
 
-USUAL = EDITIONS[0]
+USUAL = next(each for each in EDITIONS if each.version == DEFAULT_VERSION)
 WAYS = ways_of(USUAL)
 
 

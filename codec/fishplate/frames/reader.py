@@ -141,17 +141,8 @@ class FrameReader:
             self._length_trouble(f"L_PACKET is {length}, less than the {head} bits of its head")
             self.message.packets.append(self._kept(head))
             return True
-        form = self._other_form(number, self.n >> self.left - length & (1 << length) - 1, length)
-        if form:
-            self.message.packets.append(form)
-            self.left -= length
-            return True
         if number in self.codec.forms[self.message.direction or TO_TRAIN]:
-            version = self.codec.forms[self.message.direction or TO_TRAIN][number]
-            self._length_trouble(
-                f"L_PACKET is {length}, which does not fit packet {number} as in {version}"
-            )
-            self.message.packets.append(self._kept(length))
+            self._only_as_other_form(number, length)
             return True
         self.trouble(
             Unknown(
@@ -164,6 +155,19 @@ class FrameReader:
         )
         self.message.packets.append(self._kept(length))
         return True
+
+    def _only_as_other_form(self, number: int, length: int) -> None:
+        """Read a packet that its version knows in the form of another one alone."""
+        form = self._other_form(number, self._peek(length), length)
+        if form:
+            self.message.packets.append(form)
+            self.left -= length
+            return
+        version = self.codec.forms[self.message.direction or TO_TRAIN][number]
+        self._length_trouble(
+            f"L_PACKET is {length}, which does not fit packet {number} as in {version}"
+        )
+        self.message.packets.append(self._kept(length))
 
     def _misfit(self, tree: Tree, part: int, extra: int, left: int) -> Tree:
         """Read a packet that does not fit its layout: in another form of it, or as it stands."""

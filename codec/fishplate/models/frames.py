@@ -11,7 +11,7 @@ from pydantic import BeforeValidator, ValidationError, create_model
 from fishplate.engine.runtime import codec
 from fishplate.errors import EncodeError, Path
 from fishplate.frames.encoding import KEYS
-from fishplate.frames.forms import check_issue
+from fishplate.frames.forms import check_issue, wrong_form
 from fishplate.frames.sizes import HEAD_NODES
 from fishplate.models.schema import (
     content_packet_schema,
@@ -133,12 +133,15 @@ def _packet_validator(direction: str, layouts: Registry) -> Callable[[Any], dict
         if not isinstance(number, int) or (direction, number) not in known:
             reason = f"packet {number!r} is not known {direction}; give its bits as content"
             raise custom_error(reason)
-        models = _models_of(layouts, direction, number, value.get("form"))
-        for model in models[:-1]:
-            # Told by its variables: errors are those of the version's own layout.
+        own, *others = _models_of(layouts, direction, number, value.get("form"))
+        for other in others:
+            # Errors are those of the form whose variables the packet has.
+            foreign = value.keys() - own.model_fields.keys()
+            if foreign and foreign <= other.model_fields.keys():
+                return other.model_validate(value).tree()
             with suppress(ValidationError):
-                return model.model_validate(value).tree()
-        return models[-1].model_validate(value).tree()
+                return other.model_validate(value).tree()
+        return own.model_validate(value).tree()
 
     return validate
 
@@ -146,13 +149,17 @@ def _packet_validator(direction: str, layouts: Registry) -> Callable[[Any], dict
 def _models_of(
     layouts: Registry, direction: str, number: int, said: object
 ) -> Sequence[type[Scope]]:
-    """Return the models a packet may follow, the version's own layout last."""
+    """Return the models a packet may follow, the version's own layout first."""
     form = layouts.forms.get((direction, number))
+    other_version = form.version if form else None
+    if said not in (None, layouts.version, other_version):
+        error = wrong_form(number, layouts.version, other_version, said, ())
+        raise custom_error(f"{error.reason}; expected {error.expected}")
     own = packet_model(number, direction, layouts.version, layouts.issue, form=bool(form))
     if form is None or said == layouts.version:
         return [own]
     other = packet_model(number, direction, form.version, form=True)
-    return [other] if form.only or said == form.version else [other, own]
+    return [other] if form.only or said == form.version else [own, other]
 
 
 @cache

@@ -93,7 +93,7 @@ def registry(version: str = DEFAULT_VERSION, issue: str | None = None) -> Regist
     found = edition(version, issue)
     if found is None or issue not in (None, found.issue):
         wanted = f"{version} as printed in issue {issue}" if issue else version
-        offers = ", ".join(f"{each.version} (issue {each.issue})" for each in EDITIONS)
+        offers = ", ".join(f"{each.version} (issue {each.issue})" for each in sorted(EDITIONS))
         raise RegistryError(f"no registry for system version {wanted}; there is {offers}")
     return _of_edition(found)
 

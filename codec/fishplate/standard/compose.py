@@ -7,7 +7,7 @@ several revisions the last one wins.
 from __future__ import annotations
 
 from dataclasses import replace
-from typing import TYPE_CHECKING, Any, TypeVar
+from typing import TYPE_CHECKING, Any, TypeVar, assert_never
 
 from fishplate.errors import RegistryError
 from fishplate.standard.vocabulary import (
@@ -192,3 +192,5 @@ def _renamed_node(node: Node, names: Mapping[str, str]) -> Node:
             return Text(names.get(node.length, node.length), names.get(node.element, node.element))
         case Opaque():
             return node
+        case _ as unknown:
+            assert_never(unknown)

@@ -36,7 +36,10 @@ Where nothing says which version a radio message is of, they are tried in this o
 
 
 def edition(version: str, issue: str | None = None) -> Edition | None:
-    """Return the edition of a system version, of the given issue where it prints that version."""
+    """Return the edition of a system version; None where it has no layouts.
+
+    It is that of the given issue where this prints the version, else the one it is used with.
+    """
     found = [each for each in EDITIONS if each.version == version]
     return next((each for each in found if each.issue == issue), found[0] if found else None)
 
@@ -50,6 +53,11 @@ def first_version(issue: str | None) -> str:
 def known_versions() -> tuple[str, ...]:
     """Return the system versions that have layouts, in ascending order."""
     return tuple(sorted({each.version for each in EDITIONS}, key=version_key))
+
+
+def known_issues() -> tuple[str, ...]:
+    """Return the issues of SUBSET-026 that have layouts, in ascending order."""
+    return tuple(sorted({each.issue for each in EDITIONS}))
 
 
 def version_key(version: str) -> tuple[int, int]:

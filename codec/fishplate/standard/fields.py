@@ -6,7 +6,7 @@ from collections import Counter
 from dataclasses import dataclass, replace
 from difflib import SequenceMatcher
 from itertools import pairwise
-from typing import TYPE_CHECKING, Literal
+from typing import TYPE_CHECKING, Literal, assert_never
 
 from fishplate.standard.vocabulary import (
     COUNT,
@@ -138,6 +138,8 @@ def _places(
                 yield place(node.element, node.element, "text")
             case Opaque():
                 yield place(node.name, "", "opaque")
+            case _ as unknown:
+                assert_never(unknown)
 
 
 def field_changes(

@@ -1196,5 +1196,6 @@ CODEC = Codec(
     write_header={"balise": v3_6_0.write_balise, "loop": v3_6_0.write_loop},
     unmeasured={"to-train": {255: 8}, "to-track": {}},
     forms={"to-train": {}, "to-track": {}},
-    evidence=(),
+    since={"to-train": {}, "to-track": {}},
+    evidence=(('inferred', 'what follows Q_TRACKINIT is indented without a condition: taken as for Q_TRACKINIT = 0', ('packet', 'to-train', 51)), ('inferred', 'NID_STM is worded to depend on M_LEVELTR, which is not in the packet: taken as the M_LEVELTEXTDISPLAY before it', ('packet', 'to-train', 72))),
 )

@@ -594,5 +594,6 @@ CODEC = Codec(
     write_header={"balise": v3_6_0.write_balise, "loop": v3_6_0.write_loop},
     unmeasured={"to-train": {0: 14, 255: 8}, "to-track": {}},
     forms={"to-train": {}, "to-track": {}},
+    since={"to-train": {}, "to-track": {}},
     evidence=(),
 )

@@ -4543,5 +4543,6 @@ CODEC = Codec(
     write_header={"balise": write_balise, "loop": write_loop},
     unmeasured={"to-train": {0: 14, 255: 8}, "to-track": {}},
     forms={"to-train": {}, "to-track": {}},
+    since={"to-train": {}, "to-track": {}},
     evidence=(),
 )

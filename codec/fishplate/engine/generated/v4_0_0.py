@@ -1188,5 +1188,6 @@ CODEC = Codec(
     write_header={"balise": v3_6_0.write_balise, "loop": v3_6_0.write_loop},
     unmeasured={"to-train": {0: 14, 255: 8}, "to-track": {}},
     forms={"to-train": {}, "to-track": {}},
-    evidence=(('weaker', 'issue 4.0.0 is declared from a text conversion of its tables', ()), ('inferred', 'NID_LRBG added from the standard format 8.4.4.6.1: the conversion stops before it', ('message', 'to-train', 38)), ('weaker', 'printed in hours, in steps of 24; declared in days, with the same codes', ('variable', 'T_VBC'))),
+    since={"to-train": {}, "to-track": {}},
+    evidence=(('weaker', 'issue 4.0.0 is declared from a text conversion of its tables', ()), ('inferred', 'NID_LRBG added from the standard format 8.4.4.6.1: the conversion stops before it', ('message', 'to-train', 38)), ('inferred', 'NID_MN depends on a misspelt Q_NETWORTYPE: taken as Q_NETWORKTYPE', ('packet', 'to-train', 45)), ('weaker', 'printed in hours, in steps of 24; declared in days, with the same codes', ('variable', 'T_VBC'))),
 )

@@ -1624,5 +1624,6 @@ CODEC = Codec(
     write_header={"balise": v3_6_0.write_balise, "loop": v3_6_0.write_loop},
     unmeasured={"to-train": {255: 8}, "to-track": {}},
     forms={"to-train": {}, "to-track": {}},
+    since={"to-train": {2: "1.1", 6: "1.1", 135: "1.1", 145: "1.1", 200: "1.1", 203: "1.1", 206: "1.1", 207: "1.1", 239: "1.1"}, "to-track": {}},
     evidence=(('weaker', 'named in packet 3, but defined in no clause of chapter 6: as its successor is defined', ('variable', 'Q_NVSRBKTRG')), ('inferred', 'optional packets as in issue 3.6.0; issue 2.3.0 has packet 80 only', ('message', 'to-train', 9))),
 )

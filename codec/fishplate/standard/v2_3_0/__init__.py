@@ -6,9 +6,11 @@ issue does not say who sends a message.
 
 from __future__ import annotations
 
+from dataclasses import replace
+
 from fishplate.standard.compose import composed
 from fishplate.standard.v2_3_0 import messages, packets, variables
-from fishplate.standard.vocabulary import Revision
+from fishplate.standard.vocabulary import TO_TRAIN, Evidence, Revision
 from fishplate.standard.x1_chapter6 import DECLARATIONS as X1
 
 NO_SENDERS = {
@@ -17,7 +19,21 @@ NO_SENDERS = {
     for key in [(each.direction, each.number)]
 }
 
-DECLARATIONS = composed(
+EVIDENCE = (
+    Evidence(
+        "inferred",
+        "what follows Q_TRACKINIT is indented without a condition: taken as for Q_TRACKINIT = 0",
+        ("packet", TO_TRAIN, 51),
+    ),
+    Evidence(
+        "inferred",
+        "NID_STM is worded to depend on M_LEVELTR, which is not in the packet: taken as the "
+        "M_LEVELTEXTDISPLAY before it",
+        ("packet", TO_TRAIN, 72),
+    ),
+)
+
+DECLARED = composed(
     X1,
     Revision(packets=packets.PACKETS),
     Revision(
@@ -36,3 +52,5 @@ DECLARATIONS = composed(
     issue="2.3.0",
     date="24/02/2006",
 )
+
+DECLARATIONS = replace(DECLARED, evidence=EVIDENCE)

@@ -17,6 +17,11 @@ EVIDENCE = (
         ("message", TO_TRAIN, 38),
     ),
     Evidence(
+        "inferred",
+        "NID_MN depends on a misspelt Q_NETWORTYPE: taken as Q_NETWORKTYPE",
+        ("packet", TO_TRAIN, 45),
+    ),
+    Evidence(
         "weaker",
         "printed in hours, in steps of 24; declared in days, with the same codes",
         ("variable", "T_VBC"),

@@ -30,7 +30,7 @@ NEW_MESSAGES = (
     (TO_TRACK, 131),
     (TO_TRACK, 133),
 )
-NEW_VARIABLES = (
+TAKEN_VARIABLES = (
     "L_CONSISTFRONTENGINEMAX",
     "L_CONSISTFRONTENGINEMIN",
     "L_CONSISTFRONTENGINENOM",
@@ -52,21 +52,29 @@ FORMS = (
 )
 """73 and 74 are read as 3.0 only: their codes of levels and modes are not those of 72 and 76."""
 
+TAKEN = {
+    *(("packet", *key) for key in NEW_PACKETS),
+    *(("message", *key) for key in NEW_MESSAGES),
+    *(("variable", name) for name in TAKEN_VARIABLES),
+}
+"""What comes from issue 4.0.0, as evidence names it."""
+
 EVIDENCE = (
     Evidence(
         "inferred",
         "layouts of 2.1, with the packets and messages that issue 4.0.0 adds "
         "(chapter 6 of 4.0.0 was not read)",
     ),
+    *(each for each in V4_0_0.evidence if each.subject in TAKEN),
     *(
-        Evidence("inferred", "new in issue 4.0.0, taken over as it stands there", (kind, *key))
+        Evidence("inferred", "new in issue 4.0.0, taken over from a text conversion", (kind, *key))
         for kind, keys in (("packet", NEW_PACKETS), ("message", NEW_MESSAGES))
         for key in keys
     ),
     *(
         Evidence(
             "inferred",
-            "laid out as in 2.1, which its L_PACKET fits; 3.0 has another layout",
+            "as in 2.1 where L_PACKET fits that; 3.0 has another layout",
             ("packet", each.direction, each.number),
         )
         for each in FORMS
@@ -93,7 +101,7 @@ DECLARATIONS = replace(
     composed(
         V3_6_0,
         Revision(
-            variables=tuple(each for each in V4_0_0.variables if each.name in NEW_VARIABLES),
+            variables=tuple(each for each in V4_0_0.variables if each.name in TAKEN_VARIABLES),
             packets=tuple(
                 each for each in V4_0_0.packets if (each.direction, each.number) in NEW_PACKETS
             ),
