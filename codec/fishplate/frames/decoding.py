@@ -2,7 +2,6 @@
 
 from __future__ import annotations
 
-from functools import cache
 from typing import TYPE_CHECKING
 
 from fishplate.bits import read_bits
@@ -16,25 +15,23 @@ from fishplate.errors import (
 )
 from fishplate.frames import quick
 from fishplate.frames.fitting import infer_version
+from fishplate.frames.media import BOTH, NEITHER, hops_to_the_end, tell_medium
 from fishplate.frames.message import Message
 from fishplate.frames.reader import FrameReader
 from fishplate.frames.sizes import (
     END_FLAG,
     HEADER_BITS,
-    HEADS,
-    LONGEST_PACKET,
     LONGEST_PADDING,
     MESSAGE_START,
     SHORTEST_PACKET,
 )
-from fishplate.standard.editions import first_version, known_issues
+from fishplate.standard.editions import edition, first_version, known_issues
 from fishplate.standard.vocabulary import DIRECTIONS, MEDIA, TO_TRACK, TO_TRAIN
 from fishplate.versions import (
     DEFAULT_VERSION,
     NAME,
     closest_layouts,
     declared_as,
-    defined_codes,
     is_declared_invalid,
     version_code,
     version_text,
@@ -46,15 +43,6 @@ if TYPE_CHECKING:
 
 Said = tuple[str | None, str | None]
 """The system version and the issue that the caller asks for."""
-
-NEITHER = (
-    "no telegram that reaches its end flag, and no radio message, since no L_MESSAGE says "
-    "{size} bits"
-)
-BOTH = (
-    "packets reach an end flag as in a telegram, and L_MESSAGE says {size} bits as in a radio "
-    "message"
-)
 
 NOTHING_SAID = (None, None, None, None)
 
@@ -91,9 +79,11 @@ def decode(
         message = message or infer_version(n, size, direction, issue, careful=_radio)
         if message is not None:
             return message
-    found = medium or _radio_or_telegram(n, size, direction, said)
+    found, reason = (medium, "") if medium else tell_medium(n, size)
+    if reason is BOTH and not _radio(n, size, direction, said, strict=False).problems:
+        found = "radio"
     if found is None:
-        return _ambiguous(n, size, _why_ambiguous(n, size), strict=strict)
+        return _ambiguous(n, size, reason, strict=strict)
     if found == "radio":
         return _radio(n, size, direction, said, strict=strict)
     if medium is None:
@@ -113,33 +103,6 @@ def _check_said(medium: object, direction: object, version: object, issue: objec
         raise ValueError(f"issue is one of {', '.join(known_issues())}, not {issue!r}")
 
 
-def _radio_or_telegram(n: int, size: int, direction: str | None, said: Said) -> str | None:
-    """Tell the medium from the first bits and the length; None when they do not say.
-
-    A defined M_VERSION behind a first bit 1 is no message number. Any other one may be: there,
-    packets that reach the end flag speak for a telegram, L_MESSAGE for a radio message; where
-    both do, a radio message without a problem is one.
-    """
-    if size < MESSAGE_START:
-        return None
-    start = n >> size - MESSAGE_START
-    medium = "loop" if start >> 9 & 1 else "balise"
-    if start >> 10 in _telegram_starts():
-        return medium
-    as_long_as_said = (start & 1023) << 3 == size
-    if start >> MESSAGE_START - 1 and _hops_to_the_end(n, size - HEADER_BITS[medium]):
-        if not as_long_as_said:
-            return medium
-        return None if _radio(n, size, direction, said, strict=False).problems else "radio"
-    return "radio" if as_long_as_said else None
-
-
-@cache
-def _telegram_starts() -> frozenset[int]:
-    """First bytes of telegrams: Q_UPDOWN 1, then an M_VERSION the standard defines."""
-    return frozenset(128 | code for code in defined_codes())
-
-
 def _if_it_ends(n: int, size: int, medium: str, said: Said, *, strict: bool) -> Message:
     """Read a telegram on trial: only its end flag proves that it is one."""
     trial = _telegram(n, size, medium, said, strict=False)
@@ -153,27 +116,7 @@ def _if_it_ends(n: int, size: int, medium: str, said: Said, *, strict: bool) -> 
 def _cannot_be_read_but_ends(telegram: Message, n: int) -> bool:
     kinds = [each.kind for each in telegram.problems]
     left = telegram.size - HEADER_BITS[telegram.medium or "balise"]
-    return kinds[:1] == ["unknown-version"] and _hops_to_the_end(n, left)
-
-
-def _hops_to_the_end(n: int, left: int) -> bool:
-    """Tell whether packets reach the end flag, by L_PACKET alone; `n` holds `left` bits of them."""
-    head = HEADS[TO_TRAIN]
-    # A packet without L_PACKET is laid out the same in every version (SUBSET-026 8.4.2.4).
-    unmeasured = codec(DEFAULT_VERSION).unmeasured[TO_TRAIN]
-    while left >= head:
-        word = n >> left - head & (1 << head) - 1
-        if word >> head - 8 == END_FLAG:
-            return True
-        left -= unmeasured.get(word >> head - 8) or max(head, word & LONGEST_PACKET)
-    return left >= SHORTEST_PACKET and n >> left - 8 & 255 == END_FLAG
-
-
-def _why_ambiguous(n: int, size: int) -> str:
-    """Say why neither or both media are meant."""
-    if size >= MESSAGE_START and (n >> size - MESSAGE_START & 1023) << 3 == size:
-        return BOTH
-    return NEITHER
+    return kinds[:1] == ["unknown-version"] and hops_to_the_end(n, left)
 
 
 def _ambiguous(n: int, size: int, reason: str, *, strict: bool) -> Message:
@@ -222,6 +165,12 @@ def _telegram(n: int, size: int, medium: str, said: Said, *, strict: bool) -> Me
 
 def _radio(n: int, size: int, direction: str | None, said: Said, *, strict: bool) -> Message:
     version, issue = said
+    asked = edition(version, issue) if version else None
+    if asked:
+        whole = quick.read_radio_as(asked, n, size, direction)
+        if whole is not None:
+            whole.version_from = "caller"
+            return whole
     number = n >> size - 8 if size >= SHORTEST_PACKET else 0
     message = Message("radio", direction, size)
     layouts = _layouts(message, version or first_version(issue), issue)

@@ -67,7 +67,7 @@ def infer_version(
 def _read(
     each: Edition, n: int, size: int, direction: str | None, careful: Careful
 ) -> Message | None:
-    message = quick.read_radio(n, size, direction, quick.ways_of(each))
+    message = quick.read_radio_as(each, n, size, direction)
     if message is None and any(codec(each.version, each.issue).forms.values()):
         message = careful(n, size, direction, (each.version, each.issue), strict=False)
         message = None if message.problems else message

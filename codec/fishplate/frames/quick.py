@@ -108,6 +108,15 @@ def read_radio(
     return message
 
 
+def read_radio_as(each: Edition, n: int, size: int, direction: str | None) -> Message | None:
+    """Read a radio message in the layouts of an edition, or return None."""
+    message = read_radio(n, size, direction, ways_of(each))
+    if message is not None:
+        message.version, message.issue = each.version, each.issue
+        message.layouts = codec(each.version, each.issue)
+    return message
+
+
 def write_radio(tree: Tree) -> tuple[int, int] | None:
     """Write a radio message: value and width in bits, or None."""
     try:
