@@ -185,7 +185,7 @@ class Description:
         word = "sent by" if message.direction == "to-train" else "sent to"
         yield from self._fact(word, ", ".join(message.senders))
         if message.version_invariant:
-            yield from self._fact("versions", "the same in every system version")
+            yield from self._fact("versions", "declared the same in every system version")
         yield from self._fact("length", f"{length_text(self.book, message.nodes)}, then packets")
         yield from self._evidence(message)
         yield from self._layout(message.nodes)

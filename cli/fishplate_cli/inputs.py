@@ -15,7 +15,8 @@ import typer
 
 from fishplate.captures import CaptureDecoder, Frame, form_by_name, read_literal, read_stream
 from fishplate.errors import DecodeError, FishplateError
-from fishplate.standard.editions import known_issues
+from fishplate.standard.editions import known_issues, prints
+from fishplate.versions import NAME
 from fishplate_cli.console import Complaints, Progress, shortened, visible
 
 if TYPE_CHECKING:
@@ -31,7 +32,6 @@ LITERAL = re.compile(
 TREE_SUFFIXES = frozenset({".yaml", ".yml"})
 """Files that hold authored trees and never frames."""
 NEARLY_HEX = re.compile(r"\s*(?:0[xXbB])?[0-9A-Fa-f]{4}[^./\\]*")
-VERSION = re.compile(r"\d+\.\d+")
 SHOWN = 60
 NAMED = 8
 """Keys and columns that are named where a file has some that mean nothing."""
@@ -62,7 +62,7 @@ class FrameForm(StrEnum):
 
 
 def _version(value: str | None) -> str | None:
-    if value is not None and not VERSION.fullmatch(value):
+    if value is not None and not NAME.fullmatch(value):
         raise typer.BadParameter(f"{value!r} is not a system version such as 2.1")
     return value
 
@@ -126,6 +126,9 @@ class Given:
         issue: str | None = None,
         form: FrameForm | None = None,
     ) -> None:
+        if version and issue and not prints(issue, version):
+            reason = f"issue {issue} does not lay out version {version}"
+            raise typer.BadParameter(reason, param_hint="--issue")
         self.medium = medium.value if medium else None
         self.form: Form | None = form.value if form else None
         self.decoder = CaptureDecoder(

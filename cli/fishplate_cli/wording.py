@@ -110,7 +110,7 @@ def heading(message: Message, book: Registry) -> tuple[str, str]:
         if same_in_every_version(message, book):
             version = "; the same in every system version"
         if message.issue and message.issue != _usual_issue(message.version):
-            version += f" as issue {message.issue} prints it"
+            version += f" (issue {message.issue})"
     return first, f"{_what(message, book)}{version}"
 
 

@@ -27,7 +27,7 @@ EXAMPLES = {
   fishplate list line.csv run.jsonl | grep '!!'""",
     "translate": """\
   fishplate translate --to 2.1 capture.jsonl
-  fishplate translate --to 1.0 --as capture run.jsonl > run-1.0.jsonl
+  fishplate translate --to 1.0 --as capture run.jsonl > run-in-1.0.jsonl
   fishplate translate --to 2.1 --stored values.yaml --version 1.0 frames.txt""",
     "about": """\
   fishplate about L_ENDSECTION
@@ -59,7 +59,9 @@ Examples:
   fishplate decode capture.jsonl
   fishplate fields --as jsonl frames.txt
   fishplate encode telegram.yaml
+  fishplate translate --to 2.1 capture.jsonl
   fishplate about packet 15
+  fishplate about --between 2.0 2.1
 
 \b
 Exit codes:

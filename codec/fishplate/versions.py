@@ -21,6 +21,7 @@ __all__ = [
     "declared_as",
     "defined_codes",
     "is_declared_invalid",
+    "no_layouts",
     "told_version",
     "version_code",
     "version_text",
@@ -73,6 +74,19 @@ def is_declared_invalid(code: int) -> bool:
     """Tell whether the latest issue declares an M_VERSION code not valid."""
     declared = declared_as(code)
     return declared is not None and declared.kind == "spare"
+
+
+def no_layouts(version: str) -> str:
+    """Say why a version cannot be read or written."""
+    reason = f"there are no layouts for system version {version}"
+    if not NAME.fullmatch(version):
+        return f"{version!r} is no system version"
+    declared = declared_as(version_code(version))
+    if declared is None:
+        return reason
+    if declared.kind == "spare":
+        return f"system version {version} is declared not valid"
+    return f"{reason}: {declared.label}"
 
 
 @cache

@@ -14,6 +14,7 @@ import pytest
 import yaml
 
 import fishplate
+from fishplate.trees import read_yaml
 from repo.files import ROOT, blocks, documents, short
 
 if TYPE_CHECKING:
@@ -69,8 +70,10 @@ def test_python_examples_print_what_they_show(path: Path) -> None:
 def test_the_authored_example_gives_the_frame_it_shows() -> None:
     """The hex was packed by hand from the widths in SUBSET-026 3.6.0, 7.4.2.4 and 8.7.2."""
     text = (ROOT / "docs" / "how-to" / "author.md").read_text(encoding="utf-8")
-    (tree,), (shown,) = blocks(text, "yaml"), blocks(text, "text")
+    (tree, report), (shown,) = blocks(text, "yaml"), blocks(text, "text")
     assert fishplate.encode(yaml.safe_load(tree)).hex.upper() == shown.strip()
+    (authored,) = read_yaml(report)
+    assert fishplate.decode(fishplate.encode(authored.tree)).version == "3.0"
 
 
 def test_the_help_carries_the_caution() -> None:

@@ -7,6 +7,7 @@ from __future__ import annotations
 
 import pytest
 
+import fishplate
 from fishplate.errors import EncodeError
 from fishplate.frames import encode_bits
 from unit.wrong_trees import REFUSED
@@ -34,3 +35,27 @@ def test_a_wrong_tree_names_its_place(case: str) -> None:
 def test_force_excuses_lengths_only(case: str) -> None:
     with pytest.raises(EncodeError):
         encode_bits(REFUSED[case][0], force=True)
+
+
+def test_a_telegram_that_names_another_version_than_its_tree() -> None:
+    """Bits of 1.0 under an M_VERSION of 2.1 would be read in the wrong layouts."""
+    header = {
+        "Q_UPDOWN": 1,
+        "M_VERSION": "2.1",
+        "Q_MEDIA": 0,
+        "N_PIG": 0,
+        "N_TOTAL": 0,
+        "M_DUP": 0,
+        "M_MCOUNT": 255,
+        "NID_C": 905,
+        "NID_BG": 9050,
+        "Q_LINK": 1,
+    }
+    packet = {"NID_PACKET": 39, "Q_DIR": 1, "Q_SCALE": 1, "D_TRACTION": 100, "M_TRACTION": 1}
+    tree = {"version": "1.0", "header": header, "packets": [packet]}
+    with pytest.raises(EncodeError, match=r"names version 2\.1, the tree is of version 1\.0"):
+        fishplate.encode(tree)
+    assert len(fishplate.encode(tree, force=True)) == 210
+    del tree["version"]
+    header["M_VERSION"] = "1.0"
+    assert len(fishplate.encode(tree)) == 210

@@ -11,9 +11,9 @@ from typing import TYPE_CHECKING
 
 from fishplate.bits import BYTE
 from fishplate.frames import decode
-from fishplate.standard.editions import version_key
+from fishplate.standard.editions import prints, version_key
 from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN
-from fishplate.versions import version_text
+from fishplate.versions import closest_layouts, version_text
 
 if TYPE_CHECKING:
     from collections.abc import Iterable, Iterator
@@ -57,7 +57,9 @@ class Heard:
         (versions that differ in Y only are compatible, SUBSET-026 3.17.3).
         """
         said = self.trackside or self.ordered
-        if said is None or direction != TO_TRACK or said in self.supported:
+        if said is None or closest_layouts(said) is None:
+            return None
+        if direction != TO_TRACK or said in self.supported:
             return said
         x, y = version_key(said)
         below = [each for each in self.supported if (x, 0) <= version_key(each) < (x, y)]
@@ -118,21 +120,25 @@ class CaptureDecoder:
             message.version_from = "capture"
             return message
         again = self._read(frame, "radio", told)
-        misfits = any(each.kind != "newer-version" for each in again.problems)
-        if misfits and not message.problems:
+        if not again.complete and not message.problems:
             # Of another trackside, or of a session whose beginning is missing.
+            message.told = told
             return message
         again.version_from = "capture"
         return again
 
     def _read(self, frame: Frame, medium: str | None, version: str | None) -> Message:
         whole = len(frame.data) * BYTE == frame.bits
+        issue = self.issue
+        if issue and version and not prints(issue, version):
+            # The issue is for the versions it prints; a capture may hold others beside them.
+            issue = None
         return decode(
             frame.data,
             medium=medium,
             direction=frame.direction or self.direction,
             version=version,
-            issue=self.issue,
+            issue=issue,
             bits=None if whole else frame.bits,
             strict=False,
         )

@@ -25,14 +25,14 @@ from fishplate.frames.sizes import (
     MESSAGE_START,
     SHORTEST_PACKET,
 )
-from fishplate.standard.editions import edition, first_version, known_issues
+from fishplate.standard.editions import edition, first_version, known_issues, prints
 from fishplate.standard.vocabulary import DIRECTIONS, MEDIA, TO_TRACK, TO_TRAIN
 from fishplate.versions import (
     DEFAULT_VERSION,
     NAME,
     closest_layouts,
-    declared_as,
     is_declared_invalid,
+    no_layouts,
     version_code,
     version_text,
 )
@@ -98,9 +98,13 @@ def _check_said(medium: object, direction: object, version: object, issue: objec
     if direction is not None and direction not in DIRECTIONS:
         raise ValueError(f"direction is {TO_TRAIN} or {TO_TRACK}, not {direction!r}")
     if version is not None and not (isinstance(version, str) and NAME.fullmatch(version)):
-        raise ValueError(f"version is written as '2.1', not {version!r}")
+        raise ValueError(
+            f"version is written as '2.1', X to 7 and Y to 15, not {version!r}",
+        )
     if issue is not None and issue not in known_issues():
         raise ValueError(f"issue is one of {', '.join(known_issues())}, not {issue!r}")
+    if version and issue and not prints(issue, version):
+        raise ValueError(f"issue {issue} does not lay out version {version}")
 
 
 def _if_it_ends(n: int, size: int, medium: str, said: Said, *, strict: bool) -> Message:
@@ -309,15 +313,9 @@ def _say_if_newer(reader: FrameReader, path: Path, bit: int) -> None:
 
 def _unknown_version(message: Message, bit: int) -> Unknown:
     code = version_code(message.version)
-    declared = declared_as(code)
-    reason = f"there are no layouts for system version {message.version}"
-    if is_declared_invalid(code):
-        said = (
-            f"M_VERSION {code}, {message.version}," if bit else f"system version {message.version}"
-        )
-        reason = f"{said} is declared not valid"
-    elif declared:
-        reason += f": {declared.label}"
+    reason = no_layouts(message.version)
+    if bit and is_declared_invalid(code):
+        reason = f"M_VERSION {code}, {message.version}, is declared not valid"
     return Unknown(
         reason,
         kind="unknown-version",

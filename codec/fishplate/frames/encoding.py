@@ -14,7 +14,7 @@ from fishplate.engine.runtime import MISFITS, Codec, codec
 from fishplate.engine.spell import Spelling, code_of
 from fishplate.errors import EncodeError, Path
 from fishplate.frames import quick
-from fishplate.frames.forms import BESIDE, check_issue, layouts_of_packet
+from fishplate.frames.forms import BESIDE, check_issue, check_version, layouts_of_packet
 from fishplate.frames.message import Message, Tree
 from fishplate.frames.sizes import (
     END_FLAG,
@@ -27,7 +27,12 @@ from fishplate.frames.sizes import (
 )
 from fishplate.standard import known_versions
 from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN
-from fishplate.versions import DEFAULT_VERSION, closest_layouts, told_version
+from fishplate.versions import (
+    DEFAULT_VERSION,
+    closest_layouts,
+    no_layouts,
+    told_version,
+)
 
 if TYPE_CHECKING:
     from collections.abc import Sequence
@@ -89,7 +94,7 @@ def _codec_of(tree: Tree) -> Codec:
     if closest is None and not ("content" in tree and isinstance(version, str)):
         said = "version" in tree
         raise EncodeError(
-            f"there are no layouts for system version {version}",
+            no_layouts(str(version)),
             path=("version",) if said else ("header", "M_VERSION"),
             expected=", ".join(known_versions()),
             got=version,
@@ -225,6 +230,7 @@ class _Writer:
         except MISFITS:
             nodes = self.codec.registry.headers[medium].nodes
             raise self._misfit(nodes, header, ("header",)) from None
+        check_version(tree, header["M_VERSION"], force=self.force)
         last = self.packets(TO_TRAIN)
         if "content" in tree:
             self._add(*read_blob(tree["content"], ("content",)))

@@ -32,10 +32,8 @@ def evidence_of(message: Message) -> list[Tree]:
 
 
 def _found(message: Message, layouts: Codec) -> Iterator[tuple[Path, str, str]]:
-    if message.version_from == "inferred":
-        others = [each for each in message.fitting if each != message.version]
-        also = f"; {', '.join(others)} would fit as well" if others else ""
-        note = f"nothing says the version: the layouts of {message.version} fit{also}"
+    note = _version_note(message)
+    if note:
         yield ["version"], "inferred", note
     subjects = _subjects(message) if layouts.evidence else {}
     for kind, note, subject in layouts.evidence:
@@ -51,6 +49,19 @@ def _found(message: Message, layouts: Codec) -> Iterator[tuple[Path, str, str]]:
             for kind, sentence, subject in codec(form).evidence:
                 if subject == ():
                     yield ["packets", index], kind, sentence
+
+
+def _version_note(message: Message) -> str:
+    """Say why a version was taken that nothing said, or another than the one named before."""
+    others = [each for each in message.fitting if each != message.version]
+    also = f"; {', '.join(others)} would fit as well" if others else ""
+    if message.version_from == "inferred":
+        if message.told:
+            return f"{message.told}, named before, does not fit: {message.version} does{also}"
+        return f"nothing says the version: the layouts of {message.version} fit{also}"
+    if message.told:
+        return f"{message.told}, named before, does not fit: {message.version} is assumed"
+    return ""
 
 
 def _only(layouts: Codec) -> set[tuple[str, int]]:

@@ -6,7 +6,8 @@ from typing import TYPE_CHECKING, Any
 
 from fishplate.engine.runtime import MISFITS, codec
 from fishplate.errors import EncodeError
-from fishplate.standard.editions import EDITIONS
+from fishplate.standard.editions import EDITIONS, edition
+from fishplate.versions import closest_layouts, version_code, version_text
 
 if TYPE_CHECKING:
     from fishplate.engine.runtime import Codec
@@ -61,3 +62,26 @@ def check_issue(issue: object, layouts: Codec) -> None:
             expected=" or ".join(offers),
             got=issue,
         )
+
+
+def _layouts(version: str) -> str | None:
+    """Return the layouts a version is read with; versions may share them."""
+    closest = closest_layouts(version)
+    found = edition(closest) if closest else None
+    return found.layouts if found else None
+
+
+def check_version(tree: Tree, code: int, *, force: bool) -> None:
+    """Raise `EncodeError` for a telegram authored in one version that names another language."""
+    said = tree.get("version")
+    # With filler or content a tree says what was on the wire, however it was read.
+    on_the_wire = "filler" in tree or "content" in tree
+    if said is None or on_the_wire or force or _layouts(said) == _layouts(version_text(code)):
+        return
+    raise EncodeError(
+        f"names version {version_text(code)}, the tree is of version {said}; "
+        "leave version out or force it",
+        path=("header", "M_VERSION"),
+        expected=str(version_code(said)),
+        got=code,
+    )

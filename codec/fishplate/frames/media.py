@@ -11,6 +11,7 @@ from fishplate.frames.sizes import (
     HEADS,
     LONGEST_PACKET,
     MESSAGE_START,
+    READ_BITS,
     SHORTEST_PACKET,
 )
 from fishplate.standard.vocabulary import TO_TRAIN
@@ -55,7 +56,10 @@ def hops_to_the_end(n: int, left: int) -> bool:
     head = HEADS[TO_TRAIN]
     # A packet without L_PACKET is laid out the same in every version (SUBSET-026 8.4.2.4).
     unmeasured = codec(DEFAULT_VERSION).unmeasured[TO_TRAIN]
+    trimmed = left
     while left >= head:
+        if trimmed - left > READ_BITS:
+            n, trimmed = n & (1 << left) - 1, left
         word = n >> left - head & (1 << head) - 1
         if word >> head - 8 == END_FLAG:
             return True

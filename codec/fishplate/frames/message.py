@@ -50,7 +50,8 @@ class Message:
     `header` and each of `packets` are plain dicts of raw codes under the standard's variable
     names. `version_from` says where the system version came from: ``"frame"``, ``"caller"``,
     ``"capture"`` (earlier frames), ``"inferred"`` (its layouts fit, the usual ones do not) or
-    ``"assumed"``; `fitting` names all versions that fit where it was inferred. `padding`,
+    ``"assumed"``; `fitting` names all versions that fit where it was inferred, `told`
+    the one that earlier frames named and this one does not fit. `padding`,
     `filler`, `surplus` and `content` are bits that no layout explains, as
     ``{"bits": n, "hex": "..."}``, or None. `size` is the length of the frame in bits.
     """
@@ -60,6 +61,7 @@ class Message:
     version_from: str = "assumed"
     issue: str = ""
     fitting: tuple[str, ...] = ()
+    told: str = ""
     layouts: Codec | None = None
     padding: Tree | None = None
     filler: Tree | None = None

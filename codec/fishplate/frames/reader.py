@@ -26,6 +26,7 @@ from fishplate.frames.sizes import (
     HEADS,
     LENGTH_BITS,
     LONGEST_PACKET,
+    READ_BITS,
     SHORTEST_PACKET,
 )
 from fishplate.standard.vocabulary import TO_TRAIN, Field
@@ -96,7 +97,11 @@ class FrameReader:
         head = HEADS[direction]
         packets = self.message.packets
         n, left = self.n, self.left
+        trimmed = left
         while left >= SHORTEST_PACKET:
+            if trimmed - left > READ_BITS:
+                n = self.n = n & (1 << left) - 1
+                trimmed = left
             if left >= head:
                 word = n >> left - head
                 length = word & LONGEST_PACKET

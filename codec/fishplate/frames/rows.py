@@ -16,6 +16,7 @@ from fishplate.meaning import Meaning, explain
 from fishplate.standard import registry
 from fishplate.standard.editions import DEFAULT_VERSION
 from fishplate.standard.vocabulary import TO_TRAIN, Field, Opaque
+from fishplate.versions import closest_layouts
 
 if TYPE_CHECKING:
     from collections.abc import Iterator, Sequence
@@ -169,6 +170,8 @@ class _Frame:
             return self.registry.headers[self.message.medium or "balise"].nodes
         number = self.message.header.get("NID_MESSAGE", self.value >> max(0, self.size - 8))
         known = self.registry.messages.get((self._direction, number))
+        if closest_layouts(self.message.version) is None:
+            known = None
         return known.nodes if known else (Field("NID_MESSAGE"), Field("L_MESSAGE"))
 
     @property

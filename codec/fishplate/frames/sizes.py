@@ -29,6 +29,9 @@ HEADER_BITS = {"balise": 50, "loop": 33}
 MESSAGE_START = 18
 """NID_MESSAGE and L_MESSAGE, with which every radio message of every version begins."""
 
+READ_BITS = 1 << 14
+"""From here on it pays to cut off the bits that have been read: shifting copies all of them."""
+
 LONGEST_MESSAGE = 1023
 """The most that L_MESSAGE can say, in bytes (SUBSET-026 7.5.1.48)."""
 

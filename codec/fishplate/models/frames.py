@@ -22,7 +22,7 @@ from fishplate.models.schema import (
 from fishplate.models.scopes import Bits, Scope, custom_error, scope_model
 from fishplate.standard import registry
 from fishplate.standard.vocabulary import DIRECTIONS, TO_TRACK, TO_TRAIN, Node
-from fishplate.versions import DEFAULT_VERSION, closest_layouts, told_version
+from fishplate.versions import DEFAULT_VERSION, closest_layouts, no_layouts, told_version
 
 if TYPE_CHECKING:
     from collections.abc import Callable, Sequence
@@ -190,7 +190,12 @@ def codes_of(tree: object) -> dict[str, Any]:
 
 def _model_for(tree: dict[str, Any]) -> type[Scope]:
     given = told_version(tree)
-    version = (closest_layouts(given) if isinstance(given, str) else None) or DEFAULT_VERSION
+    closest = closest_layouts(given) if isinstance(given, str) else None
+    if closest is None and "content" not in tree:
+        # All other errors would be those of a version that is not meant.
+        path = ("version",) if "version" in tree else ("header", "M_VERSION")
+        raise EncodeError(no_layouts(str(given)), path=path, got=given)
+    version = closest or DEFAULT_VERSION
     issue = tree["issue"] if isinstance(tree.get("issue"), str) else None
     check_issue(tree.get("issue"), codec(version, issue))
     header = tree.get("header")

@@ -55,6 +55,12 @@ def known_versions() -> tuple[str, ...]:
     return tuple(sorted({each.version for each in EDITIONS}, key=version_key))
 
 
+def prints(issue: str, version: str) -> bool:
+    """Tell whether an issue lays out a version; true of a version that no issue lays out."""
+    issues = {each.issue for each in EDITIONS if each.version == version}
+    return not issues or issue in issues
+
+
 def known_issues() -> tuple[str, ...]:
     """Return the issues of SUBSET-026 that have layouts, in ascending order."""
     return tuple(sorted({each.issue for each in EDITIONS}))
