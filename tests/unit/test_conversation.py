@@ -132,6 +132,21 @@ def test_nothing_said_and_only_one_version_fits() -> None:
     assert versions([request("1.0", Q_TRACKDEL=0)]) == [("1.0", "inferred")]
 
 
+def test_what_fits_one_version_only_settles_the_frames_behind_it() -> None:
+    """Cut out of a session: message 146 fits every version, 132 only the one with 1 bit."""
+    frames = [acknowledged(), request("1.0", Q_TRACKDEL=0), acknowledged()]
+    found = [message for _, message in fishplate.decode_frames(frames)]
+    assert [each.version for each in found] == ["2.1", "1.0", "1.0"]
+    assert [each.version_from for each in found] == ["assumed", "inferred", "inferred"]
+    assert found[-1].fitting == ("1.0", "2.1")
+
+
+def test_what_was_inferred_gives_way_to_what_fits_alone() -> None:
+    """The 1 bit of X = 1 and the 5 bits of X = 2 in turn."""
+    frames = [request("1.0", Q_TRACKDEL=0), request("2.1", Q_MARQSTREASON=1), acknowledged()]
+    assert versions(frames) == [("1.0", "inferred"), ("2.1", "assumed"), ("1.0", "inferred")]
+
+
 def test_each_source_is_a_capture_of_its_own() -> None:
     other = Frame(acknowledged().data, acknowledged().bits, source="other")
     assert versions([trackside("1.0"), acknowledged(), other])[1:] == [

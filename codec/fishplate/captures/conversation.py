@@ -35,6 +35,7 @@ class Heard:
         self.trackside: str | None = None
         self.ordered: str | None = None
         self.supported: tuple[str, ...] = ()
+        self.inferred: str | None = None
 
     def hear(self, message: Message) -> None:
         """Take in what a message says, if it says anything of versions."""
@@ -114,8 +115,14 @@ class CaptureDecoder:
         if frame.version is not None:
             return self._read(frame, "radio", frame.version)
         told = self.heard.version(message.direction)
-        if told is None:
-            return self._read(frame, "radio", self.version) if self.version else message
+        if told is not None:
+            return self._as_told(frame, message, told)
+        if self.version is not None:
+            return self._read(frame, "radio", self.version)
+        return self._as_before(frame, message)
+
+    def _as_told(self, frame: Frame, message: Message, told: str) -> Message:
+        """Read a frame in the version that earlier frames named, if that fits."""
         if told == message.version and not message.problems:
             message.version_from = "capture"
             return message
@@ -125,6 +132,22 @@ class CaptureDecoder:
             message.told = told
             return message
         again.version_from = "capture"
+        return again
+
+    def _as_before(self, frame: Frame, message: Message) -> Message:
+        """Read a frame of which nothing says the version as the last one that only fitted some."""
+        before = self.heard.inferred
+        if message.version_from == "inferred" and before not in message.fitting:
+            self.heard.inferred = message.version
+            return message
+        if before in (None, message.version):
+            return message
+        again = self._read(frame, "radio", before)
+        if again.problems:
+            return message
+        again.version_from = "inferred"
+        others = message.fitting or (message.version,)
+        again.fitting = (again.version, *(each for each in others if each != again.version))
         return again
 
     def _read(self, frame: Frame, medium: str | None, version: str | None) -> Message:
