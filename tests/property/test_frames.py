@@ -204,7 +204,9 @@ def check_prefixes(seed: int, cuts: int | None = None, edition: Edition = USUAL)
         assert str(error) == str(caught.value)
         whole = [row for row in rows if row.offset + row.width <= cut]
         at = next(row.path[:2] for row in rows if cut < row.offset + row.width)
-        if at[0] == "packets" and "form" in tree["packets"][at[1]]:
+        forms = book_of(edition).forms
+        number = tree["packets"][at[1]]["NID_PACKET"] if at[0] == "packets" else None
+        if (tree["direction"], number) in forms:
             # Which form it is can be told only when all of it is there.
             seen, whole = ([row for row in each if row.path[:2] != at] for each in (seen, whole))
         assert seen == whole, cut

@@ -6,11 +6,13 @@ is tried before all others, elsewhere, and wins wherever it fits.
 
 from __future__ import annotations
 
+from contextlib import suppress
 from typing import TYPE_CHECKING, Protocol
 
 from fishplate.engine.runtime import codec
+from fishplate.errors import DecodeError
 from fishplate.frames import quick
-from fishplate.frames.sizes import MESSAGE_START
+from fishplate.frames.sizes import LONGEST_PACKET, LONGEST_PADDING, MESSAGE_START
 from fishplate.standard.editions import DEFAULT_VERSION, EDITIONS, Edition, edition, version_key
 from fishplate.standard.vocabulary import TO_TRAIN
 
@@ -50,7 +52,7 @@ def infer_version(
         if usual or each != edition(each.version, issue) or issue not in (None, each.issue):
             continue
         if each.layouts not in read:
-            read[each.layouts] = _read(each, n, size, direction, careful)
+            read[each.layouts] = _read(each, n, size, direction, issue, careful)
         message = read[each.layouts]
         if message is not None and _may_hold(each, message):
             fitting.append(each)
@@ -65,13 +67,51 @@ def infer_version(
 
 
 def _read(
-    each: Edition, n: int, size: int, direction: str | None, careful: Careful
+    each: Edition,
+    n: int,
+    size: int,
+    direction: str | None,
+    issue: str | None,
+    careful: Careful,
 ) -> Message | None:
+    # With an issue given, the usual version has not been tried.
+    if issue is None and not _may_fit(each, n, size):
+        return None
     message = quick.read_radio_as(each, n, size, direction)
     if message is None and any(codec(each.version, each.issue).forms.values()):
-        message = careful(n, size, direction, (each.version, each.issue), strict=False)
-        message = None if message.problems else message
+        # Strictly: a message that does not fit is given up at its first trouble.
+        with suppress(DecodeError):
+            message = careful(n, size, direction, (each.version, each.issue), strict=True)
     return message
+
+
+def _may_fit(each: Edition, n: int, size: int) -> bool:
+    """Tell whether lengths lead to the end, and anything is laid out otherwise than usual.
+
+    What the usual version stumbled over, the same layouts of another one would stumble over too.
+    """
+    number = n >> size - 8
+    way, usual = quick.ways_of(each).get(number), quick.WAYS.get(number)
+    if way is None:
+        return False
+    try:
+        _, left = way.read(n, size)
+    except ValueError:
+        return False
+    forms = codec(each.version, each.issue).forms[way.direction]
+    otherwise = usual is None or way.read is not usual.read
+    while left > LONGEST_PADDING:
+        if left < way.head:
+            return False
+        word = n >> left - way.head
+        length, packet = word & LONGEST_PACKET, word >> way.head - 8 & 255
+        known_here = packet in way.readers or packet in forms
+        if not known_here or not way.head <= length <= left:
+            return False
+        known = usual.readers.get(packet) if usual else None
+        otherwise = otherwise or packet in forms or way.readers.get(packet) is not known
+        left -= length
+    return otherwise
 
 
 def _may_hold(each: Edition, message: Message) -> bool:
