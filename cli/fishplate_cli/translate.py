@@ -44,7 +44,8 @@ Translate frames into another system version: 1.0, 1.1, 2.0 or 2.1.
 The rules are those of SUBSET-026 chapter 6. They are published for data of X = 1 to the train and
 for data to the track from X = 2; the opposite directions are their reverse, marked as derived.
 What is mapped, defaulted, dropped or rejected is said with its clause: behind each frame, under
-changes in json and jsonl, on standard error otherwise."""
+changes in json and jsonl, on standard error otherwise. One spare code in a message of X = 1 to the
+train rejects the whole message, as 6.6.3.1.1 has it."""
 
 NO_MAPPING = "expected one mapping of variables and their values"
 MARK = "~"
@@ -250,7 +251,7 @@ def _text(translated: Iterable[Translated]) -> None:
         if number:
             write("")
         if each.frame is None:
-            title = f"frame {each.source.index}  nothing is sent"
+            title = f"frame {each.source.index}  nothing is left"
             write(style(title, "bold", colour=colour))
         else:
             for line in view.frame(each.frame, _message(each.frame)):

@@ -142,7 +142,7 @@ def test_a_message_that_is_not_sent(fishplate: Callable[..., Any], tmp_path: Pat
     path.write_text(fishplate("encode", "--as", "capture", json.dumps(STOP)).out, encoding="utf-8")
     text = fishplate("translate", "--to", "1.0", path)
     assert text.code == 0
-    assert "nothing is sent" in text.out
+    assert "nothing is left" in text.out
     assert "shifted location" in " ".join(text.out.split())
     captured = fishplate("translate", "--to", "1.0", "--as", "capture", path)
     assert (captured.code, captured.out) == (0, "")
@@ -150,6 +150,40 @@ def test_a_message_that_is_not_sent(fishplate: Callable[..., Any], tmp_path: Pat
     line = json.loads(fishplate("translate", "--to", "1.0", "--as", "jsonl", path).out)
     assert [each["kind"] for each in line["changes"]] == ["rejected"]
     assert "header" not in line
+
+
+def test_one_spare_code_leaves_nothing(fishplate: Callable[..., Any], capture: Path) -> None:
+    # 6.6.3.1.1 and 3.16.1.1.1: Q_DIR 3, in bits 84 and 85 behind a header of 75 and NID_PACKET.
+    line = json.loads(capture.read_text(encoding="utf-8"))
+    line["data"] = in_hex(TRACTION[:83] + "11" + TRACTION[85:])
+    capture.write_text(json.dumps(line) + "\n", encoding="utf-8")
+    ended = fishplate("translate", "--to", "2.1", capture)
+    assert ended.code == 0
+    text = " ".join(ended.out.split())
+    assert "nothing is left" in text
+    assert "packets[0].Q_DIR: the whole message is rejected: Q_DIR 3 (spare)" in text
+    assert "[6.6.3.1.1, lossy]" in text
+
+
+def test_another_issue_is_not_translated(fishplate: Callable[..., Any], tmp_path: Path) -> None:
+    path = tmp_path / "older.txt"
+    path.write_text(in_hex(TRACTION) + "\n", encoding="utf-8")
+    given = ("--medium", "radio", "--direction", "to-train", "--version", "1.0")
+    ended = fishplate("translate", "--to", "2.1", *given, "--issue", "2.3.0", path)
+    assert (ended.code, ended.out) == (3, "")
+    assert "read it without issue 2.3.0" in " ".join(ended.err.split())
+
+
+def test_a_telegram_keeps_its_length(fishplate: Callable[..., Any], tmp_path: Path) -> None:
+    # Header 50, packet 254 23, end flag 8 bits; ones up to 830 (SUBSET-036 4.3.1.2) and to a byte.
+    header = f"1{16:07b}0" + "000" + "000" + "00" + f"{255:08b}" + f"{905:010b}{9060:014b}1"
+    bits = header + f"{254:08b}01{23:013b}" + "1" * 8
+    path = tmp_path / "telegram.txt"
+    path.write_text(in_hex(bits.ljust(832, "1")) + "\n", encoding="utf-8")
+    given = ("--medium", "balise", "--as", "jsonl")
+    tree = json.loads(fishplate("translate", "--to", "2.1", *given, path).out)
+    assert tree["header"]["M_VERSION"] == 33
+    assert (tree["bits"], tree["filler"]["bits"]) == (832, 832 - 81)
 
 
 def test_the_demo_is_translated_whole(fishplate: Callable[..., Any], tmp_path: Path) -> None:

@@ -12,7 +12,10 @@ from typing import TYPE_CHECKING, Any
 
 import pytest
 
+from fishplate.engine.runtime import codec
 from fishplate.translation import routes, tables, to_track, to_train
+from fishplate.translation.consistency import is_spare
+from fishplate.translation.report import Side
 from fishplate.translation.vocabulary import CodeTable, Keep, MapCodes, Renumber, Replace
 from oracle import tables as published
 
@@ -155,6 +158,19 @@ def test_what_issue_3_3_0_says_otherwise() -> None:
 def test_packet_2_is_replaced_by_packet_3() -> None:
     (action,) = to_track.X2_TO_X1["packet", 2].does
     assert action == Replace(3, "telephone_numbers")
+
+
+@pytest.mark.parametrize(
+    "line", CHAPTER_6.table("codes"), ids=lambda line: f"{line['variable']}-{line['code_first']}"
+)
+def test_spare_codes_of_x_1_are_those_that_make_a_message_unusable(
+    line: Mapping[str, str],
+) -> None:
+    # 3.16.1.1.1 with the codes of 6.5.1.5.26 to 6.5.1.5.35.1.
+    side = Side(codec("1.1"), "to-train")
+    spare = line["kind"] in {"spare", "spare_bit"}
+    for code in (line["code_first"], line["code_last"]):
+        assert is_spare(side, line["variable"], int(code)) == spare
 
 
 def rows_of(table: CodeTable) -> set[tuple[str, str, int, int, str, int]]:

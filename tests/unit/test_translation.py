@@ -115,6 +115,53 @@ def test_messages_get_a_reference_that_is_not_shifted(header: Tree) -> None:
     assert [(each.kind, each.stated) for each in refused.changes] == [("rejected", False)]
 
 
+def telegram_of(bits: int, filled: int) -> Tree:
+    """A telegram of 1.0 that takes so many bits with its packet 80 of one profile, then ones."""
+    profile = {"D_MAMODE": 9, "M_MAMODE": 0, "V_MAMODE": 6, "L_MAMODE": 30, "L_ACKMAMODE": 5}
+    # Header 50, end flag 8, packet 80 (6.5.1.5.18) 30 + 54, packet 44 (6.5.1.5.9) 32 and data.
+    size = bits - 50 - 8 - 84 - 32
+    data = {"bits": size, "hex": "00" * ((size + 7) // 8)}
+    packets = (
+        {"NID_PACKET": 80, **HEAD, "profiles": [profile]},
+        {"NID_PACKET": 44, "Q_DIR": 1, "NID_XUSER": 9, "data": data},
+        {"NID_PACKET": 255},
+    )
+    rest = filled - bits
+    ones = (1 << rest) - 1 << -rest % 8
+    filler = {"bits": rest, "hex": f"{ones:0{(rest + 7) // 8 * 2}X}" if rest else ""}
+    return telegram(16, *packets) | {"filler": filler}
+
+
+@pytest.mark.parametrize(
+    ("bits", "before", "after"),
+    # 832 bits are 830 in whole bytes, 216 are 210.
+    [
+        (200, 210, 210),
+        (209, 210, 210),
+        (210, 210, 830),
+        (200, 830, 830),
+        (209, 216, 216),
+        (210, 216, 830),
+        (200, 832, 832),
+    ],
+)
+def test_a_telegram_keeps_its_length_where_it_can(bits: int, before: int, after: int) -> None:
+    # 210 or 830 bits (SUBSET-036 4.3.1.2). With Q_MAMODE the profile takes a bit more.
+    tree = telegram_of(bits, before)
+    assert len(fishplate.encode(tree)) == before
+    result = translate(tree, "2.1")
+    assert result.tree is not None
+    sent = fishplate.encode(result.tree)
+    assert len(sent) == after
+    assert set(sent[bits + 1 :].bin) <= {"1"}
+    longer = [each.message for each in result.changes if each.kind == "lengthened"]
+    said = f"it takes {bits + 1} bits: the telegram of {before} bits becomes one of {after}"
+    assert longer == ([said] if after > before else [])
+    assert not result.lossy
+    # The encoder chooses 210 by itself.
+    assert ("filler" in result.tree) == (after == before != 210)
+
+
 @pytest.mark.parametrize("number", [40, 41])
 def test_reference_of_shunting_answers_is_unknown(number: int) -> None:
     # SUBSET-026 3.6.0, 6.6.3.3.2: NID_LRBG is unknown whatever was received; 3.3.0: unchanged.
@@ -131,15 +178,20 @@ def test_reference_of_shunting_answers_is_unknown(number: int) -> None:
 
 
 def test_message_38_is_not_in_2_1() -> None:
-    # SUBSET-026 3.6.0 has no message 38; 3.3.0, 6.6.3.3.2: unchanged.
+    # SUBSET-026 3.6.0 has no message 38, 3.3.0 has.
     header = {"NID_MESSAGE": 38, "T_TRAIN": 7, "M_ACK": 0, "NID_LRBG": 9060}
-    tree = {**general("1.0"), "header": header, "issue": "2.3.0"}
-    assert translate(tree, "2.1").tree is None
-    older = translate(tree, "2.0")
-    assert older.tree is not None
-    assert older.tree["header"] == header
-    assert translate(older.tree, "2.1").tree is None
-    assert translate(older.tree, "2.1").lossy
+    result = translate({**general("2.0"), "header": header}, "2.1")
+    assert result.tree is None
+    assert result.lossy
+
+
+def test_another_issue_of_version_1_0_is_refused() -> None:
+    # Chapter 6 is about the value lists of X = 1 as it has them (6.5.1.5.26 to .35), not about
+    # those of issue 2.3.0.
+    tree = general("1.0", traction(39, M_TRACTION=3)) | {"issue": "2.3.0"}
+    with pytest.raises(EncodeError, match=r"read it without issue 2\.3\.0") as caught:
+        translate(tree, "2.1")
+    assert caught.value.path == ("issue",)
 
 
 def test_versions_of_the_same_x() -> None:
@@ -185,20 +237,25 @@ def test_frames_that_could_not_be_read_are_errors() -> None:
         translate(["no tree"], "2.1")  # type: ignore[arg-type]  # what is tested
 
 
-def test_packets_that_could_not_be_read_are_dropped() -> None:
-    known = traction(39, M_TRACTION=3)
-    unknown = {"NID_PACKET": 77, "Q_DIR": 1, "content": {"bits": 9, "hex": "AB80"}}
-    longer = {**known, "surplus": {"bits": 2, "hex": "C0"}}
-    result = translate(general("1.0", known, unknown, longer), "2.1")
+UNKNOWN = {"NID_PACKET": 77, "Q_DIR": 1, "content": {"bits": 9, "hex": "AB80"}}
+
+
+@pytest.mark.parametrize(("source", "to"), [("1.0", "2.1"), ("2.1", "1.0"), ("2.0", "2.1")])
+def test_packets_of_an_unknown_number_are_dropped(source: str, to: str) -> None:
+    result = translate(general(source, UNKNOWN), to)
     assert result.tree is not None
-    assert len(result.tree["packets"]) == 1
-    dropped = [each for each in result.changes if each.kind == "dropped"]
-    assert [(each.path, each.lossy) for each in dropped] == [
-        (("packets", 1), True),
-        (("packets", 2), True),
-    ]
-    assert "9 bits" in dropped[0].message
-    assert "2 bits" in dropped[1].message
+    assert result.tree["packets"] == []
+    (change,) = result.changes
+    assert (change.kind, change.path) == ("dropped", ("packets", 0))
+    assert (change.clause, change.stated, change.lossy) == ("6.6.3.1.1", False, True)
+    assert "9 bits" in change.message
+
+
+def test_packets_that_could_not_be_read_are_dropped_on_the_other_ways() -> None:
+    longer = {**traction(39, M_VOLTAGE=0), "surplus": {"bits": 2, "hex": "C0"}}
+    (change,) = translate(general("2.1", longer), "1.0").changes
+    assert (change.kind, change.clause, change.stated) == ("dropped", "6.6.3.1.1", False)
+    assert "2 bits" in change.message
 
 
 def test_padding_of_more_than_a_byte_is_dropped() -> None:

@@ -10,6 +10,7 @@ import pytest
 
 import fishplate
 from fishplate.translation import translate
+from fishplate.translation.routes import NEEDS_1_1
 from unit.translated import (
     HEAD,
     Tree,
@@ -22,6 +23,7 @@ from unit.translated import (
     profiles,
     speeds,
     suitabilities,
+    telegram,
     text,
     traction,
 )
@@ -78,6 +80,32 @@ NO_COUNTERPART = {
     "27 does not replace": (
         speeds({"Q_DIFF": 2, "NC_DIFF": 1, "V_DIFF": 16}),
         speeds({"NC_DIFF": 10, "V_DIFF": 16}),
+    ),
+    # 1 and 2 say the same category: the lower speed stays.
+    "27 replacing and not": (
+        speeds(
+            {"Q_DIFF": 1, "NC_DIFF": 1, "V_DIFF": 18},
+            {"Q_DIFF": 2, "NC_DIFF": 1, "V_DIFF": 16},
+            {"Q_DIFF": 1, "NC_DIFF": 0, "V_DIFF": 20},
+            {"Q_DIFF": 2, "NC_DIFF": 0, "V_DIFF": 22},
+        ),
+        speeds({"NC_DIFF": 10, "V_DIFF": 16}, {"NC_DIFF": 9, "V_DIFF": 20}),
+    ),
+    # Table 3d: C2, C3 and C4 are 20 t.
+    "51 categories of one load": (
+        loads(
+            {"M_AXLELOADCAT": 4, "V_AXLELOAD": 16},
+            {"M_AXLELOADCAT": 5, "V_AXLELOAD": 14},
+            {"M_AXLELOADCAT": 6, "V_AXLELOAD": 15},
+        ),
+        loads({"M_AXLELOAD": 40, "V_AXLELOAD": 14}),
+    ),
+    # Table 3d: D3 is 22.5 t; the gauge before it goes.
+    "70 axle load": (
+        suitabilities(
+            {"Q_SUITABILITY": 0, "M_LINEGAUGE": 3}, {"Q_SUITABILITY": 1, "M_AXLELOADCAT": 8}
+        ),
+        suitabilities({"Q_SUITABILITY": 1, "M_AXLELOAD": 45, "D_SUITABILITY": 200}),
     ),
     "51 heavier category": (
         loads({"M_AXLELOADCAT": 9, "V_AXLELOAD": 16}),
@@ -151,3 +179,45 @@ def test_an_element_too_far_away_is_left_out() -> None:
     assert [each["D_SUITABILITY"] for each in found["suitabilities"]] == [100]
     places = [each.path for each in translate(general("1.0", packet), "2.1").changes]
     assert ("packets", 0, "suitabilities", 2) in places
+
+
+def test_a_category_that_may_replace_more_is_said() -> None:
+    # Q_DIFF 2 (7.5.1.102.1 of 3.6.0): the speed does not replace that of the cant deficiency.
+    packet = speeds({"Q_DIFF": 2, "NC_DIFF": 1, "V_DIFF": 16})
+    (change,) = translate(general("2.1", packet), "1.0").changes
+    assert (change.kind, change.lossy, change.stated) == ("mapped", True, False)
+    assert change.message.endswith("with X = 1 it may replace the speed for the cant deficiency")
+
+
+NEWER = {
+    2: {"NID_PACKET": 2, "Q_DIR": 1, "M_VERSION": 33},
+    6: {"NID_PACKET": 6, "Q_DIR": 1, "Q_VBCO": 0, "NID_VBCMK": 1, "NID_C": 905},
+    135: {"NID_PACKET": 135, "Q_DIR": 1},
+    145: {"NID_PACKET": 145, "Q_DIR": 1},
+    200: {"NID_PACKET": 200, "Q_DIR": 1, "NID_VBCMK": 1},
+    239: traction(239, M_VOLTAGE=0),
+}
+
+
+@pytest.mark.parametrize("number", NEWER)
+def test_packets_that_need_1_1(number: int) -> None:
+    # 6.5.1.7.1 for balises, 6.5.1.7.4 for an RBC.
+    found = translate(telegram(17, NEWER[number]), "1.0")
+    assert [(each.kind, each.clause) for each in found.changes] == [("dropped", "6.5.1.7.1")]
+    by_radio = translate(general("1.1", NEWER[number]), "1.0")
+    clause = "6.5.1.7.4" if number == 239 else "6.5.1.7"
+    assert [each.clause for each in by_radio.changes] == [clause]
+    from_2_1 = translate(telegram(33, NEWER[number]), "1.0") if number < 200 else found
+    assert [each.clause for each in from_2_1.changes] == ["6.5.1.7.1"]
+
+
+def test_packets_that_need_1_1_are_those_of_the_clauses() -> None:
+    # 6.5.1.7.1 to .4: nine of balises, three of loops and radio infill units, four of an RBC.
+    listed = {
+        "balise": {2, 6, 135, 145, 200, 203, 206, 207, 239},
+        "loop": {206, 207, 239},
+        "radio": {203, 206, 207, 239},
+    }
+    assert set(NEEDS_1_1) == {(medium, each) for medium, found in listed.items() for each in found}
+    packets = fishplate.registry("1.1").packets
+    assert {n for (_, n), packet in packets.items() if packet.since} == listed["balise"]

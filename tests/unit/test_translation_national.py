@@ -75,6 +75,10 @@ def test_national_values_take_defaults() -> None:
     assert result.tree is not None
     assert result.tree["packets"] == [JOINED | BRAKING_DEFAULTS]
     assert {(each.kind, each.clause) for each in result.changes} == {("defaulted", "A.3.2")}
+    # [2]: the braking values keep what is stored; that nothing is, the clause does not speak of.
+    stated = [each.message.split()[0] for each in result.changes if each.stated]
+    assert stated == list(NEW_DEFAULTS)
+    assert result.changes[-1].message.endswith("A.3.2 has factors, and no steps to say them in")
     assert len(result.changes) == len(NEW_DEFAULTS) + len(BRAKING_DEFAULTS)
     assert not result.lossy
 
@@ -105,18 +109,65 @@ def test_braking_values_are_joined() -> None:
         assert not result.lossy
 
 
-def test_two_sets_of_national_values_take_their_own() -> None:
-    one, two = NATIONAL | {"Q_DIR": 0}, NATIONAL | {"Q_DIR": 1}
-    slow, fast = BRAKING | {"Q_DIR": 1, "M_NVEBCL": 1}, BRAKING | {"Q_DIR": 0, "M_NVEBCL": 2}
-    found = packets_of(general("1.1", one, two, slow, fast), "2.1")
-    assert [(each["Q_DIR"], each["M_NVEBCL"]) for each in found] == [(0, 2), (1, 1)]
+def ways(*packets: Tree) -> list[tuple[int, int]]:
+    """Direction and confidence level of each packet 3 that becomes of these."""
+    found = packets_of(general("1.1", *packets), "2.1")
+    return [(each["Q_DIR"], each["M_NVEBCL"]) for each in found]
+
+
+def national(way: int) -> Tree:
+    return NATIONAL | {"Q_DIR": way}
+
+
+def braking(way: int, level: int) -> Tree:
+    return BRAKING | {"Q_DIR": way, "M_NVEBCL": level}
+
+
+# SUBSET-026 3.6.0, 6.6.3.2.3 [16], by the directions that Q_DIR names (7.5.1.103): 0 reverse,
+# 1 nominal, 2 both. That those have to agree is common practice, no source.
+
+
+def test_national_values_take_those_of_their_direction() -> None:
+    found = ways(national(0), national(1), braking(1, 1), braking(0, 2))
+    assert found == [(0, 2), (1, 1)]
+    # One of both directions is for whichever has none of its own.
+    assert ways(national(0), national(1), braking(2, 3), braking(1, 1)) == [(0, 3), (1, 1)]
+
+
+def test_braking_values_for_both_directions_serve_several() -> None:
+    packets = (national(0), national(1), braking(2, 3))
+    assert ways(*packets) == [(0, 3), (1, 3)]
+    joined = [each for each in kinds(general("1.1", *packets), "2.1") if each[0] == "joined"]
+    # Lossy: that they were for both is not told any more.
+    assert joined == [("joined", ("packets", 2), True)]
+
+
+def test_braking_values_of_the_opposite_direction_are_not_taken() -> None:
+    packets = (national(1), braking(0, 3))
+    # Default of A.3.2.
+    assert ways(*packets) == [(1, 9)]
+    changes = translate(general("1.1", *packets), "2.1").changes
+    (refused,) = [each for each in changes if each.kind == "rejected"]
+    assert (refused.path, refused.stated, refused.lossy) == (("packets", 1), False, True)
+    assert "for its direction" in refused.message
+
+
+def test_braking_values_for_one_direction_are_taken_for_both() -> None:
+    packets = (national(2), braking(1, 3))
+    assert ways(*packets) == [(2, 3)]
+    changes = translate(general("1.1", *packets), "2.1").changes
+    (joined,) = [each for each in changes if each.kind == "joined"]
+    assert joined.lossy
+    assert joined.message.endswith("for both directions, although it is for one of them only")
 
 
 def test_braking_values_alone_are_left_out() -> None:
     # SUBSET-026 3.6.0, 6.5.1.7.5: packet 203 is sent together with packet 3 only.
     tree = general("1.1", BRAKING)
     assert packets_of(tree, "2.1") == []
-    assert kinds(tree, "2.1") == [("rejected", ("packets", 0), True)]
+    (change,) = translate(tree, "2.1").changes
+    assert (change.kind, change.path, change.lossy) == ("rejected", ("packets", 0), True)
+    assert change.clause == "6.5.1.7.5"
 
 
 def test_national_values_without_area_are_left_out() -> None:
@@ -147,6 +198,11 @@ def test_validity_from_now_on_has_no_code_in_1_0() -> None:
     assert only(there, "2.1")["D_VALIDNV"] == 32767
     (change,) = [each for each in translate(there, "2.1").changes if each.kind == "differs"]
     assert change.path == ("packets", 0, "D_VALIDNV")
+    # Steps of 1 m with Q_SCALE 1, of 10 m with 2 (7.5.1.129).
+    assert "D_VALIDNV 32767 (32767 m) stays" in change.message
+    wide = general("1.0", NATIONAL | {"D_VALIDNV": 32767, "Q_SCALE": 2})
+    (change,) = [each for each in translate(wide, "2.1").changes if each.kind == "differs"]
+    assert "D_VALIDNV 32767 (327670 m) stays" in change.message
     back = general("2.1", JOINED | BRAKING_DEFAULTS | {"D_VALIDNV": 32767})
     assert only(back, "1.0")["D_VALIDNV"] == 0
     assert ("mapped", ("packets", 0, "D_VALIDNV"), True) in kinds(back, "1.0")

@@ -66,7 +66,8 @@ def test_train_data() -> None:
             **to_track(version, {"NID_MESSAGE": 129}, POSITION, TRAIN_1),
             "issue": "3.6.0",
         }
-        assert all(each.stated for each in result.changes)
+        # The stored number is sent (6.6.3.4.5); what is sent where none is stored is not said.
+        assert [each.kind for each in result.changes if not each.stated] == ["defaulted"]
         lost = {each.path[-1] for each in result.changes if each.lossy}
         assert lost == {"M_LOADINGGAUGE", "M_AXLELOADCAT", "N_AXLE", "tractions"}
     stored = {"NID_OPERATIONAL": "9092"}
@@ -115,6 +116,7 @@ def test_a_message_without_its_train_data_is_not_sent() -> None:
     assert result.tree is None
     last = result.changes[-1]
     assert (last.kind, last.path) == ("rejected", ("header", "NID_MESSAGE"))
+    assert not last.stated
 
 
 @pytest.mark.parametrize(("mode", "wanted"), [(15, 3), (12, 12), (13, 13), (0, 0)])
@@ -167,7 +169,7 @@ def test_supported_versions_give_way_to_telephone_numbers(version: str, clause: 
     tree = to_track("2.1", SESSION, VERSIONS)
     assert only(tree, version) == {"NID_PACKET": 3, "telephone_numbers": []}
     kinds = [(each.kind, each.clause, each.stated) for each in translate(tree, version).changes]
-    assert kinds == [("replaced", clause, True), ("defaulted", "6.5.1.5.25.1", True)]
+    assert kinds == [("replaced", clause, True), ("defaulted", "6.5.1.5.25.1", False)]
     stored = {"telephone_numbers": ["00499050900", {"NID_RADIO": "00499050901"}]}
     assert packets_of(tree, version, stored=stored) == [
         {
@@ -220,9 +222,16 @@ def test_answers_to_an_emergency_stop(version: str, code: int, wanted: int) -> N
     result = translate(tree, "1.0")
     assert result.tree is not None
     assert result.tree["header"]["Q_EMERGENCYSTOP"] == wanted
-    assert any("unconditional" in each.message for each in result.changes) == (
-        version == "2.0" and code == 3
-    )
+    guessed = version == "2.0" and code == 3
+    assert any("unconditional" in each.message for each in result.changes) == guessed
+    if guessed:
+        (change,) = result.changes
+        assert (change.stated, change.lossy) == (False, True)
+        assert change.message == (
+            "Q_EMERGENCYSTOP 3 (stop rejected) becomes Q_EMERGENCYSTOP 1 (conditional stop "
+            "rejected): 2.0 does not say whether the stop was conditional; of an unconditional "
+            "one X = 1 reports 2"
+        )
 
 
 @pytest.mark.parametrize(("code", "wanted"), [(0, 0), (1, 3), (2, 2), (3, None)])
@@ -240,3 +249,36 @@ def test_texts_acknowledged_are_not_reported(version: str) -> None:
     assert result.tree is None
     assert [(each.kind, each.path) for each in result.changes] == [("rejected", ("header",))]
     assert result.lossy
+
+
+def test_codes_that_2_1_reads_otherwise_are_said() -> None:
+    # 7.5.1.107 and 7.5.1.118.3 in the codes of issues 3.3.0 and 3.6.0: Q_EMERGENCYSTOP
+    # 2 and 3, and bit 2 of Q_MARQSTREASON; 0 and 1 differ in words only.
+    for code in range(4):
+        header: Tree = {"NID_MESSAGE": 147, "NID_EM": 9, "Q_EMERGENCYSTOP": code}
+        for source, to in (("2.0", "2.1"), ("2.1", "2.0")):
+            result = translate(to_track(source, header, POSITION), to)
+            assert result.tree is not None
+            assert result.tree["header"]["Q_EMERGENCYSTOP"] == code
+            assert [each.kind for each in result.changes] == ["differs"] * (code > 1)
+    asked = to_track("2.0", {"NID_MESSAGE": 132, "Q_MARQSTREASON": 3}, POSITION)
+    (change,) = translate(asked, "2.1").changes
+    assert (change.kind, change.path) == ("differs", ("header", "Q_MARQSTREASON"))
+    assert "pre-indication" in change.message
+    assert change.message.endswith("perturbation location reached in version 2.1")
+    other = to_track("2.0", {"NID_MESSAGE": 132, "Q_MARQSTREASON": 9}, POSITION)
+    assert not translate(other, "2.1").changes
+
+
+def test_no_telephone_numbers_are_no_loss() -> None:
+    tree = to_track("1.0", SESSION, {"NID_PACKET": 3, "telephone_numbers": []})
+    assert not translate(tree, "2.1").lossy
+
+
+def test_traction_systems_that_are_not_sent_are_named() -> None:
+    # 6.6.3.4.5: packet 11 has no traction list (N_ITER 0).
+    result = translate(to_track("2.1", {"NID_MESSAGE": 129}, POSITION, TRAIN_2), "1.0")
+    said = {each.path[-1]: each.message for each in result.changes}
+    assert "NID_CTRACTION 13" in said["tractions"]
+    assert "M_VOLTAGE 0" in said["tractions"]
+    assert said["N_AXLE"] == "N_AXLE 24 is left out: packet 11 of version 1.0 has none"

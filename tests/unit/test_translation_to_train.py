@@ -125,12 +125,16 @@ STATED = [pytest.param(*case, id=name) for name, case in CASES.items()]
 @pytest.mark.parametrize(("packet", "wanted"), STATED)
 def test_packets_to_the_train(packet: Tree, wanted: Tree) -> None:
     # SUBSET-026 3.6.0, 6.6.3.2.3; the bracketed exceptions are those of that clause.
-    result = translate(general("1.1", packet), "2.1")
+    version = "1.1" if packet["NID_PACKET"] > 200 else "1.0"
+    result = translate(general(version, packet), "2.1")
     assert result.tree == {
         **general("2.1", wanted),
         "issue": "3.6.0",
     }
-    assert all(each.stated and each.clause == "6.6.3.2.3" for each in result.changes)
+    assert all(each.clause == "6.6.3.2.3" for each in result.changes)
+    # That an element stays where it was when the one before it goes is our own reading.
+    derived = [each.path[-1] for each in result.changes if not each.stated]
+    assert derived == (["D_SUITABILITY"] if len(packet.get("suitabilities", ())) > 2 else [])
 
 
 BACK = {
@@ -210,16 +214,17 @@ def test_packets_that_are_rejected(packet: Tree) -> None:
 
 
 def test_fixed_texts_are_rejected() -> None:
-    # Issue 2.3.0 defines packet 76 (7.4.2.23); X = 1 is not to use it: 3.6.0, 6.6.3.2.3.
-    packet = text(Q_TEXTCONFIRM=0) | {"NID_PACKET": 76, "Q_TEXT": 0}
-    del packet["X_TEXT"]
-    tree = general("1.0", packet) | {"issue": "2.3.0"}
-    assert packets_of(tree, "2.1") == []
-    assert kinds(tree, "2.1") == [("rejected", ("packets", 0), True)]
+    # X = 1 is not to use packet 76 (6.5.1.5.2) and has no layout for it: rejected, 6.6.3.2.3.
+    packet = {"NID_PACKET": 76, "Q_DIR": 1, "content": {"bits": 9, "hex": "AB80"}}
+    result = translate(general("1.0", packet), "2.1")
+    assert result.tree is not None
+    assert result.tree["packets"] == []
+    (change,) = result.changes
+    assert (change.kind, change.path, change.stated) == ("rejected", ("packets", 0), True)
 
 
 def test_names_of_older_issues_follow_their_lineage() -> None:
-    # T_LOA and V_LOA of issues 2.3.0 and 3.3.0 are T_EMA and V_EMA of 3.6.0 (7.5.1.149, .155).
+    # T_LOA and V_LOA of issue 3.3.0 are T_EMA and V_EMA of 3.6.0 (7.5.1.149, .155).
     older = {
         "NID_PACKET": 15,
         **HEAD,
@@ -234,19 +239,50 @@ def test_names_of_older_issues_follow_their_lineage() -> None:
     }
     names = {"V_LOA": "V_EMA", "T_LOA": "T_EMA"}
     newer = {names.get(name, name): value for name, value in older.items()}
-    for version, issue in (("1.0", "2.3.0"), ("2.0", "3.3.0")):
-        assert only(general(version, older) | {"issue": issue}, "2.1") == newer
+    assert only(general("2.0", older), "2.1") == newer
     assert only(general("2.1", newer), "2.0") == older
     assert only(general("2.1", newer), "1.0") == newer
 
 
 def test_what_issue_3_3_0_says_otherwise() -> None:
     # SUBSET-026 3.3.0, 6.6.3.2.3: packet 58 is rejected with M_LOC 3, packet 140 unchanged.
-    reports = {"NID_PACKET": 58, **HEAD, "T_CYCLOC": 255, "D_CYCLOC": 100, "M_LOC": 3}
+    reports: Tree = {"NID_PACKET": 58, **HEAD, "T_CYCLOC": 255, "D_CYCLOC": 100, "M_LOC": 3}
     reports |= {"locations": []}
     number = {"NID_PACKET": 140, "Q_DIR": 1, "NID_OPERATIONAL": "F9F092"}
     tree = general("1.0", reports, number)
     assert packets_of(tree, "2.0") == [number]
-    assert packets_of(tree, "2.1") == [reports, number | {"NID_OPERATIONAL": "9092"}]
+    # For 3.6.0 it is a spare code like others (7.5.1.69), so the message is rejected.
+    assert translate(tree, "2.1").tree is None
+    assert packets_of(general("1.0", number), "2.1") == [number | {"NID_OPERATIONAL": "9092"}]
     fine = general("1.0", reports | {"M_LOC": 1})
     assert packets_of(fine, "2.0") == [reports | {"M_LOC": 1}]
+
+
+@pytest.mark.parametrize(
+    ("number", "other", "packet"),
+    [
+        (39, 239, traction(39, M_TRACTION=3)),
+        (68, 206, conditions(68, "M_TRACKCOND", 4)),
+        (70, 207, {"NID_PACKET": 70, **HEAD, "Q_TRACKINIT": 1, "D_TRACKINIT": 250}),
+    ],
+)
+def test_what_1_1_had_is_no_more_told(number: int, other: int, packet: Tree) -> None:
+    # 6.6.3.2.3 gives packets 206, 207 and 239 the numbers 68, 70 and 39: which it was is lost.
+    older, newer = (translate(general(version, packet), "2.1") for version in ("1.0", "1.1"))
+    assert older.tree == newer.tree
+    assert not older.lossy
+    assert f"packet {other}" in newer.changes[-1].message
+    assert newer.changes[-1].lossy
+    assert only(newer.tree or {}, "1.1")["NID_PACKET"] == other
+    assert only(newer.tree or {}, "1.0")["NID_PACKET"] == number
+
+
+def test_a_distance_that_grows_is_said() -> None:
+    packet = conditions(68, "M_TRACKCOND", 5, 2, 4)
+    changes = translate(general("2.1", packet | {"Q_SCALE": 2}), "1.0").changes
+    # Steps of 10 m (7.5.1.129).
+    (change,) = [each for each in changes if each.kind == "mapped"]
+    assert change.path == ("packets", 0, "conditions", 2, "D_TRACKCOND")
+    assert change.message == (
+        "D_TRACKCOND 100 (1000 m) becomes D_TRACKCOND 200 (2000 m): it stays where it is"
+    )

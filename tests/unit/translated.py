@@ -5,9 +5,14 @@ Layouts: SUBSET-026 issue 3.6.0, 6.5.1.5 for X = 1, 7.4.2 for X = 2.
 
 from __future__ import annotations
 
-from typing import Any
+from typing import TYPE_CHECKING, Any
 
+from fishplate.meaning import explain
 from fishplate.translation import translate
+from property.trees import Maker
+
+if TYPE_CHECKING:
+    from collections.abc import Callable, Sequence
 
 Tree = dict[str, Any]
 
@@ -126,3 +131,24 @@ def text(**codes: int) -> Tree:
         **codes,
         "X_TEXT": "mind the sheep",
     }
+
+
+class UsableMaker(Maker):
+    """Draws no spare codes, of which one makes a message unusable (3.16.1.1.1)."""
+
+    def code(self, name: str) -> int | str:
+        """Draw a code that has a meaning."""
+        return self._until_it_means_something(name, lambda: super(UsableMaker, self).code(name))
+
+    def flag(self, name: str, codes: Sequence[int]) -> int | str:
+        """Draw a code that a condition asks about, and that has a meaning."""
+        draw = super().flag
+        return self._until_it_means_something(name, lambda: draw(name, codes))
+
+    def _until_it_means_something(self, name: str, draw: Callable[[], int | str]) -> int | str:
+        variable = self.codes.variables[name]
+        spare = {each.first for each in variable.codes if each.kind == "spare"}
+        while True:
+            code = draw()
+            if code not in spare and explain(variable, code, 1).kind != "spare":
+                return code

@@ -35,8 +35,9 @@ Tree = dict[str, Any]
 class Translation:
     """A frame in another system version, and what has changed on the way.
 
-    `tree` is None where the whole message is rejected or not sent. Lengths, padding and filler
-    are left to the encoder.
+    `tree` is None where the whole message is rejected or not sent. Lengths and padding are left
+    to the encoder; `filler` stands in it where a balise telegram keeps a length that the encoder
+    would not choose.
     """
 
     tree: Tree | None
@@ -56,8 +57,8 @@ def translate(
     `to` is 1.0, 1.1, 2.0 or 2.1. `stored` are values the on-board unit holds and the message may
     lack: those of packet 3, any subset, codes or meanings; for data to the track NID_OPERATIONAL
     and `telephone_numbers`. Without them defaults are taken, and reported. Raises `EncodeError`
-    where the frame could not be read, where a version has no rules, or where the result does not
-    fit its medium.
+    where the frame could not be read, where a version has no rules or was read as another issue
+    lays it out, or where the result does not fit its medium.
     """
     message = source if isinstance(source, Message) else _message_of(source)
     if message.version == to and edition(to):
@@ -66,6 +67,7 @@ def translate(
     _check_version(to, ("version",), "to")
     _check_read(message)
     _check_version(message.version, ("version",), "from")
+    _check_issue(message)
     route = ROUTES[message.version, to]
     found, changes = FrameTranslator(message, to, route, stored_values(stored)).translate()
     return Translation(found, tuple(changes))
@@ -104,6 +106,19 @@ def _check_version(version: str, path: tuple[str], way: str) -> None:
             path=path,
             expected=f"one of {', '.join(VERSIONS)}",
             got=version,
+        )
+
+
+def _check_issue(message: Message) -> None:
+    """Raise for a source that was read as another issue lays its version out."""
+    expected = registry(message.version).issue
+    if message.issue != expected:
+        raise EncodeError(
+            f"chapter 6 translates version {message.version} as it lays it out: "
+            f"read it without issue {message.issue}",
+            path=("issue",),
+            expected=expected,
+            got=message.issue,
         )
 
 

@@ -10,10 +10,12 @@ from fishplate.frames import decode, encode_bits
 from fishplate.frames.sizes import HEADS
 from fishplate.standard.editions import version_key
 from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN
-from fishplate.translation.actions import DOES, Surroundings
-from fishplate.translation.piece import LENGTHS, Piece
+from fishplate.translation.actions import DOES
+from fishplate.translation.consistency import first_fault, is_read, unexplained_bits
+from fishplate.translation.length import keep_length
+from fishplate.translation.piece import LENGTHS, Piece, Surroundings
 from fishplate.translation.report import Report, Side
-from fishplate.translation.vocabulary import Keep, Rule
+from fishplate.translation.vocabulary import Keep, Reject, Rule
 from fishplate.versions import version_code
 
 if TYPE_CHECKING:
@@ -27,9 +29,11 @@ if TYPE_CHECKING:
 
 Tree = dict[str, Any]
 
-UNEXPLAINED = ("content", "surplus")
 UNREAD: Tree = {"NID_PACKET": -1}
 """Stands for a packet that nothing can be taken from."""
+
+LENGTH = "8.4.2.1"
+"""The clause that puts the end flag into a telegram, whatever its length."""
 
 COMPUTED = ("filler", "padding", "evidence")
 
@@ -49,14 +53,14 @@ class FrameTranslator:
         packets = [self.report.source.lineages(each) for each in message.packets]
         self.around = Surroundings(
             medium=message.medium or "",
-            packets=tuple(each if _read(each) else UNREAD for each in packets),
+            packets=tuple(each if is_read(each) else UNREAD for each in packets),
             stored=stored,
             known={"versions": [{"M_VERSION": version_code(message.version)}]},
         )
 
     def translate(self) -> tuple[Tree | None, Sequence[Change]]:
         """Return the tree of the target (None: nothing is sent) and what has changed."""
-        header = self._header()
+        header = None if self._is_inconsistent() else self._header()
         if header is None:
             return None, self.report.changes
         packets: list[Tree] = []
@@ -76,7 +80,23 @@ class FrameTranslator:
             "header": header,
             "packets": packets,
         }
-        return _checked(tree, self.target), self.report.changes
+        found = _checked(tree, self.target)
+        self._set_rule(LENGTH)
+        keep_length(found, self.message, self.report)
+        return found, self.report.changes
+
+    def _is_inconsistent(self) -> bool:
+        """Tell whether the message is rejected before anything is translated; and say so."""
+        if not self.book.checked:
+            return False
+        fault = first_fault(self.message, self.report.source, self.book.passed)
+        if fault is None:
+            return False
+        path, reason = fault
+        self._set_rule(self.book.unread)
+        sentence = f"the whole message is rejected: {reason}"
+        self.report.say("rejected", path, sentence, lossy=True)
+        return True
 
     def _header(self) -> Tree | None:
         header = self.message.header
@@ -94,10 +114,10 @@ class FrameTranslator:
     def _packet(self, place: int, packets: list[Tree]) -> None:
         packet = self.message.packets[place]
         path = ("packets", place)
-        if not _read(packet):
+        piece = Piece(packet, path, self.report)
+        if not is_read(packet) and not self._is_rejected_unread(piece.number):
             self._say_unread(packet, place)
             return
-        piece = Piece(packet, path, self.report)
         self._apply(piece, ("packet", piece.number), self.book.packets)
         if piece.refused or self._has_no_place(piece):
             return
@@ -117,6 +137,11 @@ class FrameTranslator:
         piece.prune()
         piece.say_what_differs()
 
+    def _is_rejected_unread(self, number: int) -> bool:
+        """Tell whether a rule rejects a packet whatever it holds."""
+        rule = self.book.rules.get(("packet", number))
+        return rule is not None and isinstance(rule.does[0], Reject)
+
     def _set_rule(self, clause: str) -> None:
         self.report.clause = clause
         self.report.stated = self.book.stated
@@ -127,8 +152,11 @@ class FrameTranslator:
         source = self.report.source
         found = target.packets.get((self.direction, piece.number))
         title = source.packet(piece.source["NID_PACKET"])
-        if found is None or (found.since and version_key(found.since) > version_key(version)):
-            self._set_rule(self.book.absent)
+        later = found is not None and _is_later(found.since, version)
+        if found is None or later:
+            absent = self.book.absent
+            key = (self.around.medium, piece.number)
+            self._set_rule(self.book.newer.get(key, absent) if later else absent)
             sentence = f"{title} has no place in version {version}"
             self.report.say("dropped", piece.path, sentence, lossy=True)
             return True
@@ -163,10 +191,10 @@ class FrameTranslator:
 
     def _say_unread(self, packet: Tree, place: int) -> None:
         self._set_rule(self.book.unread)
-        bits = next(packet[name]["bits"] for name in UNEXPLAINED if name in packet)
         title = self.report.source.packet(packet["NID_PACKET"])
+        bits = unexplained_bits(packet)
         sentence = f"{title} is left out: no layout explains {bits} bits of it"
-        self.report.say("dropped", ("packets", place), sentence, lossy=True)
+        self.report.say("dropped", ("packets", place), sentence, lossy=True, stated=False)
 
     def _lacks_required(self, packets: Sequence[Tree]) -> bool:
         """Tell whether a message has lost a packet that it cannot be sent without; and say so."""
@@ -181,15 +209,16 @@ class FrameTranslator:
             wanted = " or ".join(map(str, missing))
             title = self.report.source.message(key[1])
             sentence = f"{title} is left out: it is not sent without packet {wanted}"
-            self.report.say("rejected", ("header", "NID_MESSAGE"), sentence, lossy=True)
+            path = ("header", "NID_MESSAGE")
+            self.report.say("rejected", path, sentence, lossy=True, stated=False)
         return bool(missing)
 
     def _problem_places(self) -> set[object]:
         return {each.path[0] for each in self.message.problems if each.path}
 
 
-def _read(packet: Tree) -> bool:
-    return not any(name in packet for name in UNEXPLAINED)
+def _is_later(since: str, version: str) -> bool:
+    return bool(since) and version_key(since) > version_key(version)
 
 
 def _carries(message: RadioMessage, number: int) -> bool:

@@ -2,13 +2,13 @@
 
 from __future__ import annotations
 
-from typing import TYPE_CHECKING, Any
+from typing import TYPE_CHECKING, Any, NamedTuple
 
 from fishplate.engine.walk import holds
-from fishplate.translation.report import METRES, declared_otherwise
+from fishplate.translation.report import METRES, declared_otherwise, same_meaning
 
 if TYPE_CHECKING:
-    from collections.abc import Iterator, Sequence
+    from collections.abc import Iterator, Mapping, Sequence
 
     from fishplate.errors import Path
     from fishplate.standard.vocabulary import Condition
@@ -19,6 +19,15 @@ Tree = dict[str, Any]
 LENGTHS = ("L_PACKET", "L_MESSAGE")
 FURTHEST = 32767
 """The most that 15 bits of a distance can say."""
+
+
+class Surroundings(NamedTuple):
+    """What stands around a packet: the others of its message, its medium, what is stored."""
+
+    medium: str
+    packets: tuple[Tree, ...]
+    stored: Mapping[str, Any]
+    known: Mapping[str, Any]
 
 
 class Piece:
@@ -49,6 +58,14 @@ class Piece:
         code = self.tree.get("Q_SCALE")
         return code if isinstance(code, int) else None
 
+    @property
+    def title(self) -> str:
+        """Number and name of the packet or message."""
+        source = self.report.source
+        if self.path[0] == "packets":
+            return source.packet(self.number)
+        return source.message(self.number)
+
     def scopes(self, names: Sequence[str]) -> Iterator[tuple[Path, Tree]]:
         """Yield the scopes that these sets lead to, with their paths; none that is left out."""
         found: list[tuple[Path, Tree]] = [(self.path, self.tree)]
@@ -76,14 +93,17 @@ class Piece:
         scope[name] = value
         self.touched.add((id(scope), name))
 
-    def leave_out(self, scope: Tree, distance: str) -> None:
-        """Mark an element; `distance` counts from it to the next one."""
+    def drop(
+        self, path: Path, scope: Tree, sentence: str, distance: str = "", *, stated: bool = True
+    ) -> None:
+        """Leave out an element; `distance` counts from it to the next one."""
         self.left[id(scope)] = distance
+        self.report.say("dropped", path, sentence, lossy=True, stated=stated)
 
-    def refuse(self, sentence: str, *, stated: bool = True) -> None:
+    def refuse(self, sentence: str, *, clause: str = "", stated: bool = True) -> None:
         """Take over nothing of it."""
         self.refused = True
-        self.report.say("rejected", self.path, sentence, lossy=True, stated=stated)
+        self.report.say("rejected", self.path, sentence, lossy=True, clause=clause, stated=stated)
 
     def prune(self) -> None:
         """Take out what is left out, and refuse a packet of which nothing remains."""
@@ -118,31 +138,48 @@ class Piece:
                     sentence = f"left out with all behind it: {distance} {further} has no code"
                     self.report.say("dropped", (*path, place), sentence, lossy=True, stated=False)
                     break
+                self._say_further(distance, each[distance], further, (*path, place))
                 self.set(each, distance, further)
                 carried = 0
             kept.append(each)
         return kept
 
+    def _say_further(self, distance: str, before: int, further: int, path: Path) -> None:
+        source = self.report.source
+        sentence = (
+            f"{source.said(distance, before, self.scale)} becomes "
+            f"{source.said(distance, further, self.scale)}: it stays where it is"
+        )
+        self.report.say("mapped", (*path, distance), sentence, lossy=False, stated=False)
+
     def say_what_differs(self) -> None:
-        """Report codes that stay as they are and mean another kind of thing to the target."""
+        """Report codes that stay as they are and mean something else to the target."""
+        if self.refused:
+            return
         source, target = self.report.source, self.report.target
         for scope, path, name, code in self._kept:
             if id(scope) in self.left or (id(scope), name) in self.touched:
                 continue
-            if scope.get(name) != code or self.refused:
+            if scope.get(name) != code:
                 continue
             before, after = (each.meaning(name, code, METRES) for each in (source, target))
-            if before is None or after is None or before.kind == after.kind:
+            if before is None or after is None or same_meaning(before, after):
                 continue
-            reads = "is spare" if after.kind == "spare" else f"reads {after.text}"
+            scaled = target.meaning(name, code, self._scale_of(scope))
+            reads = "is spare" if after.kind == "spare" else f"reads {(scaled or after).text}"
             self.report.say(
                 "differs",
                 (*path, name),
-                f"{source.said(name, code, METRES)} stays, and {reads} in version {target.version}",
+                f"{source.said(name, code, self._scale_of(scope))} stays, and {reads} "
+                f"in version {target.version}",
                 lossy=False,
                 clause=target.variables[name].clause,
                 stated=False,
             )
+
+    def _scale_of(self, scope: Tree) -> int | None:
+        code = scope.get("Q_SCALE", self.scale)
+        return code if isinstance(code, int) else METRES
 
     def _doubtful(self, scope: Tree, path: Path) -> Iterator[tuple[Tree, Path, str, Any]]:
         """Yield the codes of variables that the two sides declare differently."""

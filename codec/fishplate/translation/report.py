@@ -10,6 +10,7 @@ from typing import TYPE_CHECKING, Any, Literal
 from fishplate.bits import digits_value
 from fishplate.meaning import Meaning, explain
 from fishplate.standard import registry
+from fishplate.translation.tables import SAME_IN_OTHER_WORDS
 
 if TYPE_CHECKING:
     from collections.abc import Iterable, Mapping
@@ -30,13 +31,14 @@ Kind = Literal[
     "split",
     "replaced",
     "differs",
+    "lengthened",
 ]
 """``mapped``: a code gives way to another; ``inserted``: a value that the target adds;
 ``defaulted``: a default is taken; ``kept``: a stored value is; ``dropped``: the target has no
 place for it; ``rejected``: a rule refuses, ignores or does not send it; ``renumbered``: the packet
 gets another number; ``joined``: a packet goes into another one; ``split``: values go into a packet
 of their own; ``replaced``: a packet gives way to another; ``differs``: a code stays and reads
-otherwise."""
+otherwise, or no longer tells what it told; ``lengthened``: a telegram takes more room."""
 
 METRES = 1
 """The Q_SCALE distances are worded with where only their kind of meaning counts."""
@@ -131,6 +133,12 @@ class Side:
         found = self.book.packets.get((self.direction, number))
         return f"packet {number}, {found.name}," if found else f"packet {number}"
 
+    def one(self, tree: Mapping[str, Any]) -> str:
+        """Return what a packet or header is of, by number and version."""
+        number = tree.get("NID_PACKET")
+        what = f"message {tree['NID_MESSAGE']}" if number is None else f"packet {number}"
+        return f"{what} of version {self.version}"
+
     def message(self, number: int) -> str:
         """Return number and name of a radio message."""
         found = self.book.messages.get((self.direction, number))
@@ -179,6 +187,19 @@ def declared_otherwise(source: tuple[str, str], target: tuple[str, str]) -> froz
         for name in ours.keys() & theirs.keys()
         if (ours[name].codes, ours[name].plain) != (theirs[name].codes, theirs[name].plain)
     )
+
+
+WORDED = frozenset({"value", "special", "set"})
+"""Kinds of meaning that a label says, and not a number."""
+
+
+def same_meaning(one: Meaning, other: Meaning) -> bool:
+    """Tell whether two editions mean the same by a code."""
+    if one.kind != other.kind:
+        return False
+    if one.kind not in WORDED or one.text == other.text:
+        return True
+    return frozenset((one.text, other.text)) in SAME_IN_OTHER_WORDS
 
 
 class Report:

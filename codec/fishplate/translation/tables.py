@@ -120,11 +120,11 @@ TABLE_3B = BitTable(
     ),
 )
 
-TABLE_3_BACKWARDS = CodeTable(
-    "3, backwards",
+TABLE_3_BACKWARDS = reverse(TABLE_3)
+NOT_REPLACING = CodeTable(
+    "3, backwards, Q_DIFF 2",
+    # X = 1 cannot say that a category does not replace the cant deficiency profile.
     (
-        *reverse(TABLE_3).rows,
-        # X = 1 cannot say that a category does not replace the cant deficiency profile.
         Row((("Q_DIFF", 2, 2), ("NC_DIFF", 0, 0)), (("NC_DIFF", 9),)),
         Row((("Q_DIFF", 2, 2), ("NC_DIFF", 1, 1)), (("NC_DIFF", 10),)),
         Row((("Q_DIFF", 2, 2), ("NC_DIFF", 2, 2)), (("NC_DIFF", 11),)),
@@ -210,18 +210,61 @@ DEFAULTS: Mapping[str, Default] = MappingProxyType(
     {
         "V_NVLIMSUPERV": Default(20, "A.3.2"),
         "Q_NVLOCACC": Default(12, "A.3.2"),
-        "Q_NVGUIPERM": Default(0, "A.3.2"),
-        "Q_NVSBFBPERM": Default(0, "A.3.2"),
-        "Q_NVINHSMICPERM": Default(0, "A.3.2"),
-        "A_NVMAXREDADH1": Default(20, "A.3.2"),
-        "A_NVMAXREDADH2": Default(14, "A.3.2"),
-        "A_NVMAXREDADH3": Default(14, "A.3.2"),
-        "M_NVAVADH": Default(0, "A.3.2"),
-        "M_NVEBCL": Default(9, "A.3.2"),
-        "Q_NVKINT": Default(0, "A.3.2"),
-        "NID_OPERATIONAL": Default("", "6.5.1.5.34.2"),
-        "telephone_numbers": Default([], "6.5.1.5.25.1"),
+        "Q_NVGUIPERM": Default(0, "A.3.2", stated=False),
+        "Q_NVSBFBPERM": Default(0, "A.3.2", stated=False),
+        "Q_NVINHSMICPERM": Default(0, "A.3.2", stated=False),
+        "A_NVMAXREDADH1": Default(20, "A.3.2", stated=False),
+        "A_NVMAXREDADH2": Default(14, "A.3.2", stated=False),
+        "A_NVMAXREDADH3": Default(14, "A.3.2", stated=False),
+        "M_NVAVADH": Default(0, "A.3.2", stated=False),
+        "M_NVEBCL": Default(9, "A.3.2", stated=False),
+        "Q_NVKINT": Default(
+            0, "A.3.2", stated=False, note="A.3.2 has factors, and no steps to say them in"
+        ),
+        "NID_OPERATIONAL": Default("", "6.5.1.5.34.2", stated=False),
+        "telephone_numbers": Default([], "6.5.1.5.25.1", stated=False),
     }
 )
 """Default national values (100 km/h, 12 m, 1.0 and 0.7 m/s2, 99.9999999 %), and what a train
-that has stored neither running number nor telephone numbers sends: unknown, and none."""
+that has stored neither running number nor telephone numbers sends: unknown, and none. Of those of
+packet 3, 6.6.3.2.3 [1a] has the first two taken; the others keep what is stored ([2])."""
+
+SPARE_DIGITS: Mapping[str, frozenset[str]] = MappingProxyType(
+    {"NID_OPERATIONAL": frozenset("ABCDE")}
+)
+"""Digits without meaning (7.5.1.92); in telephone numbers they are merely not used (7.5.1.95)."""
+
+SAME_IN_OTHER_WORDS: frozenset[frozenset[str]] = frozenset(
+    map(
+        frozenset,
+        (
+            ("unknown", "distance not known"),
+            ("unknown", "length not known"),
+            ("safety critical failure", "safety critical fault"),
+            ("reverse", "passed in reverse direction"),
+            ("nominal", "passed in nominal direction"),
+            ("display until confirmed", "required"),
+            (
+                "service brake if unconfirmed at the end condition",
+                "required, else service brake at the end condition",
+            ),
+            ("profile start is the EOA, SvL kept from the MA", "SvL derived from the MA"),
+            ("profile start is both EOA and SvL", "start of the mode profile is the SvL"),
+            (
+                "conditional stop accepted, EOA updated",
+                "conditional stop accepted, EOA/LOA updated",
+            ),
+            (
+                "conditional stop accepted, EOA not updated",
+                "conditional stop accepted, EOA/LOA not updated",
+            ),
+            # What a rule leaves as it is although one side says it more exactly.
+            ("non stopping area, tunnel", "non stopping area"),
+            (
+                "national system if level NTC reported, else limited supervision",
+                "limited supervision",
+            ),
+        ),
+    )
+)
+"""Labels of one code in two issues that mean the same."""

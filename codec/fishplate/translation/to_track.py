@@ -94,8 +94,9 @@ X2_TO_X1_IN_3_3_0: Mapping[Subject, Rule] = MappingProxyType(
                     STOP_ANSWER,
                     STOP_ANSWER_BACKWARDS,
                     when=Eq("Q_EMERGENCYSTOP", 3),
-                    note="of a rejected stop 2.0 does not say whether it was conditional; "
-                    "for an unconditional one 2 is sent",
+                    note="2.0 does not say whether the stop was conditional; of an unconditional "
+                    "one X = 1 reports 2",
+                    guess=True,
                 ),
             ),
         ),

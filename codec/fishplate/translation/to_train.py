@@ -2,6 +2,7 @@
 
 from __future__ import annotations
 
+from dataclasses import replace
 from types import MappingProxyType
 from typing import TYPE_CHECKING
 
@@ -15,6 +16,7 @@ from fishplate.translation.tables import (
     NO_MORE_POSITION,
     NO_MORE_POSITION_BACKWARDS,
     NON_STOPPING,
+    NOT_REPLACING,
     TABLE_3,
     TABLE_3_BACKWARDS,
     TABLE_3D,
@@ -31,6 +33,7 @@ from fishplate.translation.vocabulary import (
     Insert,
     JoinInto,
     LeaveOut,
+    Lowest,
     MapCodes,
     MoveDigits,
     OnlyOn,
@@ -40,6 +43,7 @@ from fishplate.translation.vocabulary import (
     Rename,
     Renumber,
     Rule,
+    SharedWith,
     SplitOff,
 )
 
@@ -50,6 +54,7 @@ if TYPE_CHECKING:
 
 CATEGORIES = ("steps", "categories")
 AREAS = ("areas", "categories")
+SUITABILITIES = ("suitabilities",)
 UNKNOWN_GROUP = 16777215
 
 UNCHANGED_PACKETS = (
@@ -71,7 +76,7 @@ X1_TO_X2: Mapping[Subject, Rule] = MappingProxyType(
         ),
         ("packet", 27): Rule(
             "unchanged, variables mapped",
-            (MapCodes(TABLE_3, TABLE_3_BACKWARDS, CATEGORIES, missing="element"),),
+            (MapCodes(TABLE_3, TABLE_3_BACKWARDS, CATEGORIES),),
         ),
         ("packet", 39): Rule(
             "translated",
@@ -84,7 +89,7 @@ X1_TO_X2: Mapping[Subject, Rule] = MappingProxyType(
             "translated",
             (
                 Insert("D_TRACKINIT", 0, when=Eq("Q_TRACKINIT", 1)),
-                MapCodes(TABLE_5, TABLE_3D, AREAS, missing="element"),
+                MapCodes(TABLE_5, TABLE_3D, AREAS),
             ),
         ),
         ("packet", 68): Rule(
@@ -129,11 +134,11 @@ X1_TO_X2: Mapping[Subject, Rule] = MappingProxyType(
             "translated",
             (
                 OnlyOn("balise", "only balises mark what is covered"),
-                Drop("Q_DIR", 2),
                 Renumber(0, first=True),
+                Drop("Q_DIR", 2),
             ),
         ),
-        ("packet", 203): Rule("translated", (JoinInto(3),)),
+        ("packet", 203): Rule("translated", (JoinInto(3, alone="6.5.1.7.5"),)),
         ("packet", 206): Rule(
             "translated",
             (Rename("M_TRACKCONDBC", "M_TRACKCOND", ("conditions",)), Renumber(68)),
@@ -164,6 +169,16 @@ X1_TO_X2_IN_3_3_0: Mapping[Subject, Rule] = MappingProxyType(
 )
 """What issue 3.3.0 says otherwise: from X = 1 to 2.0."""
 
+SHARED_WITH_1_1: Mapping[Subject, Rule] = MappingProxyType(
+    {
+        ("packet", number): replace(
+            X1_TO_X2["packet", number], does=(*X1_TO_X2["packet", number].does, SharedWith(other))
+        )
+        for number, other in ((39, 239), (68, 206), (70, 207))
+    }
+)
+"""What 1.1 adds: of these packets it has a newer form, which gets their number."""
+
 SHIFTED = RejectWhere(
     Ne("D_REF", 0), "its distances count from a shifted location, which X = 1 cannot say"
 )
@@ -183,7 +198,24 @@ X2_TO_1_0: Mapping[Subject, Rule] = MappingProxyType(
         ),
         ("packet", 27): Rule(
             "unchanged, variables mapped",
-            (MapCodes(TABLE_3_BACKWARDS, TABLE_3, CATEGORIES, missing="element"),),
+            (
+                MapCodes(
+                    NOT_REPLACING,
+                    scope=CATEGORIES,
+                    missing="element",
+                    when=Eq("Q_DIFF", 2),
+                    note="with X = 1 it may replace the speed for the cant deficiency",
+                    guess=True,
+                ),
+                MapCodes(
+                    TABLE_3_BACKWARDS,
+                    TABLE_3,
+                    CATEGORIES,
+                    missing="element",
+                    when=In("Q_DIFF", (0, 1, 3)),
+                ),
+                Lowest("NC_DIFF", "V_DIFF", CATEGORIES),
+            ),
         ),
         ("packet", 39): Rule(
             "translated", (MapCodes(TABLE_13_BACKWARDS, TABLE_13, missing="whole"),)
@@ -197,6 +229,7 @@ X2_TO_1_0: Mapping[Subject, Rule] = MappingProxyType(
                 ),
                 Drop("D_TRACKINIT", 0),
                 MapCodes(TABLE_3D, TABLE_5, AREAS, missing="element"),
+                Lowest("M_AXLELOAD", "V_AXLELOAD", AREAS),
             ),
         ),
         ("packet", 68): Rule(
@@ -214,10 +247,17 @@ X2_TO_1_0: Mapping[Subject, Rule] = MappingProxyType(
             "rejected, with exceptions",
             (
                 LeaveOut(
-                    Ne("Q_SUITABILITY", 2),
-                    "with X = 1 only the traction system is taken over",
-                    ("suitabilities",),
+                    In("Q_SUITABILITY", (0, 3)),
+                    "X = 1 has no interoperable loading gauge",
+                    SUITABILITIES,
                     "D_SUITABILITY",
+                ),
+                MapCodes(
+                    TABLE_3D,
+                    TABLE_5,
+                    SUITABILITIES,
+                    missing="element",
+                    distance="D_SUITABILITY",
                 ),
                 MapCodes(
                     TABLE_13_BACKWARDS,

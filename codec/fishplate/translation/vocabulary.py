@@ -60,10 +60,15 @@ class BitTable:
 
 @dataclass(frozen=True, slots=True)
 class Default:
-    """A value that is taken where none is given, and the clause that sets it."""
+    """A value that is taken where none is given, and the clause that gives it.
+
+    `stated` is False where the clause does not say that it is taken here.
+    """
 
     value: Any
     clause: str
+    stated: bool = True
+    note: str = ""
 
 
 @dataclass(frozen=True, slots=True)
@@ -181,7 +186,7 @@ class Drop:
 
 @dataclass(frozen=True, slots=True)
 class Clear:
-    """A set is emptied."""
+    """A set is emptied: the target sends it without elements."""
 
     series: str
 
@@ -192,6 +197,7 @@ class MapCodes:
 
     `missing` says what becomes of codes that the table does not name, `told` whether chapter 6
     says so itself; `distance` is that of `LeaveOut`. `note` is said beside what the codes mean.
+    A `guess` chooses between what the source does not tell apart: it is not stated, and lossy.
     """
 
     table: CodeTable
@@ -202,6 +208,23 @@ class MapCodes:
     distance: str = ""
     when: Condition | None = None
     note: str = ""
+    guess: bool = False
+
+
+@dataclass(frozen=True, slots=True)
+class Lowest:
+    """Of elements that say the same of `variable`, the one with the lowest `code` stays."""
+
+    variable: str
+    code: str
+    scope: tuple[str, ...]
+
+
+@dataclass(frozen=True, slots=True)
+class SharedWith:
+    """The packet keeps its number, which that of another number gets too."""
+
+    number: int
 
 
 @dataclass(frozen=True, slots=True)
@@ -242,9 +265,13 @@ class Fill:
 
 @dataclass(frozen=True, slots=True)
 class JoinInto:
-    """The packet gives its values to one of this number in the same message, and goes."""
+    """The packet gives its values to those of this number in the same message, and goes.
+
+    `alone` is the clause that holds where there is none.
+    """
 
     number: int
+    alone: str = ""
 
 
 @dataclass(frozen=True, slots=True)
@@ -279,6 +306,8 @@ Action = (
     | Drop
     | Clear
     | MapCodes
+    | Lowest
+    | SharedWith
     | JoinBits
     | SplitBits
     | MoveDigits
@@ -309,16 +338,21 @@ class RuleBook:
     """The rules for one direction of travel from one set of versions to another.
 
     `packets` and `messages` are the clauses that hold where a rule names none, `absent` the one
-    that says which packets the target has, `unread` the one about data that cannot be read.
-    `stated` is False where the rules are derived: as the reverse of stated ones, or because
-    versions of the same X are compatible.
+    that says which packets the target has, `newer`, by medium and number, those that say which
+    need a later version of its X. `unread` is the clause about data that cannot be read; with
+    `checked` one such thing rejects the whole message, as does a spare code that is not
+    `passed`. `stated` is False where the rules are derived: as the reverse of stated ones, or
+    because versions of the same X are compatible.
     """
 
     packets: str
     messages: str
     absent: str
-    unread: str
     stated: bool
+    checked: bool = False
+    passed: frozenset[tuple[str, int]] = frozenset()
+    unread: str = "6.6.3.1.1"
+    newer: Mapping[tuple[str, int], str] = field(default_factory=_nothing)
     rules: Mapping[Subject, Rule] = field(default_factory=_nothing)
 
 
