@@ -249,3 +249,12 @@ def test_a_form_that_a_packet_does_not_come_in() -> None:
     packet = {"NID_PACKET": 45, "Q_DIR": "nominal", "Q_NETWORKTYPE": 9}
     found = errors_of({"version": "2.2", "header": header, "packets": [packet]})
     assert list(found) == ["packets[0].Q_NETWORKTYPE"]
+
+
+def test_a_variable_of_another_version_is_named_with_it() -> None:
+    """Q_INTEGRITY stands in place of Q_LENGTH in issue 4.0.0 (SUBSET-026 7.5.1.112)."""
+    packet = {"NID_PACKET": 0, "Q_SCALE": "1 m", "Q_INTEGRITY": 0}
+    header = {"NID_MESSAGE": 136, "T_TRAIN": 1, "NID_ENGINE": 9091}
+    found = errors_of({"header": header, "packets": [packet]})
+    said = found["packets[0].Q_INTEGRITY"]
+    assert said == ("not part of this layout; Q_INTEGRITY is of 3.0, the tree is read as 2.1")

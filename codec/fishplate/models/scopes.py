@@ -30,6 +30,7 @@ from fishplate.engine.walk import holds
 from fishplate.errors import EncodeError
 from fishplate.meaning import parse
 from fishplate.models.schema import DIALECT, scope_schema
+from fishplate.standard import known_versions, registry
 from fishplate.standard.vocabulary import (
     COUNT,
     Field,
@@ -85,7 +86,10 @@ class Scope(BaseModel):
             result = handler(value)
         except ValidationError as error:
             keys = list(cls.model_fields)
-            errors += [_copied(each, keys) for each in error.errors(include_url=False)]
+            found = error.errors(include_url=False)
+            # The model of a whole frame has no layout of its own.
+            used = getattr(cls, "registry_used", None)
+            errors += [_copied(each, keys, used) for each in found]
         finally:
             _outer.reset(outer_token)
             _scale.reset(scale_token)
@@ -178,14 +182,16 @@ def _details(key: str, reason: str, value: object) -> InitErrorDetails:
     return InitErrorDetails(type=custom_error(reason), loc=(key,), input=value)
 
 
-def _copied(error: Any, keys: Sequence[str]) -> InitErrorDetails:
+def _copied(error: Any, keys: Sequence[str], used: Registry | None) -> InitErrorDetails:
     """Carry an error of pydantic over; its own sentences are kept."""
     reason = error["msg"]
     context = error.get("ctx", {})
     match error["type"]:
         case "extra_forbidden":
-            near = get_close_matches(str(error["loc"][-1]), keys, n=1)
-            reason = "not part of this layout" + (f"; did you mean {near[0]}?" if near else "")
+            name = str(error["loc"][-1])
+            near = get_close_matches(name, keys, n=1)
+            hint = f"; did you mean {near[0]}?" if near else ""
+            reason = f"not part of this layout{_elsewhere(name, used) or hint}"
         case "list_type":
             reason = f"expected a list, got {error['input']!r}"
         case "too_short" | "too_long":
@@ -247,6 +253,15 @@ def _checked_bits(value: object) -> object:
 
 Bits = Annotated[dict[str, Any], _as_pydantic(_checked_bits)]
 """Bits that no layout explains."""
+
+
+def _elsewhere(name: str, used: Registry | None) -> str:
+    """Say which other versions have a variable that the one used lacks."""
+    if used is None or name in used.variables:
+        return ""
+    others = [each for each in known_versions() if name in registry(each).variables]
+    known = f"; {name} is of {', '.join(others)}" if others else ""
+    return f"{known}, the tree is read as {used.version}" if known else ""
 
 
 def scope_model(
