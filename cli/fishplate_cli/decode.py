@@ -2,15 +2,11 @@
 
 from __future__ import annotations
 
-import json
-from decimal import Decimal
 from enum import StrEnum
-from itertools import chain
 from typing import TYPE_CHECKING, Annotated, Any
 
 import typer
 
-from fishplate.captures import time_text
 from fishplate.versions import DEFAULT_VERSION
 from fishplate_cli.console import Complaints, coloured, width, write
 from fishplate_cli.inputs import (
@@ -24,6 +20,7 @@ from fishplate_cli.inputs import (
     check_frames,
     read_frames,
 )
+from fishplate_cli.json_output import dump, write_trees
 
 if TYPE_CHECKING:
     from collections.abc import Callable, Iterable, Iterator
@@ -131,47 +128,23 @@ def _given(frame: Frame, message: Message) -> dict[str, str]:
     return given
 
 
-def _dump(tree: dict[str, Any], indent: int | None = None) -> str:
-    """Write a tree as JSON, a time that is a number with its own digits."""
-    time = tree.get("time")
-    if not isinstance(time, Decimal):
-        return json.dumps(tree, ensure_ascii=False, indent=indent)
-    text = json.dumps({**tree, "time": None}, ensure_ascii=False, indent=indent)
-    return text.replace('"time": null', f'"time": {time_text(time)}', 1)
-
-
 def _jsonl(decoded: Decoded) -> None:
     for frame, message in decoded:
-        write(_dump(context(frame, message, full=True) | message.tree()))
+        write(dump(context(frame, message, full=True) | message.tree()))
 
 
 def _json(decoded: Decoded) -> None:
-    """Write the tree of one frame, or the list of several or of none."""
-    texts = (
-        _dump(context(frame, message, full=False) | message.tree(), indent=2)
-        for frame, message in decoded
-    )
-    first = next(texts, None)
-    if first is None:
-        write("[]")
-        return
-    second = next(texts, None)
-    if second is None:
-        write(first)
-        return
-    write(f"[\n{first}")
-    for text in chain((second,), texts):
-        write(f",\n{text}")
-    write("]")
+    trees = (context(frame, message, full=False) | message.tree() for frame, message in decoded)
+    write_trees(trees)
 
 
 def _yaml(decoded: Decoded) -> None:
-    from fishplate_cli.yaml_output import dump  # noqa: PLC0415  loads PyYAML
+    from fishplate_cli.yaml_output import dump as dump_yaml  # noqa: PLC0415  loads PyYAML
 
     for number, (frame, message) in enumerate(decoded):
         if number:
             write("---")
-        write(dump(context(frame, message, full=False) | message.tree()))
+        write(dump_yaml(context(frame, message, full=False) | message.tree()))
 
 
 WRITERS: dict[As, Callable[[Decoded], None]] = {

@@ -7,7 +7,7 @@ from difflib import get_close_matches
 from typing import TYPE_CHECKING, NamedTuple
 
 from fishplate.standard.comparison import counterparts
-from fishplate.standard.editions import EDITIONS, version_key
+from fishplate.standard.editions import EDITIONS, reaches
 from fishplate.standard.history import stages
 from fishplate.standard.vocabulary import (
     COUNT,
@@ -105,9 +105,7 @@ def _there(stage: Stage, words: Sequence[str]) -> list[Found]:
 def stage_label(stage: Stage, thing: Found | None = None) -> str:
     """Name the versions of a stage (of these, the ones that may use a thing) and its issue."""
     since = thing.since if isinstance(thing, Packet) else ""
-    versions = [
-        each for each in stage.versions if not since or version_key(each) >= version_key(since)
-    ]
+    versions = [each for each in stage.versions if reaches(each, since)]
     kinds = [EVIDENCE[each.kind] for each in stage.book.evidence_of()]
     return f"{' and '.join(versions)} ({', '.join([f'issue {stage.book.issue}', *kinds])})"
 

@@ -2,11 +2,8 @@
 
 from __future__ import annotations
 
-import json
 from dataclasses import replace
-from decimal import Decimal
 from enum import StrEnum
-from itertools import chain
 from pathlib import Path
 from textwrap import wrap
 from typing import TYPE_CHECKING, Annotated, Any, NamedTuple
@@ -14,9 +11,9 @@ from typing import TYPE_CHECKING, Annotated, Any, NamedTuple
 import typer
 
 from fishplate.bits import to_bytes, to_hex
-from fishplate.captures import capture_line, time_text
+from fishplate.captures import CaptureDecoder, capture_line
 from fishplate.errors import EncodeError, path_text
-from fishplate.frames import decode, encode_bits
+from fishplate.frames import encode_bits
 from fishplate.translation import VERSIONS, translate
 from fishplate.translation.stored import stored_values
 from fishplate_cli.console import Complaints, coloured, style, visible, width, write
@@ -31,6 +28,7 @@ from fishplate_cli.inputs import (
     check_frames,
     read_frames,
 )
+from fishplate_cli.json_output import dump, write_trees
 
 if TYPE_CHECKING:
     from collections.abc import Iterable, Iterator, Mapping
@@ -117,10 +115,10 @@ def command(
         case As.TEXT:
             _text(translated)
         case As.JSON:
-            _json(translated)
+            write_trees(_tree(each, full=False) for each in translated)
         case As.JSONL:
             for each in translated:
-                write(_dump(_tree(each, full=True)))
+                write(dump(_tree(each, full=True)))
         case As.HEX | As.CAPTURE:
             _frames(translated, view, complaints)
     complaints.end()
@@ -216,32 +214,6 @@ def _tree(each: Translated, *, full: bool) -> dict[str, Any]:
     return {**tree, "changes": [change.tree() for change in each.translation.changes]}
 
 
-def _dump(tree: dict[str, Any], indent: int | None = None) -> str:
-    """Write a tree as JSON, a time that is a number with its own digits."""
-    time = tree.get("time")
-    if not isinstance(time, Decimal):
-        return json.dumps(tree, ensure_ascii=False, indent=indent)
-    text = json.dumps({**tree, "time": None}, ensure_ascii=False, indent=indent)
-    return text.replace('"time": null', f'"time": {time_text(time)}', 1)
-
-
-def _json(translated: Iterable[Translated]) -> None:
-    """Write the tree of one frame, or the list of several or of none."""
-    texts = (_dump(_tree(each, full=False), indent=2) for each in translated)
-    first = next(texts, None)
-    if first is None:
-        write("[]")
-        return
-    second = next(texts, None)
-    if second is None:
-        write(first)
-        return
-    write(f"[\n{first}")
-    for text in chain((second,), texts):
-        write(f",\n{text}")
-    write("]")
-
-
 def _text(translated: Iterable[Translated]) -> None:
     from fishplate_cli.view import View  # noqa: PLC0415  the other forms do without
 
@@ -254,20 +226,9 @@ def _text(translated: Iterable[Translated]) -> None:
             title = f"frame {each.source.index}  nothing is left"
             write(style(title, "bold", colour=colour))
         else:
-            for line in view.frame(each.frame, _message(each.frame)):
+            for line in view.frame(each.frame, CaptureDecoder().decode(each.frame)):
                 write(line)
         for change in each.translation.changes:
             text = visible(f"{MARK} {change_text(change)}")
             for line in wrap(text, columns, initial_indent=INDENT, subsequent_indent=INDENT * 2):
                 write(style(line, "mark" if change.lossy else "faint", colour=colour))
-
-
-def _message(frame: Frame) -> Any:
-    return decode(
-        frame.data,
-        medium=frame.medium,
-        direction=frame.direction,
-        version=frame.version,
-        bits=frame.bits,
-        strict=False,
-    )

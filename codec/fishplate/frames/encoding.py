@@ -342,21 +342,14 @@ class _Writer:
                 expected="the number of a packet",
                 got=number,
             )
-        spelling = Spelling(layouts.registry.variables)
-        spelling.scope(known.nodes, layout, path, {})
-        return spelling.pieces
-
-    def _pieces(self, nodes: Sequence[Node], tree: object, path: Path) -> list[tuple[int, int]]:
-        spelling = Spelling(self.codec.registry.variables)
-        spelling.scope(nodes, tree, path, {})
-        return spelling.pieces
+        return _spelt(layouts, known.nodes, layout, path)
 
     def _spell(self, nodes: Sequence[Node], tree: object, path: Path) -> None:
-        self._add(*_joined(self._pieces(nodes, tree, path)))
+        self._add(*_joined(_spelt(self.codec, nodes, tree, path)))
 
     def _misfit(self, nodes: Sequence[Node], tree: object, path: Path) -> EncodeError:
         try:
-            self._pieces(nodes, tree, path)
+            _spelt(self.codec, nodes, tree, path)
         except EncodeError as error:
             return error
         raise AssertionError(f"the walk writes what the writer of {path} could not")
@@ -364,6 +357,14 @@ class _Writer:
     def _add(self, value: int, width: int) -> None:
         self.value = self.value << width | value
         self.size += width
+
+
+def _spelt(
+    layouts: Codec, nodes: Sequence[Node], tree: object, path: Path
+) -> list[tuple[int, int]]:
+    spelling = Spelling(layouts.registry.variables)
+    spelling.scope(nodes, tree, path, {})
+    return spelling.pieces
 
 
 def _joined(pieces: Sequence[tuple[int, int]]) -> tuple[int, int]:

@@ -13,7 +13,7 @@ from fishplate.engine.runtime import codec
 from fishplate.errors import DecodeError
 from fishplate.frames import quick
 from fishplate.frames.sizes import LONGEST_PACKET, LONGEST_PADDING, MESSAGE_START
-from fishplate.standard.editions import DEFAULT_VERSION, EDITIONS, Edition, edition, version_key
+from fishplate.standard.editions import DEFAULT_VERSION, EDITIONS, Edition, edition, reaches
 from fishplate.standard.vocabulary import TO_TRAIN
 
 if TYPE_CHECKING:
@@ -117,6 +117,5 @@ def _may_fit(each: Edition, n: int, size: int) -> bool:
 def _may_hold(each: Edition, message: Message) -> bool:
     """Tell whether a version may use all the packets of a message."""
     since = codec(each.version, each.issue).since[message.direction or TO_TRAIN]
-    numbers = [packet["NID_PACKET"] for packet in message.packets]
-    first = [since[number] for number in numbers if number in since]
-    return all(version_key(version) <= version_key(each.version) for version in first)
+    numbers = (packet["NID_PACKET"] for packet in message.packets)
+    return all(reaches(each.version, since.get(number, "")) for number in numbers)

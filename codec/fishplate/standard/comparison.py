@@ -9,7 +9,7 @@ from __future__ import annotations
 from dataclasses import dataclass, replace
 from typing import TYPE_CHECKING, Literal
 
-from fishplate.standard.editions import version_key
+from fishplate.standard.editions import reaches
 from fishplate.standard.fields import CodeChange, FieldChange, code_changes, field_changes
 from fishplate.standard.vocabulary import (
     TO_TRACK,
@@ -98,7 +98,7 @@ class Comparison:
 def may_use(book: Registry, thing: Thing) -> bool:
     """Tell whether the version of a registry may use what its layouts hold (`Packet.since`)."""
     since = thing.since if isinstance(thing, Packet) else ""
-    return not since or version_key(book.version) >= version_key(since)
+    return reaches(book.version, since)
 
 
 def counterparts(thing: Thing, book: Registry) -> list[Thing]:

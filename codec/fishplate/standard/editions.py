@@ -66,6 +66,11 @@ def known_issues() -> tuple[str, ...]:
     return tuple(sorted({each.issue for each in EDITIONS}))
 
 
+def reaches(version: str, since: str) -> bool:
+    """Tell whether a version may use what is for `since` and later (all of it where empty)."""
+    return not since or version_key(version) >= version_key(since)
+
+
 def version_key(version: str) -> tuple[int, int]:
     """Return X and Y of a version, to compare it with others."""
     x, _, y = version.partition(".")

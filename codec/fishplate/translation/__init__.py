@@ -12,16 +12,16 @@ from dataclasses import dataclass
 from typing import TYPE_CHECKING, Any
 
 from fishplate.authoring import author_bits
+from fishplate.bits import to_bytes
 from fishplate.errors import EncodeError
 from fishplate.frames import Message, decode
-from fishplate.meaning import parse
 from fishplate.standard import registry
 from fishplate.standard.editions import edition
 from fishplate.translation.engine import FrameTranslator
 from fishplate.translation.report import Change
 from fishplate.translation.routes import ROUTES, VERSIONS
 from fishplate.translation.stored import stored_values
-from fishplate.versions import DEFAULT_VERSION, version_text
+from fishplate.versions import told_version
 
 if TYPE_CHECKING:
     from collections.abc import Mapping
@@ -77,26 +77,18 @@ def _message_of(tree: Any) -> Message:
     """Read a tree as the message it describes."""
     if not isinstance(tree, dict):
         raise EncodeError(f"expected a message or a tree, got {type(tree).__name__}")
-    version = tree.get("version") or _version_in(tree.get("header")) or DEFAULT_VERSION
-    tree = {**tree, "version": version}
+    unsaid = {name: value for name, value in tree.items() if name != "version"}
+    tree = {**tree, "version": tree.get("version") or told_version(unsaid)}
     value, bits = author_bits(tree)
     return decode(
-        (value << -bits % 8).to_bytes((bits + 7) // 8),
+        to_bytes(value, bits),
         medium=tree.get("medium"),
         direction=tree.get("direction"),
-        version=version,
+        version=tree["version"],
         issue=tree.get("issue"),
         bits=bits,
         strict=False,
     )
-
-
-def _version_in(header: object) -> str | None:
-    """Return the version that the header of a telegram or loop message names."""
-    if not isinstance(header, dict) or "NID_MESSAGE" in header or "M_VERSION" not in header:
-        return None
-    code = parse(registry(DEFAULT_VERSION).variables["M_VERSION"], header["M_VERSION"])
-    return version_text(int(code))
 
 
 def _check_version(version: str, path: tuple[str], way: str) -> None:

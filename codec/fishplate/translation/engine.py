@@ -4,11 +4,12 @@ from __future__ import annotations
 
 from typing import TYPE_CHECKING, Any
 
+from fishplate.bits import to_bytes
 from fishplate.engine.runtime import codec
 from fishplate.errors import DecodeError, EncodeError
 from fishplate.frames import decode, encode_bits
 from fishplate.frames.sizes import HEADS
-from fishplate.standard.editions import version_key
+from fishplate.standard.editions import reaches
 from fishplate.standard.vocabulary import TO_TRACK, TO_TRAIN
 from fishplate.translation.actions import DOES
 from fishplate.translation.consistency import first_fault, is_read, unexplained_bits
@@ -152,7 +153,7 @@ class FrameTranslator:
         source = self.report.source
         found = target.packets.get((self.direction, piece.number))
         title = source.packet(piece.source["NID_PACKET"])
-        later = found is not None and _is_later(found.since, version)
+        later = found is not None and not reaches(version, found.since)
         if found is None or later:
             absent = self.book.absent
             key = (self.around.medium, piece.number)
@@ -217,10 +218,6 @@ class FrameTranslator:
         return {each.path[0] for each in self.message.problems if each.path}
 
 
-def _is_later(since: str, version: str) -> bool:
-    return bool(since) and version_key(since) > version_key(version)
-
-
 def _carries(message: RadioMessage, number: int) -> bool:
     required = {each for entry in message.required.packets for each in entry}
     return number in required or number in {each.packet for each in message.optional}
@@ -235,10 +232,9 @@ def _lacking(message: RadioMessage, packets: Sequence[Tree]) -> tuple[int, ...]:
 def _checked(tree: Tree, target: Codec) -> Tree:
     """Write the tree and read it again: in the order of its layouts, and without a problem."""
     value, bits = encode_bits(tree)
-    data = (value << -bits % 8).to_bytes((bits + 7) // 8)
     try:
         read = decode(
-            data,
+            to_bytes(value, bits),
             medium=tree["medium"],
             direction=tree["direction"],
             version=target.version,
